@@ -1,0 +1,100 @@
+import * as z from "zod/mini";
+import { purposes, type Depth, type Purpose } from "./entry";
+
+/** The seven places to stand, in walking order. */
+export const stationKeys = [
+  "coach-tail",
+  "car-nose",
+  "cables-and-cord",
+  "car-cabin",
+  "pull",
+  "car-tail",
+  "last-look",
+] as const;
+export type StationKey = (typeof stationKeys)[number];
+
+/** The parts that have a drawing. */
+export const partKeys = [
+  "receiver",
+  "arm",
+  "cables",
+  "cord",
+  "cabin",
+  "brake",
+  "wheels",
+  "lamps",
+  "last-look",
+  "chocks",
+  "bar-stowed",
+] as const;
+export type PartKey = (typeof partKeys)[number];
+
+export const effects = ["hold", "fix"] as const;
+
+/** One thing to look at: what is asked, how to look, why it matters and what a fault does. */
+export const checkShape = z.looseObject({
+  key: z.string().check(z.minLength(1)),
+  kind: z.enum(["look", "lamps"]),
+  part: z.enum(partKeys),
+  side: z.optional(z.enum(["left", "right"])),
+  ask: z.string(),
+  how: z.string(),
+  why: z.string(),
+  mend: z.string(),
+  effect: z.enum(effects),
+  mayBeAbsent: z.boolean(),
+  caution: z.optional(z.string()),
+});
+export type Check = z.infer<typeof checkShape>;
+
+const stationShape = z.looseObject({
+  key: z.enum(stationKeys),
+  title: z.string(),
+  checks: z.array(checkShape),
+});
+
+const keysShape = z.array(z.string()).check(z.minLength(1));
+
+/** The document that a revision's digest covers: the sheet, the list composed from it, and the walks. */
+export const revisionShape = z
+  .looseObject({
+    v: z.literal(1),
+    sheet: z.looseObject({}),
+    catalogue: z.string(),
+    list: z.looseObject({ stations: z.array(stationShape) }),
+    walks: z.record(z.enum(purposes), z.object({ full: keysShape, short: keysShape })),
+  })
+  .check(z.refine(walksAreWhole, "walks name unknown checks, or a short walk leaves out a hold"));
+export type RevisionDocument = z.infer<typeof revisionShape>;
+
+function walksAreWhole(document: RevisionDocument): boolean {
+  const checks = checksOf(document);
+  return purposes.every((purpose) => {
+    const { full, short } = document.walks[purpose];
+    const holds = full.filter((key) => checks.get(key)?.effect === "hold");
+    return (
+      full.every((key) => checks.has(key)) &&
+      short.every((key) => full.includes(key)) &&
+      holds.every((key) => short.includes(key))
+    );
+  });
+}
+
+/** Every check of a revision by its key. */
+export function checksOf(document: RevisionDocument): Map<string, Check> {
+  return new Map(document.list.stations.flatMap((s) => s.checks).map((check) => [check.key, check]));
+}
+
+/** The checks of one walk in walking order, each with the station it is made at. */
+export function walkChecks(
+  document: RevisionDocument,
+  purpose: Purpose,
+  depth: Depth,
+): { station: { key: StationKey; title: string }; check: Check }[] {
+  const placed = new Map(
+    document.list.stations.flatMap(({ key, title, checks }) =>
+      checks.map((check) => [check.key, { station: { key, title }, check }] as const),
+    ),
+  );
+  return document.walks[purpose][depth].flatMap((key) => placed.get(key) ?? []);
+}

@@ -1,0 +1,125 @@
+import { bodyOf, type Entry, type MarkBody, type Outcome } from "./entry";
+import { walkChecks, type Check, type RevisionDocument, type StationKey } from "./revision";
+
+/** How a check shows on a strip of tape. */
+export type Segment = "todo" | "good" | "hold" | "fix" | "unseen" | "absent";
+
+/** One mark as it was made; `tookMs` is the walking time since the entry before it. */
+export interface ReadMark extends MarkBody {
+  seq: number;
+  at: string;
+  elapsedMs: number;
+  tookMs: number;
+}
+
+/** A check with the mark that counts, and those that stood before it, oldest first. */
+export interface ReadCheck {
+  check: Check;
+  /** Whether this walk asks for it; a mark on another check of the revision counts all the same. */
+  asked: boolean;
+  mark: ReadMark | null;
+  earlier: ReadMark[];
+  segment: Segment;
+  tookMs: number;
+}
+
+export interface ReadStation {
+  key: StationKey;
+  title: string;
+  checks: ReadCheck[];
+  tookMs: number;
+}
+
+/** Words that were left beside the checks. */
+export interface Remark {
+  seq: number;
+  elapsedMs: number;
+  text: string;
+}
+
+/** A walk's entries, set out the way someone reads them back. */
+export interface ReadWalk {
+  /** In walking order, without the stations at which nothing was asked or marked. */
+  stations: ReadStation[];
+  /** Checks of this walk, and how many of them were looked at: marked, and not as unseen. */
+  asked: number;
+  lookedAt: number;
+  remarks: Remark[];
+}
+
+/**
+ * Sets a walk's entries out by station and check. Only what the entries say: the verdict comes from `replay`.
+ * @param entries in order
+ */
+export function readWalk(document: RevisionDocument, entries: readonly Entry[]): ReadWalk {
+  const open = entries[0] ? bodyOf(entries[0], "open") : null;
+  const asked = open ? walkChecks(document, open.purpose, open.depth).map(({ check }) => check.key) : [];
+  const marks = marksByCheck(entries);
+  const stations = document.list.stations.map(({ key, title, checks }) => {
+    const read = inWalkingOrder(checks, asked)
+      .map((check) => readCheck(check, asked.includes(check.key), marks.get(check.key)))
+      .filter((check) => check.asked || check.mark || check.earlier.length > 0);
+    return { key, title, checks: read, tookMs: sum(read) };
+  });
+  const counted = stations.flatMap((station) => station.checks).filter((check) => check.asked);
+  return {
+    stations: stations.filter((station) => station.checks.length > 0),
+    asked: counted.length,
+    lookedAt: counted.filter(({ mark }) => mark && mark.outcome !== "unseen").length,
+    remarks: entries.flatMap(remarkOf),
+  };
+}
+
+/** The segment of tape for a check with this outcome: what a verdict would hold for is a hold here too. */
+export function segmentOf(check: Pick<Check, "effect" | "mayBeAbsent">, outcome?: Outcome): Segment {
+  if (!outcome) return "todo";
+  if (outcome === "fault") return check.effect;
+  if (outcome === "absent" && !check.mayBeAbsent && check.effect === "hold") return "hold";
+  return outcome;
+}
+
+type Marks = { standing: ReadMark | null; earlier: ReadMark[] };
+
+function marksByCheck(entries: readonly Entry[]): Map<string, Marks> {
+  const marks = new Map<string, Marks>();
+  let beforeMs = 0;
+  for (const entry of entries) {
+    for (const key of bodyOf(entry, "resume")?.again ?? []) {
+      const voided = marks.get(key);
+      if (voided) marks.set(key, { standing: null, earlier: past(voided) });
+    }
+    const mark = bodyOf(entry, "mark");
+    if (mark) {
+      const { seq, at, elapsedMs } = entry;
+      const standing = { ...mark, seq, at, elapsedMs, tookMs: Math.max(0, elapsedMs - beforeMs) };
+      marks.set(mark.check, { standing, earlier: past(marks.get(mark.check)) });
+    }
+    beforeMs = entry.elapsedMs;
+  }
+  return marks;
+}
+
+function past(marks: Marks | undefined): ReadMark[] {
+  return marks ? [...marks.earlier, ...(marks.standing ? [marks.standing] : [])] : [];
+}
+
+function readCheck(check: Check, asked: boolean, marks?: Marks): ReadCheck {
+  const { standing: mark, earlier } = marks ?? { standing: null, earlier: [] };
+  const segment = segmentOf(check, mark?.outcome);
+  return { check, asked, mark, earlier, segment, tookMs: sum([...earlier, ...(mark ? [mark] : [])]) };
+}
+
+/** A station's checks as this walk takes them, then those that it does not ask for. */
+function inWalkingOrder(checks: readonly Check[], asked: readonly string[]): Check[] {
+  const place = ({ key }: Check) => (asked.includes(key) ? asked.indexOf(key) : asked.length);
+  return [...checks].sort((one, other) => place(one) - place(other));
+}
+
+function remarkOf(entry: Entry): Remark[] {
+  const text = entry.type === "note" ? entry.body.text : null;
+  return typeof text === "string" ? [{ seq: entry.seq, elapsedMs: entry.elapsedMs, text }] : [];
+}
+
+function sum(parts: readonly { tookMs: number }[]): number {
+  return parts.reduce((total, { tookMs }) => total + tookMs, 0);
+}
