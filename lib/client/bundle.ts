@@ -1,0 +1,24 @@
+import { get, set, type UseStore } from "idb-keyval";
+import { digestOf } from "../domain/digest";
+import { bundleShape, type Bundle } from "../domain/field";
+import { call, type Answer, type Fetch } from "./api";
+
+const BUNDLE = ["bundle"];
+
+/** The bundle kept on this phone, or null where none ever came. */
+export async function keptBundle(store: UseStore): Promise<Bundle | null> {
+  return (await get<Bundle>(BUNDLE, store)) ?? null;
+}
+
+/**
+ * Fetches the bundle and keeps it. One whose lists do not digest to what they claim is not taken: a walk made against
+ * it could never be received.
+ */
+export async function fetchBundle(store: UseStore, fetch?: Fetch): Promise<Answer<Bundle>> {
+  const answer = await call(bundleShape, "GET", "/api/field/bundle", undefined, fetch);
+  if (answer.kind !== "answered") return answer;
+  const whole = answer.value.rigs.every(({ revision }) => digestOf(revision.document) === revision.digest);
+  if (!whole) return { kind: "unreached" };
+  await set(BUNDLE, answer.value, store);
+  return answer;
+}

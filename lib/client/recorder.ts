@@ -1,0 +1,157 @@
+import { nextLink, stamp, type Stamp } from "../domain/chain";
+import type { Depth, Entry, Link, MarkBody, Purpose } from "../domain/entry";
+import type { BundleRig } from "../domain/field";
+import { replay, type Replay } from "../domain/replay";
+import type { RevisionDocument } from "../domain/revision";
+import { thumbprint } from "../domain/signature";
+import { uuidV7 } from "../domain/uuid";
+import { APP } from "../domain/version";
+import type { Clock } from "./clock";
+import { signSeal, type Device } from "./device";
+import type { KeptWalk, WalkShelf } from "./walk-shelf";
+
+/** What a screen shows of the walk being recorded; a new object whenever something was saved. */
+export interface WalkView {
+  walk: KeptWalk;
+  document: RevisionDocument;
+  replay: Replay;
+}
+
+/** What a recorder stands on. */
+export interface Ground {
+  shelf: WalkShelf;
+  clock: Clock;
+  device: Device;
+}
+
+/**
+ * Records one walk. Every entry is digested (and a closing one signed) first and then saved in one strict
+ * transaction; the view moves on only after that, so what a screen shows is saved on this phone.
+ */
+export class Recorder {
+  private listeners = new Set<() => void>();
+  private line: Promise<unknown> = Promise.resolve();
+  private current: WalkView;
+
+  private constructor(
+    private readonly ground: Ground,
+    private readonly links: Link[],
+    private readonly takenUpMonoMs: number,
+    walk: KeptWalk,
+    document: RevisionDocument,
+  ) {
+    this.current = { walk, document, replay: this.replayed(document) };
+  }
+
+  /** Opens a new walk on a rig's current revision. */
+  static async open(
+    ground: Ground,
+    rig: BundleRig,
+    { member, purpose, depth }: { member: string; purpose: Purpose; depth: Depth },
+  ): Promise<Recorder> {
+    const now = ground.clock();
+    const id = uuidV7(now.wallMs, crypto.getRandomValues(new Uint8Array(10)));
+    const { digest: revision, document } = rig.revision;
+    const { id: device, publicKey } = ground.device;
+    const body = {
+      rig: rig.id,
+      revision,
+      purpose,
+      depth,
+      device,
+      member,
+      app: APP,
+      key: thumbprint(publicKey),
+    };
+    const open = nextLink(id, { revision }, "open", body, stamp(now, null, now.monoMs));
+    const walk: KeptWalk = {
+      id,
+      rig: rig.id,
+      rigName: rig.name,
+      revision,
+      purpose,
+      depth,
+      member,
+      device,
+      openedAt: open.entry.at,
+      length: 1,
+      head: open.digest,
+      acknowledged: 0,
+      seal: null,
+      verdict: null,
+      receipt: null,
+      refused: null,
+    };
+    await ground.shelf.begin(walk, open, document);
+    return new Recorder(ground, [open], now.monoMs, walk, document);
+  }
+
+  /** Takes up a walk that is on this phone, or null where it is not. */
+  static async takeUp(ground: Ground, id: string): Promise<Recorder | null> {
+    const walk = await ground.shelf.walk(id);
+    const document = walk && (await ground.shelf.document(walk.revision));
+    if (!walk || !document) return null;
+    return new Recorder(ground, await ground.shelf.links(id), ground.clock().monoMs, walk, document);
+  }
+
+  view = (): WalkView => this.current;
+
+  subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener);
+    return () => this.listeners.delete(listener);
+  };
+
+  /** Active walking time now, in milliseconds; stands still once the walk is closed. */
+  elapsedMs = (): number => (this.current.walk.seal ? this.current.replay.elapsedMs : this.stamp().elapsedMs);
+
+  /** Marks a check. Resolves when the mark is saved on this phone. */
+  mark(check: string, outcome: MarkBody["outcome"], more: Partial<MarkBody> = {}): Promise<void> {
+    return this.inLine(() => this.append("mark", { check, outcome, ...more }));
+  }
+
+  /** Closes and signs the walk as it stands. Resolves when both are saved on this phone; again is no error. */
+  close(): Promise<void> {
+    return this.inLine(async () => {
+      if (this.current.walk.seal) return;
+      const { verdict, counts } = this.current.replay;
+      const link = this.link("close", { verdict, ...counts });
+      const { device } = this.ground;
+      const signature = await signSeal(device, link.digest);
+      const seal = { walk: this.current.walk.id, seal: link.digest, alg: device.alg, signature };
+      await this.save(link, { seal, verdict });
+    });
+  }
+
+  private append(type: string, body: Entry["body"]): Promise<void> {
+    return this.save(this.link(type, body), {});
+  }
+
+  private link(type: string, body: Entry["body"]): Link {
+    return nextLink(this.current.walk.id, this.links.at(-1)!, type, body, this.stamp());
+  }
+
+  private async save(link: Link, change: Partial<KeptWalk>): Promise<void> {
+    const walk = await this.ground.shelf.append(link, change);
+    this.links.push(link);
+    this.current = { ...this.current, walk, replay: this.replayed(this.current.document) };
+    for (const listener of this.listeners) listener();
+  }
+
+  private stamp(): Stamp {
+    return stamp(this.ground.clock(), this.links.at(-1)!.entry, this.takenUpMonoMs);
+  }
+
+  private replayed(document: RevisionDocument): Replay {
+    return replay(
+      document,
+      this.links.map((link) => link.entry),
+    );
+  }
+
+  /** One write after the other, in the order asked; one that failed does not hold up the next. */
+  private inLine<T>(work: () => Promise<T>): Promise<T> {
+    const done = this.line.then(work);
+    this.line = done.catch(() => {});
+    return done;
+  }
+}

@@ -1,0 +1,174 @@
+import type { UseStore } from "idb-keyval";
+import * as z from "zod/mini";
+import type { Bundle, EnvelopeAnswer } from "../domain/field";
+import { call, type Answer, type Fetch } from "./api";
+import { fetchBundle, keptBundle } from "./bundle";
+import { deviceFor, registrationOf, setRegistered } from "./device";
+import { drainOnce, isUnsent } from "./drain";
+import { nextTry } from "./drain-timing";
+import { WalkShelf, type KeptWalk } from "./walk-shelf";
+
+/** What the field wing shows of the phone's store and of its dealings with the server. */
+export interface SyncView {
+  /** False until the store was read for the first time. */
+  ready: boolean;
+  bundle: Bundle | null;
+  /** The bundle's member's walks on this phone, newest first. */
+  walks: KeptWalk[];
+  /** The server said that nobody is signed in; recording goes on. */
+  signedOut: boolean;
+  /** Whether the last attempt reached the server; null before the first. */
+  reached: boolean | null;
+}
+
+/** What a sync stands on; injected so that tests run it on simulated time. */
+export interface SyncGround {
+  store: UseStore;
+  nowMs: () => number;
+  /** From 0 to 1, see {@link nextTry}. */
+  spread: number;
+  label: string;
+  fetch?: Fetch;
+  /** Runs the work unless another tab is at it. Resolves to whether it ran. */
+  alone: (work: () => Promise<void>) => Promise<boolean>;
+  /** Called after every attempt, so that other tabs read the store again. */
+  tell?: () => void;
+}
+
+const BUNDLE_AGE_MS = 5 * 60_000;
+
+/** Keeps the phone's walks and bundle in step with the server: one attempt at a time, at moments nextTry decides. */
+export class Sync {
+  readonly shelf: WalkShelf;
+  private listeners = new Set<() => void>();
+  private current: SyncView = { ready: false, bundle: null, walks: [], signedOut: false, reached: null };
+  private timer: ReturnType<typeof setTimeout> | null = null;
+  private trying = false;
+  private savedAt: number | null = null;
+  private stirredAt: number | null = null;
+  private triedAt: number | null = null;
+  private bundleAt: number | null = null;
+  private failures = 0;
+  private notBefore: number | null = null;
+
+  constructor(private readonly ground: SyncGround) {
+    this.shelf = new WalkShelf(ground.store);
+  }
+
+  view = (): SyncView => this.current;
+
+  subscribe = (listener: () => void): (() => void) => {
+    this.listeners.add(listener);
+    return () => this.listeners.delete(listener);
+  };
+
+  /** Reads the store, then begins to try. */
+  async start(): Promise<void> {
+    await this.read();
+    this.stir();
+  }
+
+  stop(): void {
+    if (this.timer) clearTimeout(this.timer);
+    this.timer = null;
+  }
+
+  /** Something new is saved on this phone. */
+  async saved(): Promise<void> {
+    this.savedAt = this.ground.nowMs();
+    await this.read();
+    this.plan();
+  }
+
+  /** The network, or a sign-in, may be back. */
+  stir(): void {
+    this.stirredAt = this.ground.nowMs();
+    this.plan();
+  }
+
+  /** Reads the store again without trying anything. */
+  async read(): Promise<void> {
+    const bundle = await keptBundle(this.ground.store);
+    const walks = (await this.shelf.walks()).filter((walk) => walk.member === bundle?.member.id);
+    this.show({ ready: true, bundle, walks });
+  }
+
+  private show(change: Partial<SyncView>): void {
+    this.current = { ...this.current, ...change };
+    for (const listener of this.listeners) listener();
+  }
+
+  private plan(): void {
+    this.stop();
+    if (this.trying) return;
+    const { nowMs, spread } = this.ground;
+    const { savedAt, stirredAt, triedAt, failures, notBefore } = this;
+    const { signedOut } = this.current;
+    const pending = this.wantsBundle() || this.current.walks.some(isUnsent);
+    const at = nextTry({ pending, signedOut, savedAt, stirredAt, triedAt, failures, notBefore, spread });
+    if (at !== null) this.timer = setTimeout(() => void this.attempt(), Math.max(0, at - nowMs()));
+  }
+
+  private wantsBundle(): boolean {
+    return this.bundleAt === null || this.ground.nowMs() - this.bundleAt > BUNDLE_AGE_MS;
+  }
+
+  private async attempt(): Promise<void> {
+    this.trying = true;
+    const ran = await this.ground.alone(async () => {
+      const outcome = await this.exchange();
+      const signedOut = outcome.kind === "refused" && outcome.problem.status === 401;
+      this.failures = outcome.kind === "answered" ? 0 : this.failures + 1;
+      const wait = outcome.kind === "refused" ? outcome.retryAfterS : null;
+      this.notBefore = wait === null ? null : this.ground.nowMs() + wait * 1000;
+      this.show({ signedOut, reached: outcome.kind !== "unreached" });
+    });
+    if (!ran) this.failures += 1;
+    this.triedAt = this.ground.nowMs();
+    this.trying = false;
+    await this.read();
+    this.ground.tell?.();
+    this.plan();
+  }
+
+  /** The bundle if it is due, the device if it is new, then envelopes until nothing more can go. */
+  private async exchange(): Promise<Answer<unknown>> {
+    const { store, fetch, label } = this.ground;
+    if (this.wantsBundle()) {
+      const answer = await fetchBundle(store, fetch);
+      if (answer.kind !== "answered") return answer;
+      this.bundleAt = this.ground.nowMs();
+    }
+    const bundle = await keptBundle(store);
+    if (!bundle) return { kind: "unreached" };
+    const member = bundle.member.id;
+    const device = await deviceFor(store, member);
+    if (!device.registered) {
+      const answer = await call(z.unknown(), "POST", "/api/devices", registrationOf(device, label), fetch);
+      if (answer.kind !== "answered") return answer;
+      await setRegistered(store, member, true);
+    }
+    return this.drain(device.id, member, bundle);
+  }
+
+  private async drain(device: string, member: string, bundle: Bundle): Promise<Answer<unknown>> {
+    for (;;) {
+      const before = await this.progress();
+      const answer = await drainOnce(this.shelf, device, bundle.keys, this.ground.fetch);
+      if (!answer) return { kind: "answered", value: null };
+      if (answer.kind !== "answered") return answer;
+      if (isForeign(answer.value)) await setRegistered(this.ground.store, member, false);
+      // The server answered and yet nothing moved: wait as after a failure instead of asking in a circle.
+      if ((await this.progress()) === before) return { kind: "unreached" };
+    }
+  }
+
+  private async progress(): Promise<string> {
+    const walks = await this.shelf.walks();
+    return walks.map((w) => `${w.acknowledged} ${w.receipt !== null} ${w.refused}`).join();
+  }
+}
+
+function isForeign(answer: EnvelopeAnswer): boolean {
+  return answer.refused.some((row) => row.code === "foreign-device");
+}
