@@ -12,11 +12,15 @@ import { WalkShelf, type KeptWalk } from "./walk-shelf";
 export interface SyncView {
   /** False until the store was read for the first time. */
   ready: boolean;
+  /** The browser would not let the store be read: nothing can be kept here. */
+  storeRefused: boolean;
   bundle: Bundle | null;
   /** The bundle's member's walks on this phone, newest first. */
   walks: KeptWalk[];
   /** The server said that nobody is signed in; recording goes on. */
   signedOut: boolean;
+  /** The server said that the role of whoever is signed in makes no walks. */
+  roleRefused: boolean;
   /** Whether the last attempt reached the server; null before the first. */
   reached: boolean | null;
 }
@@ -41,7 +45,15 @@ const BUNDLE_AGE_MS = 5 * 60_000;
 export class Sync {
   readonly shelf: WalkShelf;
   private listeners = new Set<() => void>();
-  private current: SyncView = { ready: false, bundle: null, walks: [], signedOut: false, reached: null };
+  private current: SyncView = {
+    ready: false,
+    storeRefused: false,
+    bundle: null,
+    walks: [],
+    signedOut: false,
+    roleRefused: false,
+    reached: null,
+  };
   private timer: ReturnType<typeof setTimeout> | null = null;
   private trying = false;
   private savedAt: number | null = null;
@@ -77,6 +89,7 @@ export class Sync {
   async saved(): Promise<void> {
     this.savedAt = this.ground.nowMs();
     await this.read();
+    this.ground.tell?.();
     this.plan();
   }
 
@@ -88,9 +101,13 @@ export class Sync {
 
   /** Reads the store again without trying anything. */
   async read(): Promise<void> {
-    const bundle = await keptBundle(this.ground.store);
-    const walks = (await this.shelf.walks()).filter((walk) => walk.member === bundle?.member.id);
-    this.show({ ready: true, bundle, walks });
+    try {
+      const bundle = await keptBundle(this.ground.store);
+      const walks = (await this.shelf.walks()).filter((walk) => walk.member === bundle?.member.id);
+      this.show({ ready: true, storeRefused: false, bundle, walks });
+    } catch {
+      this.show({ storeRefused: true });
+    }
   }
 
   private show(change: Partial<SyncView>): void {
@@ -103,7 +120,8 @@ export class Sync {
     if (this.trying) return;
     const { nowMs, spread } = this.ground;
     const { savedAt, stirredAt, triedAt, failures, notBefore } = this;
-    const { signedOut } = this.current;
+    // Nobody signed in, or someone who makes no walks: either way only a sign-in helps.
+    const signedOut = this.current.signedOut || this.current.roleRefused;
     const pending = this.wantsBundle() || this.current.walks.some(isUnsent);
     const at = nextTry({ pending, signedOut, savedAt, stirredAt, triedAt, failures, notBefore, spread });
     if (at !== null) this.timer = setTimeout(() => void this.attempt(), Math.max(0, at - nowMs()));
@@ -116,12 +134,17 @@ export class Sync {
   private async attempt(): Promise<void> {
     this.trying = true;
     const ran = await this.ground.alone(async () => {
-      const outcome = await this.exchange();
-      const signedOut = outcome.kind === "refused" && outcome.problem.status === 401;
+      // A store that refuses a write ends this attempt, not all those after it.
+      const outcome = await this.exchange().catch((): Answer<unknown> => ({ kind: "unreached" }));
+      const code = outcome.kind === "refused" ? outcome.problem.code : null;
       this.failures = outcome.kind === "answered" ? 0 : this.failures + 1;
       const wait = outcome.kind === "refused" ? outcome.retryAfterS : null;
       this.notBefore = wait === null ? null : this.ground.nowMs() + wait * 1000;
-      this.show({ signedOut, reached: outcome.kind !== "unreached" });
+      this.show({
+        signedOut: code === "signed-out",
+        roleRefused: code === "role-refused",
+        reached: outcome.kind !== "unreached",
+      });
     });
     if (!ran) this.failures += 1;
     this.triedAt = this.ground.nowMs();

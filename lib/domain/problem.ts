@@ -31,7 +31,7 @@ export class Problem {
     readonly extra: { detail?: string; errors?: FieldError[]; retryAfterS?: number } = {},
   ) {}
 
-  get status(): number {
+  get status(): (typeof problems)[ProblemCode]["status"] {
     return problems[this.code].status;
   }
 }

@@ -24,8 +24,8 @@ export type ServerKey = PublicKey & { kid: string };
 
 /** What the server signs: the digest of the receipt without its signature. */
 export function receiptMessage(receipt: Omit<Receipt, "signature">): string {
-  const { signature: _, ...signed } = receipt as Receipt;
-  return `hookfast-receipt-v1:${digestOf(signed)}`;
+  // JSON has no place for what is undefined: the signature leaves the digested text whole.
+  return `hookfast-receipt-v1:${digestOf({ ...receipt, signature: undefined })}`;
 }
 
 /**

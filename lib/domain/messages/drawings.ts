@@ -1,17 +1,5 @@
-export const partKeys = [
-  "receiver",
-  "arm",
-  "cables",
-  "cord",
-  "cabin",
-  "brake",
-  "wheels",
-  "lamps",
-  "last-look",
-  "chocks",
-  "bar-stowed",
-] as const;
-export type PartKey = (typeof partKeys)[number];
+import type { PartKey, StationKey } from "../revision";
+
 export type DrawingSide = "left" | "right";
 export type CalloutLetter = "A" | "B" | "C" | "D";
 /** An arm end has words of its own for each side. */
@@ -76,7 +64,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       "of the breakaway switch on the car to a point of its own on the coach’s frame, not to the bar or a cable.",
     callouts: {
       A: ["plugged in,", "both ends"],
-      B: ["clear of", "the ground"],
+      B: ["clear of", "ground"],
       C: ["lanyard on its own", "point of the frame"],
       D: ["pin fully", "in switch"],
     },
@@ -98,8 +86,8 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       "The brake unit stands on the floor against the seat with its arm clamped to the brake pedal. The pedal is fully " +
       "up and the unit’s ready light is lit.",
     callouts: {
-      A: ["pedal", "fully up"],
-      B: ["clamp closed"],
+      A: ["pedal up,", "on its stop"],
+      B: ["clamp", "closed"],
       C: ["ready light lit"],
       D: ["against the seat"],
     },
@@ -135,7 +123,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       "A chock is pushed tight against the tread in front of the car’s wheel and another behind it. The parking brake " +
       "is on.",
     callouts: {
-      A: ["tight to the tread,", "both sides"],
+      A: ["tight to the tread, both sides"],
       B: ["parking", "brake on"],
     },
   },
@@ -147,7 +135,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
     callouts: {
       A: ["arms folded,", "latch down"],
       B: ["pins back,", "clips on"],
-      C: ["hitch pin in"],
+      C: ["hitch pin,", "its clip"],
     },
   },
 };
@@ -160,17 +148,6 @@ export const lampWords = {
   dark: "dark",
   description: (left: string, right: string) => `Left lamp ${left}, right lamp ${right}.`,
 } as const;
-
-export const stationKeys = [
-  "coach-tail",
-  "car-nose",
-  "cables-and-cord",
-  "car-cabin",
-  "pull",
-  "car-tail",
-  "last-look",
-] as const;
-export type StationKey = (typeof stationKeys)[number];
 
 /** Where you stand on the rig plan, for someone who cannot see it. */
 export const rigPlanWords: Record<StationKey, string> = {

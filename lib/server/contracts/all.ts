@@ -1,0 +1,22 @@
+import type { Contract } from "../contract";
+import { registerDevice } from "./devices";
+import { readBundle, sendEntries } from "./field";
+import { readHealth, readKeys, readOpenApi } from "./service";
+import { signIn, signOut, whoAmI } from "./session";
+import { listWalks, readRecord, readWalk } from "./walks";
+
+/** Every route there is, in the order in which the OpenAPI document lists them. */
+export const contracts: readonly Contract[] = [
+  signIn,
+  whoAmI,
+  signOut,
+  registerDevice,
+  readBundle,
+  sendEntries,
+  listWalks,
+  readWalk,
+  readRecord,
+  readKeys,
+  readHealth,
+  readOpenApi,
+];

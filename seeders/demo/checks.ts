@@ -1,0 +1,151 @@
+import type { Check } from "@/lib/domain/revision";
+
+const HELD = "Secure the car first: parking brake on, wheels chocked.";
+
+type Words = Pick<Check, "key" | "part" | "ask" | "how" | "why" | "mend"> & Partial<Check>;
+
+/** A look at a part whose fault means do not tow. */
+export function hold(words: Words): Check {
+  return { kind: "look", effect: "hold", mayBeAbsent: false, ...words };
+}
+
+/** A look at a part whose fault should be seen to soon. */
+export function fix(words: Words): Check {
+  return { kind: "look", effect: "fix", mayBeAbsent: false, ...words };
+}
+
+export const receiverPins = hold({
+  key: "receiver-pins",
+  part: "receiver",
+  ask: "Receiver pins in, clips closed",
+  how: "Two pins: one through the receiver, one through the drop receiver. Each goes all the way through, with its clip closed on the far side.",
+  why: "These pins hold everything behind the coach. A pin that walks out lets the whole bar slide out.",
+  mend: "Push the pin through and close its clip. Replace a pin that is bent or worn.",
+});
+
+/** One arm of the tow bar at the car's base plate. */
+export function arm(side: "left" | "right"): Check {
+  const name = side === "left" ? "Left" : "Right";
+  return hold({
+    key: `arm-${side}`,
+    part: "arm",
+    side,
+    ask: `${name} arm: pin in, clip over it`,
+    how: `Look at the ${side} arm where it meets the car. The pin is all the way down and the ring of the clip is snapped over its end.`,
+    why: "A clip that is not over the pin shakes out on the road, and one arm alone does not hold a car in line.",
+    mend: "Seat the pin to its full depth, then snap the ring over. Use the clip that belongs to this bar.",
+    caution: `The arm can drop on a hand when a pin comes out. ${HELD}`,
+  });
+}
+
+export const cables = hold({
+  key: "cables",
+  part: "cables",
+  ask: "Cables crossed, links screwed shut",
+  how: "Both cables run from frame to frame and cross under the bar. Every link is screwed shut, and nothing hangs near the ground.",
+  why: "If the bar lets go, the cables are what keeps the car behind the coach. Crossed, they also hold the bar up.",
+  mend: "Cross them under the bar and screw each link closed. A cable with broken strands is replaced, not taped.",
+});
+
+export const cordAndLanyard = hold({
+  key: "cord-and-lanyard",
+  part: "cord",
+  ask: "Cord latched, lanyard on the frame",
+  how: "The cord is latched at both ends. The lanyard is hooked to the coach's frame, not to the bar or a cable, and has slack for a full turn.",
+  why: "A lanyard on the bar leaves with the bar and never pulls the breakaway switch.",
+  mend: "Latch the plugs. Move the lanyard to its own point on the frame.",
+});
+
+export const airLine = hold({
+  key: "air-line",
+  part: "cord",
+  ask: "Air line coupled, no hiss",
+  how: "The coupling is home and does not come off with a tug. Listen at both ends with the coach's air up.",
+  why: "Without air the car's brake does not work and the coach loses pressure.",
+  mend: "Couple it again. If it still hisses, look at the seal and the line for a chafed place.",
+});
+
+export const rolling = hold({
+  key: "wheels-roll",
+  part: "wheels",
+  ask: "All four car wheels roll",
+  how: "Pull forward a few feet, straight, and stop. Someone beside the rig sees all four car wheels turn and both arms lock out.",
+  why: "A wheel that slides means a brake is on or a column is locked. Tires wear through within a few miles.",
+  mend: "Stop. Go back to the cabin and compare with the manual's page again.",
+  caution: "Nobody between the vehicles while the coach moves.",
+});
+
+export const lamps = hold({
+  key: "lamps",
+  kind: "lamps",
+  part: "lamps",
+  ask: "Each lamp answers its signal",
+  how: "Stand behind the car. Go through the signals one at a time and look at both sides each time.",
+  why: "The arrow on the dash does not show what the car's lamps do.",
+  mend: "Seat the plugs first, then look at the ground. A dark lamp on one side only is often its bulb.",
+});
+
+export const joints = hold({
+  key: "joints",
+  part: "last-look",
+  ask: "Hands on every joint: none loose",
+  how: "Walk around once more without talking. Push and pull each arm, each pin and each plug by hand.",
+  why: "The check that is missed is the one that was interrupted.",
+  mend: "Whatever moves that should not: go back to that station and look at it again.",
+});
+
+export const tires = fix({
+  key: "tires",
+  part: "last-look",
+  ask: "Car tires: none low, none cracked",
+  how: "Look at the tread and both sidewalls of each tire. Cracks are easiest to see near the rim.",
+  why: "Nobody in the coach feels a flat tire on the car.",
+  mend: "Fill a low tire to the pressure on the car's door label. Cracked sidewalls: have the tire looked at.",
+});
+
+export const cordJacket = fix({
+  key: "cord-jacket",
+  part: "cord",
+  ask: "Cord jacket whole, not scuffed",
+  how: "Follow the cord from plug to plug. Look at the underside where it could touch the road.",
+  why: "A scuffed jacket lets water in, and lamps begin to fail in the rain.",
+  mend: "Tie the cord up so that it clears the ground. Replace it once copper or inner wires show.",
+});
+
+export const wheelHeat = hold({
+  key: "wheel-heat",
+  part: "wheels",
+  ask: "No wheel hotter than its pair",
+  how: "Hold the back of a hand near each car wheel, without touching. Compare left with right.",
+  why: "One hot wheel means a brake that drags, or a bearing.",
+  mend: "Let it cool. Look whether the brake unit holds the pedal down, then roll a few feet and feel again.",
+  caution: "A hot wheel or hub can burn a hand.",
+});
+
+export const carHeld = hold({
+  key: "car-held",
+  part: "chocks",
+  ask: "Car held: parking brake, chocks",
+  how: "Before any pin comes out: the car's parking brake is on and a chock stands on each side of one wheel.",
+  why: "The bar may be all that holds the car. Pull a pin and the car can roll onto whoever stands there.",
+  mend: "Set the parking brake and chock a wheel, then come back to the bar.",
+  caution: "Nobody between the vehicles while either can move.",
+});
+
+export const barStowed = hold({
+  key: "bar-stowed",
+  part: "bar-stowed",
+  ask: "Bar folded, pins back in holes",
+  how: "The arms are folded and latched for the road. Every pin and clip is back in its own hole.",
+  why: "A bar that swings out hits what is next to the coach, and a pin left on the ground is missing tomorrow.",
+  mend: "Fold it until the latch closes. Put each pin where it belongs before walking away.",
+});
+
+export const linesOff = fix({
+  key: "lines-off",
+  part: "cord",
+  ask: "Cord, cables, lanyard off, capped",
+  how: "Everything that ran between the vehicles is off and put away, with the caps on the sockets.",
+  why: "An open socket fills with water, and a cable that hangs gets caught.",
+  mend: "Take them off and close the caps.",
+});
