@@ -39,7 +39,7 @@ export interface Remark {
 
 /** A walk's entries, set out the way someone reads them back. */
 export interface ReadWalk {
-  /** In walking order, without the stations at which nothing was asked or marked. */
+  /** In the order in which this walk first comes to them, without the stations at which nothing was asked or marked. */
   stations: ReadStation[];
   /** Checks of this walk, and how many of them were looked at: marked, and not as unseen. */
   asked: number;
@@ -56,14 +56,15 @@ export function readWalk(document: RevisionDocument, entries: readonly Entry[]):
   const asked = open ? walkChecks(document, open.purpose, open.depth).map(({ check }) => check.key) : [];
   const marks = marksByCheck(entries);
   const stations = document.list.stations.map(({ key, title, checks }) => {
-    const read = inWalkingOrder(checks, asked)
+    const read = inWalkingOrder(checks, asked, ({ key }) => [key])
       .map((check) => readCheck(check, asked.includes(check.key), marks.get(check.key)))
       .filter((check) => check.asked || check.mark || check.earlier.length > 0);
     return { key, title, checks: read, tookMs: sum(read) };
   });
+  const inOrder = inWalkingOrder(stations, asked, ({ checks }) => checks.map(({ check }) => check.key));
   const counted = stations.flatMap((station) => station.checks).filter((check) => check.asked);
   return {
-    stations: stations.filter((station) => station.checks.length > 0),
+    stations: inOrder.filter((station) => station.checks.length > 0),
     asked: counted.length,
     lookedAt: counted.filter(({ mark }) => mark && mark.outcome !== "unseen").length,
     remarks: entries.flatMap(remarkOf),
@@ -109,10 +110,16 @@ function readCheck(check: Check, asked: boolean, marks?: Marks): ReadCheck {
   return { check, asked, mark, earlier, segment, tookMs: sum([...earlier, ...(mark ? [mark] : [])]) };
 }
 
-/** A station's checks as this walk takes them, then those that it does not ask for. */
-function inWalkingOrder(checks: readonly Check[], asked: readonly string[]): Check[] {
-  const place = ({ key }: Check) => (asked.includes(key) ? asked.indexOf(key) : asked.length);
-  return [...checks].sort((one, other) => place(one) - place(other));
+/** Things by the first of their checks that this walk takes, then those without one as the list has them. */
+function inWalkingOrder<T>(
+  things: readonly T[],
+  asked: readonly string[],
+  keysOf: (thing: T) => string[],
+): T[] {
+  const places = new Map(asked.map((key, place) => [key, place]));
+  const first = (thing: T) =>
+    Math.min(...keysOf(thing).map((key) => places.get(key) ?? asked.length), asked.length);
+  return [...things].sort((one, other) => first(one) - first(other));
 }
 
 function remarkOf(entry: Entry): Remark[] {
@@ -122,4 +129,26 @@ function remarkOf(entry: Entry): Remark[] {
 
 function sum(parts: readonly { tookMs: number }[]): number {
   return parts.reduce((total, { tookMs }) => total + tookMs, 0);
+}
+
+/** An entry's own time beside the time at which the server had it. */
+export type Arrival = { receivedAt: string; entry: Pick<Entry, "at"> };
+
+/**
+ * What the two clocks say of each other. `ahead`: an entry says it was made after it was received, so the phone's
+ * clock was ahead by at least this much. `apart`: even the quickest entry came this much later than it says; no
+ * signal, or a clock that was behind, and the record alone cannot tell which.
+ */
+export type ClockRemark = { kind: "ahead" | "apart"; byMs: number };
+
+const NOTABLE_AHEAD_MS = 1_000;
+const NOTABLE_APART_MS = 5 * 60_000;
+
+/** The one thing worth saying about a walk's clock, if there is one. */
+export function clockRemark(arrivals: readonly Arrival[]): ClockRemark | null {
+  if (arrivals.length === 0) return null;
+  const lags = arrivals.map(({ receivedAt, entry }) => Date.parse(receivedAt) - Date.parse(entry.at));
+  const least = Math.min(...lags);
+  if (least <= -NOTABLE_AHEAD_MS) return { kind: "ahead", byMs: -least };
+  return least >= NOTABLE_APART_MS ? { kind: "apart", byMs: least } : null;
 }

@@ -2,7 +2,7 @@ import { feet, inches, milesPerHour, pounds } from "./quantities";
 
 /** How the fleet's long coach and its pickup are built. */
 export const longCoachSheet = {
-  name: "Lot 7: long coach, pickup",
+  name: "Lot 7",
   coach: {
     description: "38 ft diesel coach, rear engine, rental trim",
     chassis: "diesel motorhome chassis, 32,000 lb",
@@ -102,7 +102,7 @@ export const longCoachSheet = {
 
 /** How the fleet's short coach and its hatchback are built. */
 export const shortCoachSheet = {
-  name: "Lot 12: short coach, hatchback",
+  name: "Lot 12",
   coach: {
     description: "26 ft gas coach on a van chassis, rental trim",
     chassis: "cutaway van chassis, 14,500 lb",

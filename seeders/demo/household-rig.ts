@@ -4,7 +4,7 @@ import { revisionDocument } from "./document";
 import { feet, inches, milesPerHour, pounds } from "./quantities";
 
 const sheet = {
-  name: "Gas coach, five-door wagon, portable brake",
+  name: "Maple rig",
   coach: {
     description: "32 ft gas coach, front engine, one slide",
     chassis: "gasoline motorhome chassis, 22,000 lb",

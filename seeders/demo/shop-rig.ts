@@ -4,7 +4,7 @@ import { revisionDocument } from "./document";
 import { feet, inches, milesPerHour, pounds } from "./quantities";
 
 const sheet = {
-  name: "Diesel coach, two-door off-roader, air-assisted brake",
+  name: "Bay 3 build",
   coach: {
     description: "40 ft diesel coach, rear engine, three slides",
     chassis: "diesel motorhome chassis, 36,400 lb",

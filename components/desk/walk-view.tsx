@@ -1,0 +1,37 @@
+import { clockText, durationText } from "@/lib/client/desk-time";
+import type { WalkReading } from "@/lib/domain/history";
+import { deskWords, walkWords } from "@/lib/domain/messages/desk";
+import { clockRemark, readWalk } from "@/lib/domain/walk-reading";
+import { DeskHeading } from "./desk-heading";
+import { SealBlock } from "./seal-block";
+import { StationList } from "./station-list";
+import { TimeBars } from "./time-bars";
+import { TitleBlock } from "./title-block";
+import { ToHistory } from "./to-history";
+import { WalkRemarks } from "./walk-remarks";
+import { WalkVerdict } from "./walk-verdict";
+
+/** One walk read back: what it came to, what was seen at each station, and what holds the record together. */
+export function WalkView({ reading }: { reading: WalkReading }) {
+  const entries = reading.entries.map(({ entry }) => entry);
+  const read = readWalk(reading.document, entries);
+  const title = walkWords.title(reading.walk.purpose, reading.names.rig);
+  return (
+    <>
+      <title>{`${title} · ${deskWords.brand}`}</title>
+      <DeskHeading over={<ToHistory />} title={title} />
+      <TitleBlock reading={reading} />
+      <WalkVerdict reading={reading} read={read} took={durationText(reading.elapsedMs)} />
+      <div className="mt-8 grid gap-x-10 gap-y-10 grid-cols-1 @4xl:grid-cols-[minmax(0,1fr)_23rem]">
+        <div className="min-w-0">
+          <StationList stations={read.stations} />
+          <WalkRemarks remarks={read.remarks} />
+        </div>
+        <div className="flex min-w-0 flex-col gap-8">
+          <TimeBars stations={read.stations} total={clockText(reading.elapsedMs)} />
+          <SealBlock reading={reading} clock={clockRemark(reading.entries)} />
+        </div>
+      </div>
+    </>
+  );
+}
