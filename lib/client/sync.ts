@@ -138,6 +138,8 @@ export class Sync {
       const outcome = await this.exchange().catch((): Answer<unknown> => ({ kind: "unreached" }));
       const code = outcome.kind === "refused" ? outcome.problem.code : null;
       this.failures = outcome.kind === "answered" ? 0 : this.failures + 1;
+      // A refusal may mean that someone else has signed in since: ask who, before anything else.
+      if (outcome.kind === "refused") this.bundleAt = null;
       const wait = outcome.kind === "refused" ? outcome.retryAfterS : null;
       this.notBefore = wait === null ? null : this.ground.nowMs() + wait * 1000;
       this.show({
@@ -180,7 +182,10 @@ export class Sync {
       const answer = await drainOnce(this.shelf, device, bundle.keys, this.ground.fetch);
       if (!answer) return { kind: "answered", value: null };
       if (answer.kind !== "answered") return answer;
-      if (isForeign(answer.value)) await setRegistered(this.ground.store, member, false);
+      if (isForeign(answer.value)) {
+        this.bundleAt = null;
+        await setRegistered(this.ground.store, member, false);
+      }
       // The server answered and yet nothing moved: wait as after a failure instead of asking in a circle.
       if ((await this.progress()) === before) return { kind: "unreached" };
     }

@@ -1,0 +1,24 @@
+"use client";
+
+import { useEffect } from "react";
+import { addressOf, useSearch } from "./address";
+import { letGo, theField, useSyncView } from "./browser-field";
+import { registerWorker } from "./register-worker";
+import { followTaps } from "./settling";
+import { RigsScreen } from "./rigs-screen";
+import { WalkScreen } from "./walk-screen";
+
+/** The field wing: everything that works with no network, on one static page. */
+export function FieldWing() {
+  const sync = useSyncView();
+  const { walk, at } = addressOf(useSearch());
+
+  useEffect(() => {
+    void registerWorker();
+    return theField().start();
+  }, []);
+  useEffect(() => followTaps(), []);
+  useEffect(() => letGo(walk), [walk]);
+
+  return walk ? <WalkScreen key={walk} sync={sync} walk={walk} at={at} /> : <RigsScreen sync={sync} />;
+}

@@ -1,0 +1,74 @@
+import { useId, useRef, useState } from "react";
+import type { KeptWalk } from "@/lib/client/walk-shelf";
+import type { Purpose } from "@/lib/domain/entry";
+import type { BundleRig } from "@/lib/domain/field";
+import type { Member } from "@/lib/domain/member";
+import { fieldWords } from "@/lib/domain/messages/field";
+import { goTo } from "./address";
+import { startWalk } from "./browser-field";
+import { GoOn } from "./go-on";
+import { LastVerdict } from "./last-verdict";
+import { OpenFindings } from "./open-findings";
+import { RigPicture } from "./rig-picture";
+import { RigStarts } from "./rig-starts";
+import { lastWalkOf, openWalksOf, purposesFor } from "./rig-state";
+import { Trouble } from "./trouble";
+
+const words = fieldWords.rigs;
+
+type RigCardProps = {
+  rig: BundleRig;
+  member: Member;
+  walks: readonly KeptWalk[];
+  /** The only rig: there is room to show it on a phone too. */
+  alone: boolean;
+};
+
+/** A rig: how it stood last, and the walks that can be made of it. */
+export function RigCard({ rig, member, walks, alone }: RigCardProps) {
+  const title = useId();
+  const starting = useRef(false);
+  const [failed, setFailed] = useState(false);
+  const open = openWalksOf(rig.id, walks);
+
+  const start = async (purpose: Purpose) => {
+    if (starting.current) return;
+    starting.current = true;
+    try {
+      goTo({ walk: await startWalk(rig, member.id, purpose) });
+    } catch {
+      setFailed(true);
+    }
+    starting.current = false;
+  };
+
+  return (
+    <section aria-labelledby={title} className="@container border-t-[3px] border-ink">
+      <div className="grid gap-x-8 gap-y-3.5 px-4 py-4 @2xl:grid-cols-2 @2xl:py-6">
+        <div className="flex min-w-0 flex-col gap-2.5">
+          <h2 id={title} className="text-[1.75rem] leading-[1.1] font-extrabold tracking-[-0.01em]">
+            {rig.name}
+          </h2>
+          <LastVerdict last={lastWalkOf(rig, walks)} />
+          <OpenFindings rig={rig} />
+          <div className={`mt-auto max-w-md pt-4 @2xl:block ${alone ? "" : "hidden"}`}>
+            <RigPicture />
+          </div>
+        </div>
+        <div className="-mx-1 flex flex-col gap-2.5">
+          {failed && <Trouble>{words.notStarted}</Trouble>}
+          {open.map((walk) => (
+            <GoOn key={walk.id} walk={walk} />
+          ))}
+          {open.length > 0 && <p className="px-1 pt-1 text-base text-soft">{words.another}</p>}
+          <RigStarts
+            rig={rig}
+            purposes={purposesFor(member.organisation.kind)}
+            main={open.length === 0}
+            onStart={start}
+          />
+        </div>
+      </div>
+    </section>
+  );
+}

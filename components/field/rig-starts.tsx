@@ -1,0 +1,46 @@
+import { Button } from "@/components/ui/button";
+import type { Purpose } from "@/lib/domain/entry";
+import type { BundleRig } from "@/lib/domain/field";
+import { fieldWords } from "@/lib/domain/messages/field";
+
+const words = fieldWords.rigs;
+
+type RigStartsProps = {
+  rig: BundleRig;
+  purposes: readonly Purpose[];
+  /** Whether the usual walk is the main thing to do; not while another is open. */
+  main: boolean;
+  onStart: (purpose: Purpose) => void;
+};
+
+/** The walks that can be started on a rig, each in one tap. */
+export function RigStarts({ rig, purposes, main, onStart }: RigStartsProps) {
+  const usual = main ? purposes[0] : undefined;
+  const others = purposes.filter((purpose) => purpose !== usual);
+  const start = (purpose: Purpose) => (
+    <>
+      {words.start(purpose)} <span className="sr-only">{words.ofRig(rig.name)}</span>
+    </>
+  );
+  return (
+    <div className="flex flex-col gap-2.5">
+      {usual && (
+        <Button
+          variant="good"
+          className="text-[1.875rem]"
+          hint={words.checks(rig.revision.document.walks[usual].full.length)}
+          onClick={() => onStart(usual)}
+        >
+          {start(usual)}
+        </Button>
+      )}
+      <div className={`grid gap-2.5 ${others.length % 3 === 0 ? "grid-cols-3" : "grid-cols-2"}`}>
+        {others.map((purpose) => (
+          <Button key={purpose} variant="quiet" onClick={() => onStart(purpose)}>
+            {start(purpose)}
+          </Button>
+        ))}
+      </div>
+    </div>
+  );
+}

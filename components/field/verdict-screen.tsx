@@ -1,0 +1,104 @@
+import { useRef, type ReactNode } from "react";
+import { buttonClass } from "@/components/ui/button";
+import type { WalkView } from "@/lib/client/recorder";
+import type { SyncView } from "@/lib/client/sync";
+import type { KeptWalk } from "@/lib/client/walk-shelf";
+import { fieldWords } from "@/lib/domain/messages/field";
+import { timerWords } from "./clock-words";
+import { BottomBar } from "./bottom-bar";
+import { Custody } from "./custody";
+import { FindingRow } from "./finding-row";
+import { OpenFindings } from "./open-findings";
+import { useArrival, useScreenTitle } from "./screen-title";
+import { StepList } from "./step-list";
+import { VerdictBand } from "./verdict-band";
+import { WalkHead } from "./walk-head";
+import { stepsOf, tallyOf } from "./walk-plan";
+import { WalkStrip } from "./walk-strip";
+import { WingLink } from "./wing-link";
+
+const words = fieldWords.result;
+
+type VerdictScreenProps = { view: WalkView; walk: KeptWalk; sync: SyncView };
+
+/** A closed walk: its verdict, what to do about it, and where the record is. */
+export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
+  const { marks, verdict, elapsedMs } = view.replay;
+  const tally = tallyOf(view.document, stepsOf(view.document, walk), marks);
+  const { holds, fixes, unmarked, unseen, lookedAt, total } = tally;
+  const rig = sync.bundle?.rigs.find(({ id }) => id === walk.rig);
+  const heading = useRef<HTMLHeadingElement>(null);
+  useScreenTitle(fieldWords.verdict[verdict]);
+  useArrival(heading, "verdict");
+  return (
+    <main className="mx-auto flex min-h-dvh w-full max-w-[76rem] flex-col">
+      <WalkHead walk={walk} figure={timerWords(elapsedMs)} />
+      <div className="px-4 pb-2.5">
+        <WalkStrip view={view} />
+      </div>
+      <VerdictBand verdict={verdict} tally={tally} heading={heading} />
+      <div className="flex flex-1 flex-col md:grid md:grid-cols-[minmax(0,7fr)_minmax(21rem,5fr)] md:grid-rows-[auto_1fr] md:gap-x-8">
+        <div className="md:row-span-2">
+          {verdict === "hold" && (
+            <p className="border-b-hair border-rule px-4 py-3.5 text-xl leading-[1.3] font-semibold">
+              {words.secure}
+            </p>
+          )}
+          {holds.length > 0 && (
+            <Findings title={words.holds} quiet>
+              {holds.map(({ check, absent }) => (
+                <FindingRow key={check.key} check={check} absent={absent} />
+              ))}
+            </Findings>
+          )}
+          {fixes.length > 0 && (
+            <Findings title={words.fixes}>
+              {fixes.map((check) => (
+                <FindingRow key={check.key} check={check} />
+              ))}
+            </Findings>
+          )}
+          {unmarked.length + unseen.length > 0 && (
+            <section>
+              <h3 className="px-4 pt-4 pb-1.5 font-extrabold">{words.notSeen}</h3>
+              <StepList
+                steps={[...unseen, ...unmarked]}
+                marks={marks}
+                note={(_, outcome) => (outcome ? fieldWords.outcome[outcome] : words.leftOut)}
+              />
+            </section>
+          )}
+        </div>
+        <div>
+          {rig && rig.openFindings.length > 0 && (
+            <div className="px-4 py-3">
+              <OpenFindings rig={rig} />
+            </div>
+          )}
+          <p className="px-4 py-4">{words.sentence(verdict, holds.length, lookedAt, total, elapsedMs)}</p>
+          <p className="px-4 pb-4 text-[0.9375rem] text-soft">{words.deference}</p>
+        </div>
+        <BottomBar
+          height="low"
+          className="flex flex-wrap items-center gap-x-4 gap-y-3 px-4 md:mt-0 md:self-start"
+        >
+          <div className="min-w-0 flex-[1_1_13rem]">
+            <Custody walk={walk} signedOut={sync.signedOut} />
+          </div>
+          <WingLink className={`${buttonClass("plain")} min-w-29`}>{fieldWords.walk.back}</WingLink>
+        </BottomBar>
+      </div>
+    </main>
+  );
+}
+
+type FindingsProps = { title: string; quiet?: boolean; children: ReactNode };
+
+function Findings({ title, quiet = false, children }: FindingsProps) {
+  return (
+    <section>
+      <h3 className={quiet ? "sr-only" : "px-4 pt-4 pb-1 font-extrabold"}>{title}</h3>
+      <ul>{children}</ul>
+    </section>
+  );
+}

@@ -1,0 +1,63 @@
+import { useEffect, useState, useSyncExternalStore } from "react";
+import type { HeldWalk } from "@/lib/client/field";
+import type { Recorder } from "@/lib/client/recorder";
+import type { SyncView } from "@/lib/client/sync";
+import type { KeptWalk } from "@/lib/client/walk-shelf";
+import { CLOSING } from "./address";
+import { takeUp } from "./browser-field";
+import { CheckScreen } from "./check-screen";
+import { ClosingScreen } from "./closing-screen";
+import { ElsewhereScreen } from "./elsewhere-screen";
+import { MissingWalk, ReadingWalk, StoreRefused } from "./walk-notes";
+import { useStoredWalk } from "./stored-walk";
+import { VerdictScreen } from "./verdict-screen";
+import { nextStep, stepsOf } from "./walk-plan";
+
+type WalkScreenProps = { sync: SyncView; walk: string; at: string | null };
+
+/** One walk: recorded here, read while another tab records it, or closed. */
+export function WalkScreen({ sync, walk: id, at }: WalkScreenProps) {
+  const walk = sync.walks.find((kept) => kept.id === id);
+  const [tries, setTries] = useState(0);
+  const hold = useHold(sync.bundle?.member.id, walk?.seal === null ? id : null, tries);
+  const stored = useStoredWalk(walk);
+
+  if (sync.storeRefused) return <StoreRefused />;
+  if (!sync.ready) return <ReadingWalk />;
+  if (!walk || hold === null) return <MissingWalk />;
+  if (typeof hold === "object") return <LiveWalk recorder={hold.recorder} walk={walk} sync={sync} at={at} />;
+  if (stored && walk.seal) return <VerdictScreen view={stored} walk={walk} sync={sync} />;
+  if (stored && hold === "elsewhere") {
+    return <ElsewhereScreen view={stored} walk={walk} onTakeUp={() => setTries((before) => before + 1)} />;
+  }
+  return <ReadingWalk />;
+}
+
+/** Takes up an open walk once; undefined until that is decided. */
+function useHold(member: string | undefined, walk: string | null, tries: number) {
+  const [hold, setHold] = useState<HeldWalk | "elsewhere" | null>();
+  useEffect(() => {
+    if (!member || !walk) return;
+    let current = true;
+    takeUp(member, walk).then(
+      (outcome) => current && setHold(outcome),
+      () => current && setHold(null),
+    );
+    return () => {
+      current = false;
+    };
+  }, [member, walk, tries]);
+  return hold;
+}
+
+type LiveWalkProps = { recorder: Recorder; walk: KeptWalk; sync: SyncView; at: string | null };
+
+function LiveWalk({ recorder, walk, sync, at }: LiveWalkProps) {
+  const view = useSyncExternalStore(recorder.subscribe, recorder.view);
+  if (view.walk.seal) return <VerdictScreen view={view} walk={walk} sync={sync} />;
+  const steps = stepsOf(view.document, view.walk);
+  const asked = at === CLOSING ? null : steps.find(({ check }) => check.key === at);
+  const step = asked === undefined ? nextStep(steps, view.replay.marks, null) : asked;
+  const props = { recorder, view, walk, steps };
+  return step ? <CheckScreen {...props} step={step} /> : <ClosingScreen {...props} />;
+}
