@@ -1,4 +1,4 @@
-import { clockText } from "@/lib/client/desk-time";
+import { clockText } from "@/lib/client/time-words";
 import { markWords, walkWords } from "@/lib/domain/messages/desk";
 import { segmentOf, type ReadCheck } from "@/lib/domain/walk-reading";
 import { MarkDetail } from "./mark-detail";

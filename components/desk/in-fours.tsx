@@ -1,4 +1,4 @@
-import { inFours } from "@/lib/client/desk-time";
+import { inFours } from "@/lib/client/time-words";
 
 /** A digest in groups of four. The groups stand apart by margin, not by spaces, so that it is copied whole. */
 export function InFours({ text }: { text: string }) {

@@ -1,7 +1,7 @@
 "use client";
 
 import { useState } from "react";
-import { fullMomentText, momentText } from "@/lib/client/desk-time";
+import { fullMomentText, momentText } from "@/lib/client/time-words";
 
 /** A moment in the reader's time zone; the whole of it for whoever asks. Never in a prerendered document. */
 export function Instant({ at }: { at: string }) {

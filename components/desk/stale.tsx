@@ -1,4 +1,4 @@
-import { clockTimeText } from "@/lib/client/desk-time";
+import { clockTimeText } from "@/lib/client/time-words";
 import { deskWords, troubleWords } from "@/lib/domain/messages/desk";
 import { Button } from "../ui/button";
 import { Notice } from "../ui/notice";

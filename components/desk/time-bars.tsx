@@ -1,4 +1,4 @@
-import { clockText } from "@/lib/client/desk-time";
+import { clockText } from "@/lib/client/time-words";
 import { walkWords } from "@/lib/domain/messages/desk";
 import type { ReadStation, Segment } from "@/lib/domain/walk-reading";
 

@@ -1,5 +1,5 @@
 import type { ReactNode } from "react";
-import { clockText } from "@/lib/client/desk-time";
+import { clockText } from "@/lib/client/time-words";
 import { bodyOf } from "@/lib/domain/entry";
 import type { WalkReading } from "@/lib/domain/history";
 import { walkWords } from "@/lib/domain/messages/desk";

@@ -1,4 +1,4 @@
-import { clockText, durationText } from "@/lib/client/desk-time";
+import { clockText, durationText } from "@/lib/client/time-words";
 import type { WalkReading } from "@/lib/domain/history";
 import { deskWords, walkWords } from "@/lib/domain/messages/desk";
 import { clockRemark, readWalk } from "@/lib/domain/walk-reading";

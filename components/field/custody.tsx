@@ -1,6 +1,6 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { whenWords } from "./clock-words";
+import { recentText } from "@/lib/client/time-words";
 import { SIGN_IN } from "./no-rigs";
 import { useNowMs } from "./now";
 
@@ -28,7 +28,7 @@ export function Custody({ walk, signedOut }: CustodyProps) {
 function Onward({ walk, signedOut }: CustodyProps) {
   const nowMs = useNowMs();
   if (walk.receipt) {
-    const when = whenWords(walk.receipt.receivedAt, nowMs);
+    const when = recentText(walk.receipt.receivedAt, nowMs);
     return <p className="leading-tight font-extrabold">{words.received(when)}</p>;
   }
   if (walk.refused) {

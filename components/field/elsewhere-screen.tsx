@@ -3,7 +3,7 @@ import { Notice } from "@/components/ui/notice";
 import type { WalkView } from "@/lib/client/recorder";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { timerWords } from "./clock-words";
+import { clockText } from "@/lib/client/time-words";
 import { FieldFrame } from "./field-frame";
 import { useScreenTitle } from "./screen-title";
 import { StepList } from "./step-list";
@@ -21,7 +21,7 @@ export function ElsewhereScreen({ view, walk, onTakeUp }: ElsewhereScreenProps) 
   useScreenTitle(words.elsewhereTitle);
   return (
     <FieldFrame>
-      <WalkHead walk={walk} figure={timerWords(view.replay.elapsedMs)} />
+      <WalkHead walk={walk} figure={clockText(view.replay.elapsedMs)} />
       <div className="px-4 pb-3">
         <WalkStrip view={view} />
       </div>

@@ -1,6 +1,6 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { whenWords } from "./clock-words";
+import { recentText } from "@/lib/client/time-words";
 import { KeptStrip } from "./last-verdict";
 import { useNowMs } from "./now";
 import { useStoredWalk } from "./stored-walk";
@@ -37,7 +37,7 @@ function KeptRow({ walk }: { walk: KeptWalk }) {
           {walk.verdict && <VerdictMark verdict={walk.verdict} />}
           <Standing walk={walk} />
         </span>
-        <span className="tabular shrink-0 text-base">{whenWords(walk.openedAt, nowMs)}</span>
+        <span className="tabular shrink-0 text-base">{recentText(walk.openedAt, nowMs)}</span>
       </span>
       <span className="mt-0.5 flex flex-wrap justify-between gap-x-3 text-base text-soft">
         <span>{words.line(walk.purpose, walk.rigName)}</span>

@@ -1,6 +1,6 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { whenWords } from "./clock-words";
+import { recentText } from "@/lib/client/time-words";
 import { useNowMs } from "./now";
 import type { LastWalk } from "./rig-state";
 import { useStoredWalk } from "./stored-walk";
@@ -18,7 +18,7 @@ export function LastVerdict({ last }: { last: LastWalk | null }) {
         <span className={`text-xl font-extrabold ${last.verdict === "hold" ? "text-hold" : ""}`}>
           {fieldWords.verdict[last.verdict]}
         </span>
-        <span className="text-soft">{fieldWords.rigs.last(last.purpose, whenWords(last.at, nowMs))}</span>
+        <span className="text-soft">{fieldWords.rigs.last(last.purpose, recentText(last.at, nowMs))}</span>
       </p>
       {last.kept && <KeptStrip walk={last.kept} />}
     </div>

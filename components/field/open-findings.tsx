@@ -1,7 +1,7 @@
 import type { BundleRig } from "@/lib/domain/field";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { checksOf } from "@/lib/domain/revision";
-import { whenWords } from "./clock-words";
+import { recentText } from "@/lib/client/time-words";
 import { useNowMs } from "./now";
 
 /** What is still open on a rig from earlier walks; a hold among it means do not tow, whatever this walk says. */
@@ -15,7 +15,7 @@ export function OpenFindings({ rig }: { rig: BundleRig | undefined }) {
         const words = effect === "hold" ? fieldWords.rigs.openFinding : fieldWords.rigs.openFix;
         return (
           <li key={id} className={`leading-snug font-semibold ${effect === "hold" ? "text-hold" : ""}`}>
-            {words(whenWords(since, nowMs), checks.get(check)?.ask ?? "")}
+            {words(recentText(since, nowMs), checks.get(check)?.ask ?? "")}
           </li>
         );
       })}

@@ -4,7 +4,7 @@ import type { WalkView } from "@/lib/client/recorder";
 import type { SyncView } from "@/lib/client/sync";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { timerWords } from "./clock-words";
+import { clockText } from "@/lib/client/time-words";
 import { BottomBar } from "./bottom-bar";
 import { Custody } from "./custody";
 import { FindingRow } from "./finding-row";
@@ -32,7 +32,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
   useArrival(heading, "verdict");
   return (
     <main className="mx-auto flex min-h-dvh w-full max-w-[76rem] flex-col">
-      <WalkHead walk={walk} figure={timerWords(elapsedMs)} />
+      <WalkHead walk={walk} figure={clockText(elapsedMs)} />
       <div className="px-4 pb-2.5">
         <WalkStrip view={view} />
       </div>

@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 import { fieldWords } from "@/lib/domain/messages/field";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
-import { whenWords } from "./clock-words";
+import { recentText } from "@/lib/client/time-words";
 import { useNowMs } from "./now";
 
 type WalkHeadProps = {
@@ -35,5 +35,5 @@ export function WalkHead({ walk, figure, control }: WalkHeadProps) {
 }
 
 function stateWords({ receipt }: KeptWalk, nowMs: number): string {
-  return receipt ? fieldWords.kept.receivedAt(whenWords(receipt.receivedAt, nowMs)) : fieldWords.kept.saved;
+  return receipt ? fieldWords.kept.receivedAt(recentText(receipt.receivedAt, nowMs)) : fieldWords.kept.saved;
 }

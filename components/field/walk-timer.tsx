@@ -1,6 +1,6 @@
 import { useEffect, useState } from "react";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { timerWords } from "./clock-words";
+import { clockText } from "@/lib/client/time-words";
 
 /** The walk's running time; each tick is set for the moment at which the next second begins. */
 export function WalkTimer({ elapsedMs }: { elapsedMs: () => number }) {
@@ -17,7 +17,7 @@ export function WalkTimer({ elapsedMs }: { elapsedMs: () => number }) {
   }, [elapsedMs]);
   return (
     <span role="timer" aria-label={fieldWords.walk.timer}>
-      {timerWords(shownMs)}
+      {clockText(shownMs)}
     </span>
   );
 }

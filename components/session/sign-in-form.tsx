@@ -3,7 +3,7 @@
 import { zodResolver } from "@hookform/resolvers/zod";
 import { useState } from "react";
 import { useForm } from "react-hook-form";
-import { durationText } from "@/lib/client/desk-time";
+import { durationText } from "@/lib/client/time-words";
 import { destination, leaveFor, signIn } from "@/lib/client/session";
 import { credentialsShape, type Credentials } from "@/lib/domain/member";
 import { refusalSentence, signInWords } from "@/lib/domain/messages/session";

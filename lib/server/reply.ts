@@ -20,11 +20,14 @@ export type Reply<C extends Contract> = {
   [S in keyof C["answers"] & number]: { status: S } & Content<C["answers"][S]> & Extras;
 }[keyof C["answers"] & number];
 
+/** No browser may take an answer for anything but what it is declared as. */
+const asDeclared = { "x-content-type-options": "nosniff" };
+
 /** The response for a reply. */
 export function replyResponse(route: Contract, reply: { status: number } & Extras): Response {
   const { json, text } = reply as { json?: unknown; text?: string };
   const kind = route.answers[reply.status] ?? null;
-  const headers = new Headers({ "cache-control": cacheControl(route), ...reply.headers });
+  const headers = new Headers({ "cache-control": cacheControl(route), ...asDeclared, ...reply.headers });
   if (kind) headers.set("content-type", "media" in kind ? kind.media : "application/json");
   for (const cookie of reply.cookies ?? []) headers.append("set-cookie", cookie);
   const body = kind === null ? null : "media" in kind ? text : JSON.stringify(json);
@@ -39,6 +42,7 @@ export function problemResponse(problem: Problem): Response {
     headers: {
       "content-type": "application/problem+json",
       "cache-control": "no-store",
+      ...asDeclared,
       ...(retryAfterS !== undefined && { "retry-after": String(retryAfterS) }),
     },
   });

@@ -1,35 +1,8 @@
 import { describe, expect, test } from "vitest";
-import { timerWords, whenWords } from "@/components/field/clock-words";
 import { addressOf, hrefOf } from "@/components/field/address";
 import { lastWalkOf, openWalksOf, purposesFor } from "@/components/field/rig-state";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-
-test.each([
-  [0, "00:00"],
-  [999, "00:00"],
-  [192_400, "03:12"],
-  [3_599_999, "59:59"],
-  [3_600_000, "1:00:00"],
-  [37_205_000, "10:20:05"],
-])("%d ms of walking shows as %s", (elapsedMs, words) => {
-  expect(timerWords(elapsedMs)).toBe(words);
-});
-
-describe("an instant as someone here would say it", () => {
-  const local = (text: string) => new Date(text).toISOString();
-  const now = Date.parse(local("2026-03-05T00:10"));
-  test.each([
-    ["2026-03-05T00:09", "00:09"],
-    ["2026-03-04T23:59", "yesterday 23:59"],
-    ["2026-03-03T09:14", "Mar 3, 09:14"],
-    ["2025-12-31T09:14", "Dec 31, 2025, 09:14"],
-    // A clock that ran ahead.
-    ["2026-03-06T09:14", "Mar 6, 09:14"],
-  ])("%s", (at, words) => {
-    expect(whenWords(local(at), now)).toBe(words);
-  });
-});
 
 test.each([
   [{}, "/field"],

@@ -1,15 +1,23 @@
+import { differenceInCalendarDays } from "date-fns/differenceInCalendarDays";
 import { format } from "date-fns/format";
 import { isSameYear } from "date-fns/isSameYear";
 
-/** A moment as a row shows it, in the reader's time zone; the year only when it is not this one. */
-export function momentText(at: string, now: Date): string {
+/** A moment as a row shows it, in the reader's time zone: “Jan 9, 08:05”; the year only when it is not this one. */
+export function momentText(at: string, now: Date | number): string {
   const then = new Date(at);
-  return format(then, isSameYear(then, now) ? "d\u00a0MMM HH:mm" : "d\u00a0MMM\u00a0yyyy HH:mm");
+  return format(then, isSameYear(then, now) ? "MMM\u00a0d, HH:mm" : "MMM\u00a0d,\u00a0yyyy, HH:mm");
+}
+
+/** A moment as someone would say it on the day: “09:14”, “yesterday 09:14”, and after that its date. */
+export function recentText(at: string, now: Date | number): string {
+  const days = differenceInCalendarDays(now, at);
+  if (days === 0) return format(at, "HH:mm");
+  return days === 1 ? format(at, "'yesterday' HH:mm") : momentText(at, now);
 }
 
 /** The whole moment, to the second and with the zone. */
 export function fullMomentText(at: string): string {
-  return format(new Date(at), "EEEE d MMMM yyyy, HH:mm:ss 'UTC'xxx");
+  return format(new Date(at), "EEEE, MMMM d, yyyy, HH:mm:ss 'UTC'xxx");
 }
 
 /** A running time: 03:12, or 1:03:12 from an hour on. */

@@ -1,9 +1,9 @@
 import { describe, expect, test } from "vitest";
-import { clockText, durationText, inFours, momentText } from "@/lib/client/desk-time";
+import { clockText, durationText, inFours, momentText, recentText } from "@/lib/client/time-words";
 
 const HOUR = 3_600_000;
 
-describe("times as the desk writes them", () => {
+describe("times as the screens write them", () => {
   test.each([
     [0, "00:00"],
     [999, "00:00"],
@@ -30,8 +30,21 @@ describe("times as the desk writes them", () => {
 
   test("a moment says its year only when it is not this one", () => {
     const now = new Date(2026, 4, 2);
-    expect(momentText(new Date(2026, 0, 9, 8, 5).toISOString(), now)).toBe("9\u00a0Jan 08:05");
-    expect(momentText(new Date(2025, 11, 31, 23, 59).toISOString(), now)).toBe("31\u00a0Dec\u00a02025 23:59");
+    expect(momentText(new Date(2026, 0, 9, 8, 5).toISOString(), now)).toBe("Jan\u00a09, 08:05");
+    expect(momentText(new Date(2025, 11, 31, 23, 59).toISOString(), now)).toBe(
+      "Dec\u00a031,\u00a02025, 23:59",
+    );
+  });
+
+  test.each([
+    ["2026-03-05T00:09", "00:09"],
+    ["2026-03-04T23:59", "yesterday 23:59"],
+    ["2026-03-03T09:14", "Mar\u00a03, 09:14"],
+    ["2025-12-31T09:14", "Dec\u00a031,\u00a02025, 09:14"],
+    // A clock that ran ahead.
+    ["2026-03-06T09:14", "Mar\u00a06, 09:14"],
+  ])("shortly after midnight on March 5, %s is %s", (at, text) => {
+    expect(recentText(new Date(at).toISOString(), new Date("2026-03-05T00:10"))).toBe(text);
   });
 
   test("digests fall into fours, the rest at the end", () => {
