@@ -105,7 +105,7 @@ const tables = [
     KEY walks_rig (rig_id, sort_at, id),
     KEY walks_member (member_id, sort_at, id),
     KEY walks_rig_organisation (rig_id, organisation_id, sort_at, id),
-    KEY walks_rig_received (rig_id, state, received_at, id),
+    KEY walks_rig_sealed (rig_id, state, sort_at, id),
     CONSTRAINT walks_rig FOREIGN KEY (rig_id) REFERENCES rigs (id),
     CONSTRAINT walks_revision FOREIGN KEY (revision_id) REFERENCES revisions (id),
     CONSTRAINT walks_member FOREIGN KEY (member_id) REFERENCES members (id),

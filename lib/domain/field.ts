@@ -3,7 +3,7 @@ import { effects, revisionShape } from "./revision";
 import { purposes, verdicts } from "./entry";
 import { memberShape } from "./member";
 import { receiptShape, serverKeyShape } from "./receipt";
-import { digestShape, instantShape, uuidShape, countShape } from "./shapes";
+import { countShape, deviceIdShape, digestShape, instantShape, uuidShape } from "./shapes";
 import { algorithms, publicKeyShape } from "./signature";
 
 /** What a phone keeps so that it can work with no network: the member, the rigs with their lists, the server's keys. */
@@ -30,7 +30,7 @@ export type BundleRig = Bundle["rigs"][number];
 
 /** A device as it registers: its id, its public key and a label to know it by. */
 export const deviceShape = z.object({
-  id: uuidShape,
+  id: deviceIdShape,
   alg: z.enum(algorithms),
   publicKey: publicKeyShape,
   label: z.string().check(z.maxLength(100)),
@@ -45,7 +45,7 @@ export const ENVELOPE = { entries: 500, seals: 500, bytes: 1024 * 1024 } as cons
  * in `refused`, so that one bad entry does not hold up the others.
  */
 export const envelopeShape = z.object({
-  device: uuidShape,
+  device: deviceIdShape,
   entries: z.array(z.looseObject({ walk: uuidShape, seq: countShape })),
   seals: z.array(z.looseObject({ walk: uuidShape })),
 });

@@ -10,6 +10,9 @@ export const digestShape = z.string().check(z.regex(/^[0-9a-f]{64}$/, "64 lower-
 /** A lower-case UUID of any version. */
 export const uuidShape = z.string().check(z.regex(UUID, "a lower-case UUID"));
 
+/** A UUID of any version in either case, as some phones write theirs; compare and keep it in lower case. */
+export const deviceIdShape = z.string().check(z.regex(new RegExp(UUID, "i"), "a UUID"));
+
 /** A whole number from 0 to 2^53-1. */
 export const countShape = z.int().check(z.nonnegative());
 

@@ -18,7 +18,7 @@ export const publicKeyShape = z
     z.looseObject({ kty: z.literal("EC"), crv: z.literal("P-256"), x: coordinate, y: coordinate }),
   ])
   .check(z.refine((jwk) => PRIVATE_MEMBERS.every((name) => !(name in jwk)), "a private key"))
-  .check(z.refine(isOnCurve, "not a point of its curve"));
+  .check(z.refine(isOnCurve, "not a usable point of its curve"));
 export type PublicKey = z.infer<typeof publicKeyShape>;
 
 /** The members that make a key what it is, and nothing else (RFC 7638, 3.2; RFC 8037, 2). */
@@ -67,9 +67,12 @@ function point(x: string, y: string): Uint8Array {
 
 function isOnCurve(jwk: { kty: string; x: string; y?: unknown }): boolean {
   try {
-    if (jwk.kty === "EC") p256.Point.fromBytes(point(jwk.x, jwk.y as string)).assertValidity();
-    else ed25519.Point.fromBytes(base64urlnopad.decode(jwk.x)).assertValidity();
-    return true;
+    if (jwk.kty === "EC") {
+      p256.Point.fromBytes(point(jwk.x, jwk.y as string)).assertValidity();
+      return true;
+    }
+    // Anyone can sign by a key of small order.
+    return !ed25519.Point.fromBytes(base64urlnopad.decode(jwk.x)).isSmallOrder();
   } catch {
     return false;
   }

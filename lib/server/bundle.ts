@@ -3,7 +3,6 @@ import { QueryTypes } from "sequelize";
 import type { Purpose, Verdict } from "@/lib/domain/entry";
 import type { Bundle, BundleRig } from "@/lib/domain/field";
 import type { Member } from "@/lib/domain/member";
-import { may } from "@/lib/domain/permissions";
 import type { RevisionDocument } from "@/lib/domain/revision";
 import { database } from "./database";
 import { serverKeys } from "./server-key";
@@ -44,9 +43,11 @@ function bundleRig(rig: StoredRig): BundleRig {
   };
 }
 
-/** One index look-up for each rig's latest revision and for its latest sealed walk that the member may see. */
+/**
+ * One index look-up for each rig's latest revision and for its latest sealed walk, whoever made it: a colleague's hold
+ * holds for everyone. Latest as in the history, so that an old walk that arrives late does not stand before a newer one.
+ */
 async function storedRigs(member: Member): Promise<StoredRig[]> {
-  const theirs = may(member.role, "walks.read-all") ? "" : "AND member_id = :member";
   return database().query<StoredRig>(
     `SELECT r.id, r.name, v.id AS revisionId, v.digest, v.document,
         w.id AS walkId, w.purpose, w.verdict, w.opened_at AS openedAt
@@ -54,14 +55,14 @@ async function storedRigs(member: Member): Promise<StoredRig[]> {
       JOIN revisions v ON v.rig_id = r.id
         AND v.number = (SELECT MAX(number) FROM revisions WHERE rig_id = r.id)
       LEFT JOIN walks w ON w.id = (
-        SELECT id FROM walks WHERE rig_id = r.id AND state = 'sealed' ${theirs}
-        ORDER BY received_at DESC, id DESC LIMIT 1)
+        SELECT id FROM walks WHERE rig_id = r.id AND state = 'sealed'
+        ORDER BY sort_at DESC, id DESC LIMIT 1)
       WHERE r.keeper_id = :organisation
       ORDER BY r.name, r.id
       LIMIT :most`,
     {
       type: QueryTypes.SELECT,
-      replacements: { organisation: member.organisation.id, member: member.id, most: MOST_RIGS },
+      replacements: { organisation: member.organisation.id, most: MOST_RIGS },
     },
   );
 }

@@ -20,12 +20,13 @@ interface Registered {
  */
 export async function deviceRegistered(
   member: Member,
-  { id, alg, publicKey, label }: DeviceRegistration,
+  { id: written, alg, publicKey, label }: DeviceRegistration,
 ): Promise<{ status: 200 | 201; json: Registered } | Problem> {
   if (alg !== algorithmOf(publicKey)) {
     const detail = `expected ${algorithmOf(publicKey)}, by the key's kind`;
     return new Problem("wrong-shape", { errors: [{ pointer: "/alg", detail }] });
   }
+  const id = written.toLowerCase();
   const { Device } = tables();
   const kid = thumbprint(publicKey);
   try {

@@ -39,7 +39,7 @@ export interface SignedIn {
 
 /** Who sent this request, by its session cookie; null when nobody is signed in or the session has ended. */
 export async function signedIn(request: Request): Promise<SignedIn | null> {
-  const presented = lucia().readSessionCookie(request.headers.get("cookie") ?? "");
+  const presented = presentedId(request.headers.get("cookie") ?? "");
   if (!presented) return null;
   const { session, user } = await lucia().validateSession(presented);
   if (!session) return null;
@@ -51,6 +51,15 @@ export async function signedIn(request: Request): Promise<SignedIn | null> {
   };
 }
 
+/**
+ * The session id in a Cookie header. lucia's own reader decodes every cookie and throws at one that is malformed, and
+ * other programs on this host may have set such a one.
+ */
+function presentedId(header: string): string | undefined {
+  const cookies = header.split(";").map((cookie) => cookie.trim().split("="));
+  return cookies.find(([name]) => name === lucia().sessionCookieName)?.[1];
+}
+
 /** Begins a session, clears away those that have run out, and returns the `Set-Cookie` value. */
 export async function beginSession(memberId: string): Promise<string> {
   await lucia().deleteExpiredSessions();
@@ -58,8 +67,8 @@ export async function beginSession(memberId: string): Promise<string> {
   return lucia().createSessionCookie(session.id).serialize();
 }
 
-/** Ends a session and returns the `Set-Cookie` value that clears it from the browser. */
-export async function endSession(sessionId: string): Promise<string> {
-  await lucia().invalidateSession(sessionId);
+/** Ends a session, if there is one, and returns the `Set-Cookie` value that clears it from the browser. */
+export async function endSession(sessionId: string | undefined): Promise<string> {
+  if (sessionId) await lucia().invalidateSession(sessionId);
   return lucia().createBlankSessionCookie().serialize();
 }

@@ -60,6 +60,7 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "she
     check.arm("right"),
     check.cables,
     check.cordAndLanyard,
+    check.cordJacket,
     chargeLine,
     cabin,
     brake,
@@ -67,7 +68,6 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "she
     ...tail,
     check.joints,
     check.tires,
-    check.cordJacket,
   ];
   const onTheWay = [
     check.receiverPins,
@@ -96,7 +96,7 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "she
       unhook,
       delivery: [...hookUp, ...unhook],
       "yard-out": hookUp,
-      "yard-in": [check.wheelHeat, ...unhook, check.tires, check.cordJacket],
+      "yard-in": [check.wheelHeat, ...unhook, check.cordJacket, check.tires],
     },
   };
 }

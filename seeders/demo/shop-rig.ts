@@ -142,13 +142,13 @@ const hookUp = [
   check.cables,
   shortCables,
   check.cordAndLanyard,
+  check.cordJacket,
   check.airLine,
   endState,
   brakeReady,
   check.rolling,
   check.lamps,
   check.joints,
-  check.cordJacket,
 ];
 const unhook = [check.carHeld, check.linesOff, check.barStowed];
 
@@ -180,9 +180,9 @@ export const shopRig: RevisionDocument = revisionDocument({
       check.cables,
       shortCables,
       check.airLine,
+      check.cordJacket,
       check.wheelHeat,
       check.lamps,
-      check.cordJacket,
     ],
     unhook,
     delivery: [...hookUp, ...unhook],

@@ -164,6 +164,21 @@ describe("foreign-device", () => {
     expect(codes(answer)).toEqual([[0, "foreign-device"]]);
   });
 
+  test("but not one that is written in capitals", async () => {
+    const walk = newWalk({ device: device.id.toUpperCase() }).add("close", {
+      verdict: "unfinished",
+      marks: 0,
+      faults: 0,
+    });
+    const answer = await ingest(member, {
+      device: device.id.toUpperCase(),
+      entries: walk.entries(),
+      seals: [walk.seal()],
+    });
+    expect(codes(answer)).toEqual([]);
+    expect(answer.walks[walk.id]!.state).toBe("sealed");
+  });
+
   test("another of the member's own devices going on with a walk", async () => {
     const walk = newWalk().mark("pin", "good");
     await send(walk.entries(0, 1));

@@ -170,7 +170,13 @@ describe("GET /api/openapi.json", () => {
         security ? [`${method} ${route}`] : [],
       ),
     );
-    expect(open).toEqual(["post /api/session", "get /api/keys", "get /api/health", "get /api/openapi.json"]);
+    expect(open).toEqual([
+      "post /api/session",
+      "delete /api/session",
+      "get /api/keys",
+      "get /api/health",
+      "get /api/openapi.json",
+    ]);
     expect(paths["/api/walks"]!.get!.parameters).toEqual([
       { name: "after", in: "query", required: false, schema: { type: "string" } },
       {

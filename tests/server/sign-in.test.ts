@@ -71,6 +71,20 @@ describe("the right password", () => {
   });
 });
 
+describe("cookies of other programs on this host", () => {
+  test.each(["a=%zz; ", "%zz=1; ", "hookfast-other=%; "])("%s does not stand in the way", async (other) => {
+    const driver = await givenMember({ role: "driver" });
+    const cookie = other + driver.cookie;
+    expect((await whoAmI(request("GET", "/api/session", { cookie }))).status).toBe(200);
+  });
+
+  test("an unreadable one under our own name is no session, and signing in replaces it", async () => {
+    const cookie = "hookfast=%zz";
+    expect((await whoAmI(request("GET", "/api/session", { cookie }))).status).toBe(401);
+    expect((await attempt(member.email, PASSWORD, { cookie })).status).toBe(200);
+  });
+});
+
 describe("a wrong password", () => {
   test("and an unknown address have the same answer", async () => {
     const wrong = await attempt(member.email, "walk the rig once");

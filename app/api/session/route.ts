@@ -8,13 +8,13 @@ export const POST = serve(signIn, async ({ request, body }) => {
   const member = await checkCredentials(body);
   if (member instanceof Problem) return member;
   const before = await signedIn(request);
-  if (before) await endSession(before.sessionId);
+  await endSession(before?.sessionId);
   return { status: 200, json: { member }, cookies: [await beginSession(member.id)] };
 });
 
 export const GET = serve(whoAmI, async ({ member }) => ({ status: 200, json: { member } }));
 
-export const DELETE = serve(signOut, async ({ session }) => ({
-  status: 204,
-  cookies: [await endSession(session.sessionId)],
-}));
+export const DELETE = serve(signOut, async ({ request }) => {
+  const session = await signedIn(request);
+  return { status: 204, cookies: [await endSession(session?.sessionId)] };
+});

@@ -18,8 +18,8 @@ export async function ingest(
   envelope: Envelope,
   now: Date = new Date(),
 ): Promise<EnvelopeAnswer> {
-  const key = await deviceKey(envelope.device, member.id);
-  const sender = { member, device: envelope.device, key };
+  const device = envelope.device.toLowerCase();
+  const sender = { member, device, key: await deviceKey(device, member.id) };
   const walks = new Map<string, WalkState>();
   const refused: EnvelopeAnswer["refused"] = [];
   for (const batch of batchesOf(envelope)) {

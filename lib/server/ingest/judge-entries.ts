@@ -88,7 +88,7 @@ function strangerReason(sender: Sender, stored: StoredWalk | null, { entry }: Li
   const mine = stored === null || stored.memberId === sender.member.id;
   if (entry.v !== 1) return { code: "version", detail: details.version };
   if (!sender.key) return { code: "foreign-device", detail: details.unregistered };
-  if (open && open.device !== sender.device) {
+  if (open && open.device.toLowerCase() !== sender.device) {
     return { code: "foreign-device", detail: details["foreign-open"] };
   }
   // Of another member's walk the device is foreign too, but that is not what is wrong.
