@@ -34,8 +34,10 @@ export function DeskFrame({ children }: { children: ReactNode }) {
       </a>
       {/* A new key per page closes the menu after a choice. */}
       <details key={path} className="border-b-hair border-rule lg:hidden">
-        <summary className="flex min-h-14 list-none items-center justify-between pl-4 [&::-webkit-details-marker]:hidden">
-          <span className="text-2xl leading-none font-extrabold">{deskWords.brand}</span>
+        <summary className="flex min-h-14 list-none flex-wrap items-center justify-between pl-4 [&::-webkit-details-marker]:hidden">
+          <span className="flex min-h-14 items-center text-2xl leading-none font-extrabold">
+            {deskWords.brand}
+          </span>
           <span className="flex min-h-14 items-center px-4 font-semibold underline decoration-2 underline-offset-4">
             {deskWords.menu}
           </span>

@@ -8,7 +8,7 @@ import { VerdictText } from "./verdict";
 // Rows are grids at every width: a table row cannot be relied on to hold the link that is stretched over it, and where there is
 // no room the same cells stand on two or three lines. Roles are spelled out because a grid row is no row by itself.
 const grid =
-  "grid gap-x-3 px-2 @4xl:grid-cols-[7.25rem_5rem_minmax(0,1.5fr)_minmax(0,1fr)_3rem_4.25rem_7.25rem_8rem] @4xl:items-baseline";
+  "grid gap-x-3 px-2 @4xl:grid-cols-[8rem_5rem_minmax(0,1.25fr)_minmax(0,1fr)_3rem_4.25rem_8rem_8rem] @4xl:items-baseline";
 
 const { columns } = historyWords;
 const heads = [

@@ -35,7 +35,10 @@ export function Callout({ letter, lines = [], at, to, label = "right", onCallout
     above: y - radius - 8 - (lines.length - 1) * lineHeight,
   }[label];
   return (
-    <g onClick={onCallout && (() => onCallout(letter))} className={onCallout && "dr-touch"}>
+    <g
+      onClick={onCallout && (() => onCallout(letter))}
+      className={`dr-callout ${onCallout ? "dr-touch" : ""}`}
+    >
       {leaders.map(({ d }) => (
         <path key={d} d={d} className="dr-leader-halo" />
       ))}

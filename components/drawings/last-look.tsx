@@ -27,8 +27,10 @@ const tires = [
   [352, 240],
 ] as const;
 
+type LastLookProps = DrawingProps & { only?: "joints" | "tires" };
+
 /** The whole rig from above with the walk around it: a ring for each joint to put a hand on, a bar for each tire. */
-export function LastLookDrawing({ size = "full", onCallout }: DrawingProps) {
+export function LastLookDrawing({ size = "full", only, onCallout }: LastLookProps) {
   if (size === "small") return <LastLookSmall />;
   return (
     <Frame {...words} height={330}>
@@ -67,31 +69,37 @@ export function LastLookDrawing({ size = "full", onCallout }: DrawingProps) {
             d="M34 42L20 50L34 58M160 263L174 270L160 277M376 174L384 160L392 174"
             className="dr-line dr-open"
           />
-          {joints.map(([x, y]) => (
-            <g key={`${x}-${y}`}>
-              <circle cx={x} cy={y} r="7.5" className="dr-part" />
-              <circle cx={x} cy={y} r="3.2" className="dr-solid" />
-            </g>
-          ))}
-          <Hand x={236} y={102} turn={162} />
-          <Callout
-            letter="A"
-            lines={words.callouts.A}
-            at={[110, 22]}
-            to={[[108, 160]]}
-            onCallout={onCallout}
-          />
-          <Callout
-            letter="B"
-            lines={words.callouts.B}
-            at={[250, 302]}
-            to={[
-              [284, 244],
-              [346, 244],
-            ]}
-            label="left"
-            onCallout={onCallout}
-          />
+          {only !== "tires" && (
+            <>
+              {joints.map(([x, y]) => (
+                <g key={`${x}-${y}`}>
+                  <circle cx={x} cy={y} r="7.5" className="dr-part" />
+                  <circle cx={x} cy={y} r="3.2" className="dr-solid" />
+                </g>
+              ))}
+              <Hand x={236} y={102} turn={162} />
+              <Callout
+                letter="A"
+                lines={words.callouts.A}
+                at={[110, 22]}
+                to={[[108, 160]]}
+                onCallout={onCallout}
+              />
+            </>
+          )}
+          {only !== "joints" && (
+            <Callout
+              letter="B"
+              lines={words.callouts.B}
+              at={[250, 302]}
+              to={[
+                [284, 244],
+                [346, 244],
+              ]}
+              label="left"
+              onCallout={onCallout}
+            />
+          )}
         </>
       )}
     </Frame>

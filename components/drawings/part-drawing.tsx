@@ -1,6 +1,6 @@
 import type { ReactNode } from "react";
 import type { CalloutLetter, DrawingSide } from "@/lib/domain/messages/drawings";
-import type { PartKey } from "@/lib/domain/revision";
+import type { DrawnState, PartKey } from "@/lib/domain/revision";
 import { ArmDrawing } from "./arm";
 import { BarStowedDrawing } from "./bar-stowed";
 import { BrakeDrawing } from "./brake";
@@ -17,6 +17,8 @@ export type PartDrawingProps = {
   part: PartKey;
   /** Which arm; the other parts have one drawing for both sides. */
   side?: DrawingSide;
+  /** How it differs from the part's usual drawing, by the check it is drawn for. */
+  drawn?: DrawnState;
   /** full: with lettered callouts, as wide as its place. small: 88 by 74 or so, without words. */
   size?: "full" | "small";
   /** For part "lamps": what each lamp should show. */
@@ -29,12 +31,14 @@ const table: Record<PartKey, (props: PartDrawingProps) => ReactNode> = {
   receiver: ReceiverDrawing,
   arm: ArmDrawing,
   cables: CablesDrawing,
-  cord: CordDrawing,
+  cord: ({ drawn, ...props }) => <CordDrawing off={drawn === "off"} {...props} />,
   cabin: CabinDrawing,
-  brake: BrakeDrawing,
-  wheels: WheelsDrawing,
+  brake: ({ drawn, ...props }) => <BrakeDrawing installed={drawn === "installed"} {...props} />,
+  wheels: ({ drawn, ...props }) => <WheelsDrawing standing={drawn === "standing"} {...props} />,
   lamps: ({ size, lamps }) => <LampsDrawing size={size} left={lamps?.left} right={lamps?.right} />,
-  "last-look": LastLookDrawing,
+  "last-look": ({ drawn, ...props }) => (
+    <LastLookDrawing only={drawn === "joints" || drawn === "tires" ? drawn : undefined} {...props} />
+  ),
   chocks: ChocksDrawing,
   "bar-stowed": BarStowedDrawing,
 };

@@ -4,11 +4,15 @@ import { CarSide } from "./car-side";
 import { Frame, type DrawingProps } from "./frame";
 import { SmallFrame } from "./small-frame";
 
-const words = drawingWords.wheels;
+const rolled = drawingWords.wheels;
+const stopped = drawingWords["wheels-standing"];
+
+type WheelsProps = DrawingProps & { standing?: boolean };
 
 /** The rig after a few feet straight ahead: every car wheel has turned; in the window, both arms out and latched. */
-export function WheelsDrawing({ size = "full", onCallout }: DrawingProps) {
-  if (size === "small") return <WheelsSmall />;
+export function WheelsDrawing({ size = "full", standing = false, onCallout }: WheelsProps) {
+  const words = standing ? stopped : rolled;
+  if (size === "small") return <WheelsSmall standing={standing} />;
   return (
     <Frame {...words} height={336}>
       {(hatch) => (
@@ -22,29 +26,13 @@ export function WheelsDrawing({ size = "full", onCallout }: DrawingProps) {
           <path d="M-4 214H88" className="dr-fine" />
           <circle cx="22" cy="250" r="31" className="dr-edge dr-shade" />
           <circle cx="22" cy="250" r="16" className="dr-part" />
-          <path d="M70 160H20M34 148L18 160L34 172" className="dr-edge dr-open" />
+          {!standing && <path d="M70 160H20M34 148L18 160L34 172" className="dr-edge dr-open" />}
           <path d="M88 236H104V250H88Z" className="dr-part dr-shade" />
           <path d="M104 236H138V250H104ZM138 238H174V248H138Z" className="dr-part" />
 
           <CarSide hatch={hatch} />
 
-          {/* Window on the arms. */}
-          <circle cx="138" cy="243" r="21" className="dr-fine dr-open" />
-          <path d="M130 224L118 108" className="dr-fine dr-open" />
-          <path d="M108 10H382V108H108Z" className="dr-edge" />
-          <LatchedArm y={36} />
-          <LatchedArm y={84} />
-
-          <Callout
-            letter="A"
-            lines={words.callouts.A}
-            at={[150, 132]}
-            to={[
-              [232, 22],
-              [232, 70],
-            ]}
-            onCallout={onCallout}
-          />
+          {!standing && <ArmsWindow onCallout={onCallout} />}
           <Callout
             letter="B"
             lines={words.callouts.B}
@@ -58,6 +46,30 @@ export function WheelsDrawing({ size = "full", onCallout }: DrawingProps) {
         </>
       )}
     </Frame>
+  );
+}
+
+/** The window on the arms at the bar's middle. */
+function ArmsWindow({ onCallout }: Pick<DrawingProps, "onCallout">) {
+  return (
+    <>
+      <circle cx="138" cy="243" r="21" className="dr-fine dr-open" />
+      <path d="M130 224L118 108" className="dr-fine dr-open" />
+      <path d="M108 10H382V108H108Z" className="dr-edge" />
+      <LatchedArm y={36} />
+      <LatchedArm y={84} />
+
+      <Callout
+        letter="A"
+        lines={rolled.callouts.A}
+        at={[150, 132]}
+        to={[
+          [232, 22],
+          [232, 70],
+        ]}
+        onCallout={onCallout}
+      />
+    </>
   );
 }
 
@@ -77,9 +89,9 @@ function LatchedArm({ y }: { y: number }) {
   );
 }
 
-function WheelsSmall() {
+function WheelsSmall({ standing }: { standing: boolean }) {
   return (
-    <SmallFrame {...words}>
+    <SmallFrame {...(standing ? stopped : rolled)}>
       {() => (
         <>
           <path d="M0 66H88" className="dr-part" />
@@ -88,7 +100,7 @@ function WheelsSmall() {
           <path d="M34 58V48L44 44L52 34H76L84 44V58Z" className="dr-part" />
           <circle cx="46" cy="58" r="8" className="dr-part dr-shade" />
           <circle cx="74" cy="58" r="8" className="dr-part dr-shade" />
-          <path d="M70 16H30M40 8L29 16L40 24" className="dr-edge dr-open" />
+          {!standing && <path d="M70 16H30M40 8L29 16L40 24" className="dr-edge dr-open" />}
         </>
       )}
     </SmallFrame>

@@ -29,6 +29,7 @@ type CheckScreenProps = {
 /** One check at a time: the part as it should be, what is asked of it, and the answers. */
 export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenProps) {
   const { check, station, place } = step;
+  const asDrawn = check.drawn !== "place";
   const marking = useMarking(recorder, steps, step);
   useScreenTitle(words.title(walk.purpose, walk.rigName));
   return (
@@ -57,8 +58,10 @@ export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenPr
         </div>
       }
       picture={
-        <div className="absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full">
-          <PartDrawing part={check.part} side={check.side} />
+        <div
+          className={`absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full ${asDrawn ? "" : "[&_.dr-callout]:hidden"}`}
+        >
+          <PartDrawing part={check.part} side={check.side} drawn={check.drawn} />
         </div>
       }
       words={
@@ -78,7 +81,7 @@ export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenPr
           {marking.asking ? (
             <BecauseQuestion marking={marking} />
           ) : (
-            <MarkButtons check={check} first={place === 1} marking={marking} />
+            <MarkButtons check={check} asDrawn={asDrawn} first={place === 1} marking={marking} />
           )}
         </>
       }

@@ -36,7 +36,7 @@ export function CheckWords({ check, mark, asking, onKeep }: CheckWordsProps) {
             <span className={`tape-seg tape-${segmentOf(check, mark)}`} />
           </span>
           <p className="font-semibold">{fieldWords.walk.marked(mark)}</p>
-          <Button variant="quiet" size="desk" className="ml-auto" onClick={onKeep}>
+          <Button variant="quiet" className="ml-auto" onClick={onKeep}>
             {fieldWords.walk.keep}
           </Button>
         </div>

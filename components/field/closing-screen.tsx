@@ -67,14 +67,14 @@ export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProp
       </div>
       <BottomBar
         height="tall"
-        className="grid grid-cols-2 gap-2.5 px-3 md:col-start-2 md:row-start-3 md:self-end md:border-0"
+        className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,max(8.5rem,40%)),1fr))] gap-2.5 px-3 md:col-start-2 md:row-start-3 md:self-end md:border-0"
       >
         {trouble && (
-          <div className="col-span-2">
+          <div className="col-span-full">
             <Trouble>{words.notSaved}</Trouble>
           </div>
         )}
-        <Button variant="good" hint={words.final} className="col-span-2 text-[1.75rem]" onClick={close}>
+        <Button variant="good" hint={words.final} className="col-span-full text-[1.75rem]" onClick={close}>
           {words.closeAndSign}
         </Button>
         <Button variant="quiet" onClick={() => show(onward ?? steps.at(-1)!)}>

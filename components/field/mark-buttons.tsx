@@ -6,10 +6,16 @@ import type { Marking } from "./marking";
 const words = fieldWords.walk;
 const third = "min-w-23 flex-1";
 
-type MarkButtonsProps = { check: Check; first: boolean; marking: Marking };
+type MarkButtonsProps = {
+  check: Check;
+  /** Whether the drawing shows what is asked for. */
+  asDrawn: boolean;
+  first: boolean;
+  marking: Marking;
+};
 
 /** The four answers to a check and the way back, where the thumb is. */
-export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
+export function MarkButtons({ check, asDrawn, first, marking }: MarkButtonsProps) {
   const holds = check.effect === "hold";
   return (
     <div className="flex flex-col gap-2.5">
@@ -17,7 +23,7 @@ export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
       <div className="flex flex-wrap gap-2.5">
         <Button
           variant="good"
-          hint={words.asDrawn}
+          hint={asDrawn ? words.asDrawn : undefined}
           className="min-w-[min(100%,10.5rem)] flex-[2_1_0.625rem] text-[1.875rem]"
           onClick={() => marking.mark("good")}
         >

@@ -5,6 +5,11 @@ import { fieldWords } from "@/lib/domain/messages/field";
 
 const words = fieldWords.rigs;
 
+const abreast = {
+  three: "grid-cols-[repeat(auto-fit,minmax(min(100%,max(6rem,30%)),1fr))]",
+  two: "grid-cols-[repeat(auto-fit,minmax(min(100%,max(7rem,40%)),1fr))]",
+};
+
 type RigStartsProps = {
   rig: BundleRig;
   purposes: readonly Purpose[];
@@ -34,7 +39,8 @@ export function RigStarts({ rig, purposes, main, onStart }: RigStartsProps) {
           {start(usual)}
         </Button>
       )}
-      <div className={`grid gap-2.5 ${others.length % 3 === 0 ? "grid-cols-3" : "grid-cols-2"}`}>
+      {/* Threes or pairs, and fewer abreast where large text needs the room. */}
+      <div className={`grid gap-2.5 ${others.length % 3 === 0 ? abreast.three : abreast.two}`}>
         {others.map((purpose) => (
           <Button key={purpose} variant="quiet" onClick={() => onStart(purpose)}>
             {start(purpose)}

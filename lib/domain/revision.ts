@@ -29,6 +29,14 @@ export const partKeys = [
 ] as const;
 export type PartKey = (typeof partKeys)[number];
 
+/**
+ * How a check's drawing differs from its part's usual one: `off` with cord and lanyard off, `standing` with the rig at
+ * rest, `joints` or `tires` with only that called out, `installed` a brake without a box at the pedal, and `place`
+ * where the drawing only says where to look, so that nothing is to be as drawn.
+ */
+export const drawnStates = ["off", "standing", "joints", "tires", "installed", "place"] as const;
+export type DrawnState = (typeof drawnStates)[number];
+
 export const effects = ["hold", "fix"] as const;
 
 /** One thing to look at: what is asked, how to look, why it matters and what a fault does. */
@@ -37,6 +45,7 @@ export const checkShape = z.looseObject({
   kind: z.enum(["look", "lamps"]),
   part: z.enum(partKeys),
   side: z.optional(z.enum(["left", "right"])),
+  drawn: z.optional(z.enum(drawnStates)),
   ask: z.string(),
   how: z.string(),
   why: z.string(),

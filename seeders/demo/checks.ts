@@ -18,7 +18,7 @@ export const receiverPins = hold({
   key: "receiver-pins",
   part: "receiver",
   ask: "Receiver pins in, clips closed",
-  how: "Two pins: one through the receiver, one through the drop receiver. Each goes all the way through, with its clip closed on the far side.",
+  how: "Two pins: one through the receiver, one through the drop receiver. Each goes all the way through, with its clip closed through its end.",
   why: "These pins hold everything behind the coach. A pin that walks out lets the whole bar slide out.",
   mend: "Push the pin through and close its clip. Replace a pin that is bent or worn.",
 });
@@ -59,6 +59,7 @@ export const cordAndLanyard = hold({
 export const airLine = hold({
   key: "air-line",
   part: "cord",
+  drawn: "place",
   ask: "Air line coupled, no hiss",
   how: "The coupling is home and does not come off with a tug. Listen at both ends with the coach's air up.",
   why: "Without air the car's brake does not work and the coach loses pressure.",
@@ -88,6 +89,7 @@ export const lamps = hold({
 export const joints = hold({
   key: "joints",
   part: "last-look",
+  drawn: "joints",
   ask: "Hands on every joint: none loose",
   how: "Walk around once more without talking. Push and pull each arm, each pin and each plug by hand.",
   why: "The check that is missed is the one that was interrupted.",
@@ -97,6 +99,7 @@ export const joints = hold({
 export const tires = fix({
   key: "tires",
   part: "last-look",
+  drawn: "tires",
   ask: "Car tires: none low, none cracked",
   how: "Look at the tread and both sidewalls of each tire. Cracks are easiest to see near the rim.",
   why: "Nobody in the coach feels a flat tire on the car.",
@@ -115,6 +118,7 @@ export const cordJacket = fix({
 export const wheelHeat = hold({
   key: "wheel-heat",
   part: "wheels",
+  drawn: "standing",
   ask: "No wheel hotter than its pair",
   how: "Hold the back of a hand near each car wheel, without touching. Compare left with right.",
   why: "One hot wheel means a brake that drags, or a bearing.",
@@ -144,6 +148,7 @@ export const barStowed = hold({
 export const linesOff = fix({
   key: "lines-off",
   part: "cord",
+  drawn: "off",
   ask: "Cord, cables, lanyard off, capped",
   how: "Everything that ran between the vehicles is off and put away, with the caps on the sockets.",
   why: "An open socket fills with water, and a cable that hangs gets caught.",

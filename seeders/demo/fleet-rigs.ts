@@ -15,6 +15,7 @@ const brakeBox = check.hold({
 const installedBrake = check.hold({
   key: "brake-ready",
   part: "brake",
+  drawn: "installed",
   ask: "Controller lit, pedal fully up",
   how: "The controller in the coach shows that it is ready. The car's pedal is all the way up and its stop lamps are dark.",
   why: "The brake in the car takes its power through the cord. Dark here means no brake there.",
@@ -24,6 +25,7 @@ const installedBrake = check.hold({
 const lightBar = check.hold({
   key: "light-bar",
   part: "lamps",
+  drawn: "place",
   ask: "Light bar on, both straps tight",
   how: "The bar lies across the hatch with both straps tight and its plug home. The plate is not covered.",
   why: "A bar that slides off hangs by its wire, and the car is dark from behind.",
@@ -33,6 +35,7 @@ const lightBar = check.hold({
 const chargeLine = check.fix({
   key: "charge-line",
   part: "cord",
+  drawn: "place",
   ask: "Charge line plugged in",
   how: "On the newer cord there is a thin second plug beside the large one. It is in its socket.",
   why: "Without it the car's battery may be flat at the end of the day.",

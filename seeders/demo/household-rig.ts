@@ -112,6 +112,7 @@ const brakeReady = check.hold({
 const fuseBack = check.hold({
   key: "fuse-back",
   part: "cabin",
+  drawn: "place",
   ask: "Fuse 31 back in its place",
   how: "Look into the fuse box beside the steering column: place 31 is filled.",
   why: "The manual has it out only while towing. The car should not be driven without it.",

@@ -2,8 +2,12 @@ import type { PartKey, StationKey } from "../revision";
 
 export type DrawingSide = "left" | "right";
 export type CalloutLetter = "A" | "B" | "C" | "D";
-/** An arm end has words of its own for each side. */
-export type DrawingKey = Exclude<PartKey, "arm"> | `arm-${DrawingSide}`;
+/**
+ * An arm end has words of its own for each side, the cord when it is off, the wheels when they stand, the brake when it
+ * is built into the car.
+ */
+export type DrawingKey =
+  Exclude<PartKey, "arm"> | `arm-${DrawingSide}` | "cord-off" | "wheels-standing" | "brake-installed";
 
 export type DrawingWords = {
   title: string;
@@ -69,6 +73,16 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       D: ["pin fully", "in switch"],
     },
   },
+  "cord-off": {
+    title: "Everything off between the vehicles, sockets capped",
+    description:
+      "Cord, safety cables and lanyard are off; only the bar is left between the vehicles. The caps on the coach’s and " +
+      "the car’s sockets are closed. The pin stays in the breakaway switch.",
+    callouts: {
+      A: ["caps closed"],
+      B: ["lanyard off,", "cables off"],
+    },
+  },
   cabin: {
     title: "Car cabin, as its own manual says",
     description:
@@ -92,6 +106,14 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       D: ["against the seat"],
     },
   },
+  "brake-installed": {
+    title: "Brake pedal of a car with its brake built in",
+    description:
+      "The driver’s footwell from the side. Nothing stands at the pedal and the pedal is fully up.",
+    callouts: {
+      A: ["pedal up,", "on its stop"],
+    },
+  },
   wheels: {
     title: "Both vehicles rolled a few feet",
     description:
@@ -100,6 +122,14 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
     callouts: {
       A: ["both arms out, latch down"],
       B: ["all four wheels turn"],
+    },
+  },
+  "wheels-standing": {
+    title: "The car’s wheels, with the rig stopped",
+    description:
+      "The coach and the car stand still. Marked are the wheels on one side of the car; each has its pair on the other side.",
+    callouts: {
+      B: ["left against right"],
     },
   },
   lamps: {

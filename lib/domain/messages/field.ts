@@ -173,7 +173,8 @@ export const fieldWords = {
     holds: "What holds it",
     fixes: "Fix soon",
     notSeen: "Not seen",
-    markedAbsent: "Marked as not on this rig. ",
+    markedAbsent:
+      "Marked as not on this rig, but its list asks for it. Look again, or have the rig sheet corrected.",
     leftOut: "Not marked",
     sentence: (kind: Verdict, holds: number, done: number, total: number, elapsedMs: number) =>
       [

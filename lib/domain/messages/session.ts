@@ -36,7 +36,7 @@ export const frontWords = {
   job: "An installer records how a rig is built. Hookfast works out its walk-around list, and the owner walks that list at the campsite with no signal. A fleet can show what was looked at, when and by whom.",
   ways: "Ways in",
   field: "Walk a rig",
-  fieldHint: "On the phone, with or without signal",
+  fieldHint: "On the phone, signal or not",
   desk: "Desk",
   deskHint: "History and records, for the office",
   signIn: "Sign in",
