@@ -1,5 +1,5 @@
 import type { MarkBody, Outcome, Purpose, Verdict } from "../entry";
-import type { OrganisationKind, Role } from "../member";
+import type { Role } from "../member";
 import type { Check } from "../revision";
 import type { Segment } from "../walk-reading";
 import { outcomeWords, purposeWords, verdictWords } from "./walk";
@@ -9,12 +9,6 @@ export const roleWords: Record<Role, string> = {
   installer: "installer",
   manager: "manager",
   auditor: "auditor",
-};
-
-export const organisationKindWords: Record<OrganisationKind, string> = {
-  household: "household",
-  shop: "shop",
-  fleet: "fleet",
 };
 
 const segmentWords: Record<Segment, string> = {
