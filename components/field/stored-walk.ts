@@ -10,6 +10,7 @@ async function readStored(kept: KeptWalk): Promise<WalkView | null> {
   if (!document) return null;
   return {
     walk: kept,
+    interruption: null,
     document,
     replay: replay(
       document,

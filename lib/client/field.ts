@@ -17,7 +17,7 @@ export interface HeldWalk {
 
 /** The field wing's one instance of everything that lives outside React: clock, store and sync. */
 export class Field {
-  readonly clock: Clock = browserClock();
+  readonly clock: Clock = browserClock(document);
   private readonly channel = new BroadcastChannel(CHANNEL);
   readonly sync: Sync;
 

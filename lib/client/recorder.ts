@@ -1,6 +1,7 @@
-import { nextLink, stamp, type Stamp } from "../domain/chain";
+import { clockJump, nextLink, stamp, type Stamp } from "../domain/chain";
 import type { Depth, Entry, Link, MarkBody, Purpose } from "../domain/entry";
 import type { BundleRig } from "../domain/field";
+import { interruptionOf, type Interruption } from "../domain/interruption";
 import { replay, type Replay } from "../domain/replay";
 import type { RevisionDocument } from "../domain/revision";
 import { thumbprint } from "../domain/signature";
@@ -15,6 +16,17 @@ export interface WalkView {
   walk: KeptWalk;
   document: RevisionDocument;
   replay: Replay;
+  /** Why the walk does not simply go on; `resume` answers it. */
+  interruption: Interruption | null;
+}
+
+/** What is to be walked, by whom, and how far. */
+export interface WalkPlan {
+  member: string;
+  purpose: Purpose;
+  depth: Depth;
+  /** A card filled in by hand and entered later: no time is kept. */
+  source?: "paper";
 }
 
 /** What a recorder stands on. */
@@ -36,18 +48,18 @@ export class Recorder {
   private constructor(
     private readonly ground: Ground,
     private readonly links: Link[],
-    private readonly takenUpMonoMs: number,
+    private takenUpMonoMs: number,
     walk: KeptWalk,
     document: RevisionDocument,
   ) {
-    this.current = { walk, document, replay: this.replayed(document) };
+    this.current = { walk, document, replay: this.replayed(document), interruption: null };
   }
 
   /** Opens a new walk on a rig's current revision. */
   static async open(
     ground: Ground,
     rig: BundleRig,
-    { member, purpose, depth }: { member: string; purpose: Purpose; depth: Depth },
+    { member, purpose, depth, source }: WalkPlan,
   ): Promise<Recorder> {
     const now = ground.clock();
     const id = uuidV7(now.wallMs, crypto.getRandomValues(new Uint8Array(10)));
@@ -62,6 +74,7 @@ export class Recorder {
       member,
       app: APP,
       key: thumbprint(publicKey),
+      ...(source && { source }),
     };
     const open = nextLink(id, { revision }, "open", body, stamp(now, null, now.monoMs));
     const walk: KeptWalk = {
@@ -73,6 +86,7 @@ export class Recorder {
       depth,
       member,
       device,
+      ...(source && { source }),
       openedAt: open.entry.at,
       length: 1,
       head: open.digest,
@@ -91,7 +105,15 @@ export class Recorder {
     const walk = await ground.shelf.walk(id);
     const document = walk && (await ground.shelf.document(walk.revision));
     if (!walk || !document) return null;
-    return new Recorder(ground, await ground.shelf.links(id), ground.clock().monoMs, walk, document);
+    const recorder = new Recorder(
+      ground,
+      await ground.shelf.links(id),
+      ground.clock().monoMs,
+      walk,
+      document,
+    );
+    recorder.returned("load");
+    return recorder;
   }
 
   view = (): WalkView => this.current;
@@ -101,18 +123,58 @@ export class Recorder {
     return () => this.listeners.delete(listener);
   };
 
-  /** Active walking time now, in milliseconds; stands still once the walk is closed. */
-  elapsedMs = (): number => (this.current.walk.seal ? this.current.replay.elapsedMs : this.stamp().elapsedMs);
+  /** Active walking time now, in milliseconds; stands still while the walk waits, and once it is closed. */
+  elapsedMs = (): number => {
+    const { walk, interruption, replay } = this.current;
+    return walk.seal || interruption ? replay.elapsedMs : this.stamp().elapsedMs;
+  };
+
+  /**
+   * Someone looks at the walk again: it may have been left meanwhile.
+   * @param away `load` on a new page; else how long the page was out of sight, in milliseconds
+   */
+  returned(away: "load" | number): void {
+    if (this.current.walk.source === "paper" || this.current.interruption) return;
+    const marked = this.current.replay.marks.size > 0;
+    const interruption = interruptionOf(this.links.at(-1)!.entry, marked, away, this.ground.clock().wallMs);
+    if (interruption) this.show({ interruption });
+  }
 
   /** Marks a check. Resolves when the mark is saved on this phone. */
   mark(check: string, outcome: MarkBody["outcome"], more: Partial<MarkBody> = {}): Promise<void> {
     return this.inLine(() => this.append("mark", { check, outcome, ...more }));
   }
 
+  /** Leaves words beside the checks. */
+  note(text: string): Promise<void> {
+    return this.inLine(() => this.append("note", { text }));
+  }
+
+  /** Walking time stops until the walk is resumed. */
+  pause(): Promise<void> {
+    return this.inLine(async () => {
+      await this.append("pause", {});
+      this.returned(0);
+    });
+  }
+
+  /**
+   * Goes on with the walk, voiding the marks of the checks that are asked again.
+   * @param car whether anyone has been in the car since the cabin was marked, where that was asked
+   */
+  resume(again: readonly string[], car?: "untouched" | "entered"): Promise<void> {
+    return this.inLine(async () => {
+      if (this.current.interruption) this.takenUpMonoMs = this.ground.clock().monoMs;
+      await this.append("resume", { again: [...again], ...(car && { car }) });
+      if (this.current.interruption) this.show({ interruption: null });
+    });
+  }
+
   /** Closes and signs the walk as it stands. Resolves when both are saved on this phone; again is no error. */
   close(): Promise<void> {
     return this.inLine(async () => {
       if (this.current.walk.seal) return;
+      await this.noteJump();
       const { verdict, counts } = this.current.replay;
       const link = this.link("close", { verdict, ...counts });
       const { device } = this.ground;
@@ -122,8 +184,15 @@ export class Recorder {
     });
   }
 
-  private append(type: string, body: Entry["body"]): Promise<void> {
-    return this.save(this.link(type, body), {});
+  private async append(type: string, body: Entry["body"]): Promise<void> {
+    await this.noteJump();
+    await this.save(this.link(type, body), {});
+  }
+
+  /** A clock that was set since the last entry is recorded before anything else. */
+  private async noteJump(): Promise<void> {
+    const jump = clockJump(this.ground.clock(), this.links.at(-1)!.entry);
+    if (jump) await this.save(this.link("disturbed", jump), {});
   }
 
   private link(type: string, body: Entry["body"]): Link {
@@ -133,12 +202,19 @@ export class Recorder {
   private async save(link: Link, change: Partial<KeptWalk>): Promise<void> {
     const walk = await this.ground.shelf.append(link, change);
     this.links.push(link);
-    this.current = { ...this.current, walk, replay: this.replayed(this.current.document) };
+    this.show({ walk, replay: this.replayed(this.current.document) });
+  }
+
+  private show(change: Partial<WalkView>): void {
+    this.current = { ...this.current, ...change };
     for (const listener of this.listeners) listener();
   }
 
   private stamp(): Stamp {
-    return stamp(this.ground.clock(), this.links.at(-1)!.entry, this.takenUpMonoMs);
+    const last = this.links.at(-1)!.entry;
+    const now = stamp(this.ground.clock(), last, this.takenUpMonoMs);
+    const stands = this.current.walk.source === "paper" || this.current.interruption !== null;
+    return stands ? { ...now, elapsedMs: last.elapsedMs } : now;
   }
 
   private replayed(document: RevisionDocument): Replay {

@@ -14,6 +14,8 @@ export interface KeptWalk {
   depth: Depth;
   member: string;
   device: string;
+  /** Entered from a card that was filled in by hand; untimed. */
+  source?: "paper";
   openedAt: string;
   /** How many entries there are here, and the digest of the last. */
   length: number;

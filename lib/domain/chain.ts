@@ -5,27 +5,52 @@ import { canonicalText } from "./json";
 /** When an entry was made: wall clock, monotonic clock within its epoch, and active walking time. */
 export type Stamp = Pick<Entry, "at" | "elapsedMs" | "monoMs" | "monoEpoch">;
 
-/** What a clock says now. `monoMs` counts within `monoEpoch` (a page load or wake) and never runs back there. */
+/**
+ * What a clock says now. `monoMs` counts within `monoEpoch` (a page load or wake) and never runs back there;
+ * `epochMonoMs` is where the epoch began.
+ */
 export interface ClockReading {
   wallMs: number;
   monoMs: number;
   monoEpoch: string;
+  epochMonoMs?: number;
 }
 
 /**
  * Stamps the next entry of a walk. Active time goes on from the last entry while its epoch lasts; in a new epoch it
- * goes on from the moment the walk was taken up again, so that time with the phone dead is not walking time.
+ * goes on from the moment the walk was taken up again, so that time with the phone dead is not walking time, and
+ * nothing counts after a pause.
  * @param last the walk's last entry, or null for the first
- * @param takenUpMonoMs the monotonic time at which this page opened or took up the walk
+ * @param takenUpMonoMs the monotonic time at which this page opened, took up or resumed the walk
  */
-export function stamp(now: ClockReading, last: Stamp | null, takenUpMonoMs: number): Stamp {
-  const sinceMs = last?.monoEpoch === now.monoEpoch ? last.monoMs : takenUpMonoMs;
+export function stamp(
+  now: ClockReading,
+  last: (Stamp & Partial<Pick<Entry, "type">>) | null,
+  takenUpMonoMs: number,
+): Stamp {
+  const inEpoch = last?.monoEpoch === now.monoEpoch;
+  const sinceMs = inEpoch ? last.monoMs : Math.max(takenUpMonoMs, now.epochMonoMs ?? 0);
+  const activeMs = last?.type === "pause" ? 0 : Math.max(0, Math.round(now.monoMs - sinceMs));
   return {
     at: new Date(now.wallMs).toISOString(),
-    elapsedMs: (last?.elapsedMs ?? 0) + Math.max(0, Math.round(now.monoMs - sinceMs)),
+    elapsedMs: (last?.elapsedMs ?? 0) + activeMs,
     monoMs: Math.round(now.monoMs),
     monoEpoch: now.monoEpoch,
   };
+}
+
+/** How far the two clocks may drift apart between entries before one of them is taken to have jumped. */
+const DRIFT_MS = 2_000;
+
+/**
+ * How far each clock moved since the last entry, where they disagree by more than a drift: someone, or the network,
+ * set the wall clock. Across epochs only a wall clock that ran backwards shows.
+ */
+export function clockJump(now: ClockReading, last: Stamp): { wallMs: number; monoMs: number } | null {
+  const wallMs = now.wallMs - Date.parse(last.at);
+  if (last.monoEpoch !== now.monoEpoch) return wallMs < -DRIFT_MS ? { wallMs, monoMs: 0 } : null;
+  const monoMs = Math.round(now.monoMs - last.monoMs);
+  return Math.abs(wallMs - monoMs) > DRIFT_MS ? { wallMs, monoMs } : null;
 }
 
 /**

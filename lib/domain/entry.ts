@@ -51,18 +51,20 @@ const markShape = z.looseObject({
   note: z.optional(wordsShape),
 });
 
+const photoShape = z.looseObject({
+  check: z.optional(keyShape),
+  sha256: digestShape,
+  bytes: countShape,
+  mime: keyShape,
+});
+
 const closeShape = z.looseObject({ verdict: z.enum(verdicts), marks: countShape, faults: countShape });
 
 /** The bodies whose meaning this version knows; an entry of any other type is kept and ignored on replay. */
 const bodyShapes = {
   open: openShape,
   mark: markShape,
-  photo: z.looseObject({
-    check: z.optional(keyShape),
-    sha256: digestShape,
-    bytes: countShape,
-    mime: keyShape,
-  }),
+  photo: photoShape,
   note: z.looseObject({ text: wordsShape }),
   pause: z.looseObject({}),
   resume: z.looseObject({ again: z.array(keyShape) }),
@@ -73,8 +75,10 @@ const bodyShapes = {
 
 export type OpenBody = z.infer<typeof openShape>;
 export type MarkBody = z.infer<typeof markShape>;
+export type PhotoBody = z.infer<typeof photoShape>;
 export type CloseBody = z.infer<typeof closeShape>;
 type KnownType = keyof typeof bodyShapes;
+type BodyOf<T extends KnownType> = z.infer<(typeof bodyShapes)[T]>;
 
 /** What every entry has, whatever its type and version. */
 export const entryShape = z.looseObject({
@@ -100,12 +104,8 @@ export interface Link {
 }
 
 /** An entry's body if the entry is of this type, else null. The entry must have come through {@link readEntry}. */
-export function bodyOf(entry: Entry, type: "open"): OpenBody | null;
-export function bodyOf(entry: Entry, type: "mark"): MarkBody | null;
-export function bodyOf(entry: Entry, type: "close"): CloseBody | null;
-export function bodyOf(entry: Entry, type: "resume"): { again: string[] } | null;
-export function bodyOf(entry: Entry, type: KnownType): unknown {
-  return entry.type === type ? entry.body : null;
+export function bodyOf<T extends KnownType>(entry: Entry, type: T): BodyOf<T> | null {
+  return entry.type === type ? (entry.body as BodyOf<T>) : null;
 }
 
 /**

@@ -1,4 +1,5 @@
-import { bodyOf, type Entry, type MarkBody, type OpenBody, type Verdict } from "./entry";
+import { bodyOf, type Entry, type MarkBody, type OpenBody, type PhotoBody, type Verdict } from "./entry";
+import { cabinMarks } from "./interruption";
 import { checksOf, type RevisionDocument } from "./revision";
 
 /** The mark that counts for a check, and when it was made. */
@@ -10,7 +11,7 @@ export interface CountingMark extends MarkBody {
 /** What a walk's entries add up to. */
 export interface Replay {
   open: OpenBody | null;
-  /** The last mark of each check of the revision that no later `resume` voided. */
+  /** The last mark of each check of the revision that no later `resume` voided, the one marked last at the end. */
   marks: ReadonlyMap<string, CountingMark>;
   closed: boolean;
   verdict: Verdict;
@@ -18,6 +19,11 @@ export interface Replay {
   counts: { marks: number; faults: number };
   /** Active walking time at the last entry, in milliseconds. */
   elapsedMs: number;
+  /** Checks last seen at fault, whatever was voided or not seen since: calling a hold among them good needs a reason. */
+  faulted: ReadonlySet<string>;
+  /** Nobody has been in the car since the cabin was last marked: someone said so. */
+  carUntouched: boolean;
+  photos: readonly PhotoBody[];
 }
 
 /**
@@ -30,13 +36,25 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
   let open: OpenBody | null = null;
   let closed = false;
   let elapsedMs = 0;
+  const faulted = new Set<string>();
+  const photos: PhotoBody[] = [];
+  let carUntouched = false;
   for (const entry of entries) {
     elapsedMs = entry.elapsedMs;
     open ??= bodyOf(entry, "open");
     closed ||= entry.type === "close";
-    for (const key of bodyOf(entry, "resume")?.again ?? []) marks.delete(key);
+    const resume = bodyOf(entry, "resume");
+    for (const key of resume?.again ?? []) marks.delete(key);
+    if (resume && "car" in resume) carUntouched = resume.car === "untouched";
+    const photo = bodyOf(entry, "photo");
+    if (photo) photos.push(photo);
     const mark = bodyOf(entry, "mark");
-    if (mark && checks.has(mark.check)) marks.set(mark.check, { ...mark, at: entry.at, elapsedMs });
+    if (!mark || !checks.has(mark.check)) continue;
+    marks.delete(mark.check);
+    marks.set(mark.check, { ...mark, at: entry.at, elapsedMs });
+    if (mark.outcome === "fault") faulted.add(mark.check);
+    if (mark.outcome === "good" || mark.outcome === "absent") faulted.delete(mark.check);
+    if (cabinMarks(document, [mark.check]).length > 0) carUntouched = false;
   }
   const faults = [...marks.values()].filter((mark) => mark.outcome === "fault").length;
   return {
@@ -46,6 +64,9 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
     verdict: verdictOf(document, open, marks),
     counts: { marks: marks.size, faults },
     elapsedMs,
+    faulted,
+    carUntouched,
+    photos,
   };
 }
 

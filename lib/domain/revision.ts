@@ -39,10 +39,25 @@ export type DrawnState = (typeof drawnStates)[number];
 
 export const effects = ["hold", "fix"] as const;
 
-/** One thing to look at: what is asked, how to look, why it matters and what a fault does. */
+/**
+ * What a check's value is measured in. `unit` is the one it is kept in; a person enters it in theirs. `beside` is what
+ * the sheet or the vehicle says of it, shown beside what was entered and never decided by.
+ */
+export const measureShape = z.looseObject({
+  quantity: z.enum(["pressure", "length", "voltage"]),
+  unit: z.enum(["kPa", "mm", "V"]),
+  ask: z.string(),
+  beside: z.optional(z.string()),
+});
+export type Measure = z.infer<typeof measureShape>;
+
+/**
+ * One thing to look at: what is asked, how to look, why it matters and what a fault does. `who` says who may mend it,
+ * `touches` names the checks that mending it can change.
+ */
 export const checkShape = z.looseObject({
   key: z.string().check(z.minLength(1)),
-  kind: z.enum(["look", "lamps"]),
+  kind: z.enum(["look", "lamps", "brake-idle"]),
   part: z.enum(partKeys),
   side: z.optional(z.enum(["left", "right"])),
   drawn: z.optional(z.enum(drawnStates)),
@@ -53,6 +68,9 @@ export const checkShape = z.looseObject({
   effect: z.enum(effects),
   mayBeAbsent: z.boolean(),
   caution: z.optional(z.string()),
+  who: z.optional(z.string()),
+  touches: z.optional(z.array(z.string())),
+  measure: z.optional(measureShape),
 });
 export type Check = z.infer<typeof checkShape>;
 

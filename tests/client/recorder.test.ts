@@ -85,23 +85,74 @@ describe("a walk recorded on a phone", () => {
     expect(recorder.view().walk.verdict).toBe("hold");
   });
 
-  test("time with the phone dead is not walking time", async () => {
+  test("time with the phone dead, and time before going on, is not walking time", async () => {
     const now = clock();
+    const pass = (ms: number) => Object.assign(now, { wallMs: now.wallMs + ms, monoMs: now.monoMs + ms });
     const at = await ground(now);
     const before = await Recorder.open(at, rig, hookUp);
-    now.monoMs += 60_000;
+    pass(60_000);
     await before.mark("pin", "good");
 
     Object.assign(now, { wallMs: now.wallMs + 3_600_000, monoMs: 200, monoEpoch: "second load" });
     const after = (await Recorder.takeUp(at, before.view().walk.id))!;
-    expect(after.view().replay).toEqual(before.view().replay);
+    expect(after.view()).toMatchObject({
+      replay: before.view().replay,
+      interruption: { kind: "left", awayMs: 3_600_000 },
+    });
+    pass(4_000);
     expect(after.elapsedMs()).toBe(60_000);
-    now.monoMs += 4_000;
+    await after.resume(["pin"]);
+    expect(after.view()).toMatchObject({ interruption: null, replay: { counts: { marks: 0 } } });
+    pass(3_000);
     await after.mark("cables", "good");
-    now.monoMs += 3_000;
-    expect(after.elapsedMs()).toBe(67_000);
-    const last = (await at.shelf.links(after.view().walk.id)).at(-1)!.entry;
-    expect(last).toMatchObject({ elapsedMs: 64_000, monoMs: 4_200, monoEpoch: "second load" });
+    pass(2_000);
+    expect(after.elapsedMs()).toBe(65_000);
+    const links = await at.shelf.links(after.view().walk.id);
+    expect(links.map(({ entry }) => [entry.type, entry.elapsedMs, entry.monoEpoch])).toEqual([
+      ["open", 0, expect.any(String)],
+      ["mark", 60_000, expect.any(String)],
+      ["resume", 60_000, "second load"],
+      ["mark", 63_000, "second load"],
+    ]);
+  });
+
+  test("a pause stops the time until the walk is resumed", async () => {
+    const now = clock();
+    const pass = (ms: number) => Object.assign(now, { wallMs: now.wallMs + ms, monoMs: now.monoMs + ms });
+    const recorder = await Recorder.open(await ground(now), rig, hookUp);
+    pass(10_000);
+    await recorder.pause();
+    expect(recorder.view().interruption).toEqual({ kind: "paused", awayMs: 0 });
+    pass(600_000);
+    expect(recorder.elapsedMs()).toBe(10_000);
+    await recorder.resume([]);
+    pass(5_000);
+    expect(recorder.elapsedMs()).toBe(15_000);
+  });
+
+  test("a clock that was set is recorded before the mark", async () => {
+    const now = clock();
+    const at = await ground(now);
+    const recorder = await Recorder.open(at, rig, hookUp);
+    Object.assign(now, { wallMs: now.wallMs - 3_590_000, monoMs: now.monoMs + 10_000 });
+    await recorder.mark("pin", "good");
+    const links = await at.shelf.links(recorder.view().walk.id);
+    expect(links.map(({ entry }) => [entry.type, entry.body])).toEqual([
+      ["open", expect.anything()],
+      ["disturbed", { wallMs: -3_590_000, monoMs: 10_000 }],
+      ["mark", { check: "pin", outcome: "good" }],
+    ]);
+    expect(recorder.view().replay.elapsedMs).toBe(10_000);
+  });
+
+  test("a walk from paper keeps no time", async () => {
+    const now = clock();
+    const at = await ground(now);
+    const recorder = await Recorder.open(at, rig, { ...hookUp, source: "paper" });
+    Object.assign(now, { wallMs: now.wallMs + 60_000, monoMs: now.monoMs + 60_000 });
+    await recorder.mark("pin", "good");
+    expect(recorder.elapsedMs()).toBe(0);
+    expect(recorder.view().replay).toMatchObject({ elapsedMs: 0, open: { source: "paper" } });
   });
 
   test("a second writer cannot write over the first", async () => {

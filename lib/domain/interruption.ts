@@ -1,0 +1,113 @@
+import type { Entry, Purpose, Depth } from "./entry";
+import { checksOf, walkChecks, type RevisionDocument } from "./revision";
+
+/** How long a walk may lie still with the phone away before it counts as left. Our own rule: no figure is published. */
+export const LEFT_MS = 10 * 60_000;
+
+/** How many marks are asked again when a walk goes on. */
+const ASKED_AGAIN = 2;
+
+/**
+ * Why a walk does not simply go on: someone paused it, or it was left (the page was gone, or the phone was away too
+ * long). `awayMs` is null where the clocks cannot tell.
+ */
+export interface Interruption {
+  kind: "paused" | "left";
+  awayMs: number | null;
+}
+
+/**
+ * Whether a walk that is taken up, or looked at again, was interrupted.
+ * @param last its last entry
+ * @param marked whether any check has a mark
+ * @param returned `load` on a new page; else how long the page was out of sight, in milliseconds
+ * @param wallMs the wall clock now
+ */
+export function interruptionOf(
+  last: Pick<Entry, "type" | "at">,
+  marked: boolean,
+  returned: "load" | number,
+  wallMs: number,
+): Interruption | null {
+  const sinceMs = wallMs - Date.parse(last.at);
+  const awayMs = sinceMs >= 0 ? sinceMs : null;
+  if (last.type === "pause") return { kind: "paused", awayMs };
+  if (!marked || last.type === "close") return null;
+  if (returned !== "load" && returned < LEFT_MS) return null;
+  return { kind: "left", awayMs };
+}
+
+/**
+ * The checks to ask again when an interrupted walk goes on: the two marked last, the one that was about to be asked
+ * being asked anyway, and all of the cabin where someone may have been in the car.
+ * @param markedInOrder keys with a counting mark, the one marked first at the front
+ */
+export function againAfterBreak(
+  document: RevisionDocument,
+  markedInOrder: readonly string[],
+  carEntered: boolean,
+): string[] {
+  const again = new Set(markedInOrder.slice(-ASKED_AGAIN));
+  if (carEntered) for (const key of cabinMarks(document, markedInOrder)) again.add(key);
+  return inListOrder(document, again);
+}
+
+/**
+ * The checks to ask again after a fault was mended: the check itself, what mending it can change, and the look at
+ * every joint at the end. What cannot have changed keeps its mark.
+ * @param mended keys of the checks that were mended
+ * @param markedInOrder keys with a counting mark
+ */
+export function againAfterMending(
+  document: RevisionDocument,
+  mended: readonly string[],
+  markedInOrder: readonly string[],
+  carEntered: boolean,
+): string[] {
+  const checks = checksOf(document);
+  const again = new Set(mended);
+  for (const key of mended) for (const touched of checks.get(key)?.touches ?? []) again.add(touched);
+  for (const key of stationKeysOf(document, "last-look")) {
+    if (checks.get(key)?.effect === "hold") again.add(key);
+  }
+  if (carEntered) for (const key of cabinMarks(document, markedInOrder)) again.add(key);
+  const marked = new Set(markedInOrder);
+  return inListOrder(
+    document,
+    [...again].filter((key) => marked.has(key)),
+  );
+}
+
+/** The marked checks that are made in the car's cabin. */
+export function cabinMarks(document: RevisionDocument, marked: readonly string[]): string[] {
+  const cabin = new Set(stationKeysOf(document, "car-cabin"));
+  return marked.filter((key) => cabin.has(key));
+}
+
+/**
+ * Whether this is the moment to ask if anyone has been in the car: the cabin is marked, its last answer is older than
+ * that mark, and the check to come is the first of the last look.
+ */
+export function asksAboutCar(
+  document: RevisionDocument,
+  walk: { purpose: Purpose; depth: Depth },
+  marked: readonly string[],
+  answered: boolean,
+  next: string | null,
+): boolean {
+  if (answered || cabinMarks(document, marked).length === 0) return false;
+  return walkChecks(document, walk.purpose, walk.depth).some(
+    ({ station, check }) => check.key === next && station.key === "last-look",
+  );
+}
+
+function stationKeysOf(document: RevisionDocument, station: string): string[] {
+  return document.list.stations
+    .filter(({ key }) => key === station)
+    .flatMap(({ checks }) => checks.map(({ key }) => key));
+}
+
+function inListOrder(document: RevisionDocument, keys: Iterable<string>): string[] {
+  const wanted = new Set(keys);
+  return [...checksOf(document).keys()].filter((key) => wanted.has(key));
+}
