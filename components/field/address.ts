@@ -1,12 +1,19 @@
 import { useSyncExternalStore } from "react";
 
-/** Where in the field wing someone is. `at` is a check's key, or "close" for the closing screen. */
+/** Where in the field wing someone is. `at` is a check's key, or one of the places below. */
 export interface Address {
   walk: string | null;
   at: string | null;
+  /** The rig whose paper cards show. */
+  paper: string | null;
 }
 
+/** Where a walk is stopped or closed. */
 export const CLOSING = "close";
+/** Where a walk is called off, with the reason. */
+export const CALL_OFF = "call-off";
+/** The stations of a walk. */
+export const PLAN = "plan";
 
 const listeners = new Set<() => void>();
 
@@ -20,15 +27,23 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** The wing's own path for an address: one document, ids in the query string. */
-export function hrefOf({ walk, at }: Partial<Address>): string {
-  const query = new URLSearchParams({ ...(walk && { walk }), ...(walk && at && { at }) }).toString();
+export function hrefOf({ walk, at, paper }: Partial<Address>): string {
+  const query = new URLSearchParams({
+    ...(walk && { walk }),
+    ...(walk && at && { at }),
+    ...(!walk && paper && { paper }),
+  }).toString();
   return query ? `/field?${query}` : "/field";
 }
 
 /** The address that a query string says. */
 export function addressOf(search: string): Address {
   const query = new URLSearchParams(search);
-  return { walk: query.get("walk") || null, at: query.get("at") || null };
+  return {
+    walk: query.get("walk") || null,
+    at: query.get("at") || null,
+    paper: query.get("paper") || null,
+  };
 }
 
 /** The query string now; the empty one while the page is prerendered. */

@@ -19,7 +19,7 @@ export function BecauseQuestion({ marking }: { marking: Marking }) {
     event.preventDefault();
     const because = fixedBecause(text);
     setEmpty(because === null);
-    if (because) void marking.mark("good", because);
+    if (because) void marking.mark("good", { because });
   };
 
   return (
@@ -34,7 +34,7 @@ export function BecauseQuestion({ marking }: { marking: Marking }) {
               <Button
                 key={quick}
                 className="min-w-25 flex-1"
-                onClick={() => marking.mark("good", fixedBecause(quick) ?? undefined)}
+                onClick={() => marking.mark("good", { because: fixedBecause(quick)! })}
               >
                 {quick}
               </Button>
@@ -61,7 +61,7 @@ export function BecauseQuestion({ marking }: { marking: Marking }) {
         <div className="flex flex-wrap gap-2.5">
           <Button
             className="min-h-primary min-w-[min(100%,9rem)] flex-1 text-xl"
-            onClick={() => marking.mark("good", "mis-tap")}
+            onClick={() => marking.mark("good", { because: "mis-tap" })}
           >
             {words.misTap}
           </Button>

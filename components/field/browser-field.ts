@@ -1,8 +1,9 @@
 import { useSyncExternalStore } from "react";
 import { Field, type HeldWalk } from "@/lib/client/field";
 import type { SyncView } from "@/lib/client/sync";
-import type { Purpose } from "@/lib/domain/entry";
+import type { WalkPlan } from "@/lib/client/recorder";
 import type { BundleRig } from "@/lib/domain/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
 
 let field: Field | null = null;
 
@@ -36,11 +37,22 @@ type Held = HeldWalk | "elsewhere" | null;
 let held: { walk: string; hold: Promise<Held> } | null = null;
 
 /** Starts a walk and holds it. Resolves to its id once it is saved on this phone. */
-export async function startWalk(rig: BundleRig, member: string, purpose: Purpose): Promise<string> {
+export async function startWalk(rig: BundleRig, plan: WalkPlan): Promise<string> {
   letGo();
-  const opened = await theField().open(rig, member, purpose, "full");
+  const opened = await theField().open(rig, plan);
   const walk = opened.recorder.view().walk.id;
   held = { walk, hold: Promise.resolve(opened) };
+  return walk;
+}
+
+/** Starts to enter a card that was filled in by hand; `when` is what the card says of its time, or nothing. */
+export async function startPaperWalk(rig: BundleRig, plan: WalkPlan, when: string): Promise<string> {
+  const walk = await startWalk(rig, { ...plan, source: "paper" });
+  const { noteOf, noteUnknown } = walkingWords.paper;
+  const hold = await held?.hold;
+  if (hold && hold !== "elsewhere") {
+    await hold.recorder.note(when ? noteOf(when.replace("T", " ")) : noteUnknown);
+  }
   return walk;
 }
 

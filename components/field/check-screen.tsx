@@ -1,18 +1,21 @@
 import { PartDrawing } from "@/components/drawings/part-drawing";
-import { RigPlan } from "@/components/drawings/rig-plan";
 import type { Recorder, WalkView } from "@/lib/client/recorder";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { CLOSING, moveTo } from "./address";
 import { BecauseQuestion } from "./because-question";
+import { useCallouts } from "./callouts";
 import { CheckWords } from "./check-words";
+import { FaultDetails } from "./fault-details";
 import { MarkButtons } from "./mark-buttons";
 import { useMarking } from "./marking";
+import { MeasureQuestion } from "./measure-question";
 import { useScreenTitle } from "./screen-title";
+import { StopButton } from "./stop-button";
 import { Trouble } from "./trouble";
 import { WalkFrame } from "./walk-frame";
 import { WalkHead } from "./walk-head";
 import type { Step } from "./walk-plan";
+import { WalkPlace } from "./walk-place";
 import { WalkStrip } from "./walk-strip";
 import { WalkTimer } from "./walk-timer";
 
@@ -30,7 +33,9 @@ type CheckScreenProps = {
 export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenProps) {
   const { check, station, place } = step;
   const asDrawn = check.drawn !== "place";
+  const mark = view.replay.marks.get(check.key);
   const marking = useMarking(recorder, steps, step);
+  const callouts = useCallouts(check, marking, mark?.note);
   useScreenTitle(words.title(walk.purpose, walk.rigName));
   return (
     <WalkFrame
@@ -38,38 +43,30 @@ export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenPr
         <WalkHead
           walk={walk}
           figure={<WalkTimer elapsedMs={recorder.elapsedMs} />}
-          control={
-            <button
-              type="button"
-              className="-my-6 min-h-field px-4 leading-none underline decoration-2 underline-offset-4"
-              onClick={() => moveTo({ walk: walk.id, at: CLOSING })}
-            >
-              {words.close}
-            </button>
-          }
+          control={<StopButton walk={walk.id} />}
         />
       }
       strip={<WalkStrip view={view} now={check.key} />}
-      where={
-        <div className="flex flex-wrap items-center justify-between gap-x-2.5 px-4 py-1.5 text-base">
-          <p className="min-w-0 font-extrabold">{station.title}</p>
-          <RigPlan station={station.key} />
-          <p className="tabular">{words.place(place, steps.length)}</p>
-        </div>
-      }
+      where={<WalkPlace walk={walk.id} step={step} total={steps.length} />}
       picture={
         <div
           className={`absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full ${asDrawn ? "" : "[&_.dr-callout]:hidden"}`}
         >
-          <PartDrawing part={check.part} side={check.side} drawn={check.drawn} />
+          <PartDrawing
+            part={check.part}
+            side={check.side}
+            drawn={check.drawn}
+            onCallout={asDrawn ? callouts.touch : undefined}
+          />
         </div>
       }
       words={
         <CheckWords
           check={check}
-          mark={view.replay.marks.get(check.key)?.outcome}
+          mark={mark}
           asking={marking.asking !== null}
           onKeep={marking.skip}
+          onDetails={() => marking.ask("details")}
         />
       }
       acts={
@@ -78,10 +75,15 @@ export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenPr
             {words.announce(marking.saved, station.title, place, steps.length)}
           </p>
           {marking.trouble && <Trouble>{marking.trouble}</Trouble>}
-          {marking.asking ? (
-            <BecauseQuestion marking={marking} />
-          ) : (
+          {marking.asking === null && (
             <MarkButtons check={check} asDrawn={asDrawn} first={place === 1} marking={marking} />
+          )}
+          {(marking.asking === "why" || marking.asking === "what") && <BecauseQuestion marking={marking} />}
+          {marking.asking === "details" && (
+            <FaultDetails check={check} asDrawn={asDrawn} callouts={callouts} marking={marking} />
+          )}
+          {marking.asking === "measure" && check.measure && (
+            <MeasureQuestion measure={check.measure} marking={marking} />
           )}
         </>
       }

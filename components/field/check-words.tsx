@@ -1,21 +1,23 @@
 import { useEffect, useRef } from "react";
 import { Notice } from "@/components/ui/notice";
 import { Button } from "@/components/ui/button";
-import type { Outcome } from "@/lib/domain/entry";
+import type { MarkBody } from "@/lib/domain/entry";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
 import { segmentOf } from "@/lib/domain/walk-reading";
 
 type CheckWordsProps = {
   check: Check;
-  mark: Outcome | undefined;
+  mark: MarkBody | undefined;
   /** While a question stands below, the focus is there. */
   asking: boolean;
   onKeep: () => void;
+  onDetails: () => void;
 };
 
 /** What a check asks, how to look, what can happen, and the mark that it has already. */
-export function CheckWords({ check, mark, asking, onKeep }: CheckWordsProps) {
+export function CheckWords({ check, mark, asking, onKeep, onDetails }: CheckWordsProps) {
   const ask = useRef<HTMLHeadingElement>(null);
   useEffect(() => {
     if (!asking) ask.current?.focus({ preventScroll: true });
@@ -29,22 +31,35 @@ export function CheckWords({ check, mark, asking, onKeep }: CheckWordsProps) {
       >
         {check.ask}
       </h2>
-      <p className="px-4 pt-1 text-soft md:text-xl">{check.how}</p>
+      {!asking && <p className="px-4 pt-1 text-soft md:text-xl">{check.how}</p>}
       {mark && !asking && (
         <div className="flex flex-wrap items-center gap-x-3 px-4 pt-2">
           <span aria-hidden="true" className="tape flex h-6.5 w-4">
-            <span className={`tape-seg tape-${segmentOf(check, mark)}`} />
+            <span className={`tape-seg tape-${segmentOf(check, mark.outcome)}`} />
           </span>
-          <p className="font-semibold">{fieldWords.walk.marked(mark)}</p>
+          <p className="min-w-0 flex-1 font-semibold">
+            {fieldWords.walk.marked(mark.outcome)}
+            {mark.note && <span className="block text-base font-normal text-soft">{mark.note}</span>}
+            {mark.measured?.entered && (
+              <span className="block text-base font-normal text-soft">
+                {walkingWords.measure.read(String(mark.measured.entered.value), mark.measured.entered.unit)}
+              </span>
+            )}
+          </p>
+          {mark.outcome === "fault" && (
+            <Button variant="quiet" onClick={onDetails}>
+              {walkingWords.details.more}
+            </Button>
+          )}
           <Button variant="quiet" className="ml-auto" onClick={onKeep}>
             {fieldWords.walk.keep}
           </Button>
         </div>
       )}
-      {check.why && (
+      {check.why && !asking && (
         <p className="mx-4 mt-5 hidden border-t-hair border-rule pt-4 text-soft md:block">{check.why}</p>
       )}
-      {check.caution && (
+      {check.caution && !asking && (
         <div className="pt-3">
           <Notice>{check.caution}</Notice>
         </div>

@@ -1,13 +1,14 @@
-import { useRef, useState } from "react";
+import { useRef } from "react";
 import { Button, buttonClass } from "@/components/ui/button";
 import type { Recorder, WalkView } from "@/lib/client/recorder";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { moveTo } from "./address";
+import { CALL_OFF, goTo, moveTo } from "./address";
 import { useArrival, useScreenTitle } from "./screen-title";
 import { BottomBar } from "./bottom-bar";
 import { isSecondTap } from "./settling";
 import { StepList } from "./step-list";
+import { useTaking } from "./taking";
 import { Trouble } from "./trouble";
 import { VerdictMark } from "./verdict-mark";
 import { WalkHead } from "./walk-head";
@@ -20,25 +21,26 @@ const words = fieldWords.closing;
 
 type ClosingScreenProps = { recorder: Recorder; view: WalkView; walk: KeptWalk; steps: readonly Step[] };
 
-/** The end of a walk, or an early stop: what was looked at, what is left, and the signature. */
+/** The end of a walk, or a stop on the way: what was looked at, what is left, and the signature or a pause. */
 export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProps) {
   const { marks, verdict } = view.replay;
   const tally = tallyOf(view.document, steps, marks);
   const heading = useRef<HTMLHeadingElement>(null);
-  const [trouble, setTrouble] = useState(false);
+  const { take, trouble } = useTaking();
   useScreenTitle(fieldWords.walk.title(walk.purpose, walk.rigName));
   useArrival(heading, "closing");
 
   const show = (step: Step) => !isSecondTap() && moveTo({ walk: walk.id, at: step.check.key });
-  const close = async () => {
-    if (isSecondTap()) return;
-    try {
+  const close = () =>
+    take(async () => {
       await recorder.close();
       moveTo({ walk: walk.id });
-    } catch {
-      setTrouble(true);
-    }
-  };
+    });
+  const pause = () =>
+    take(async () => {
+      await recorder.pause();
+      goTo({});
+    });
   const onward = nextStep(steps, marks, null);
 
   return (
@@ -67,20 +69,35 @@ export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProp
       </div>
       <BottomBar
         height="tall"
-        className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,max(8.5rem,40%)),1fr))] gap-2.5 px-3 md:col-start-2 md:row-start-3 md:self-end md:border-0"
+        className="acts-two px-3 md:col-start-2 md:row-start-3 md:self-end md:border-0"
       >
         {trouble && (
           <div className="col-span-full">
-            <Trouble>{words.notSaved}</Trouble>
+            <Trouble>{trouble}</Trouble>
           </div>
         )}
-        <Button variant="good" hint={words.final} className="col-span-full text-[1.75rem]" onClick={close}>
-          {words.closeAndSign}
-        </Button>
-        <Button variant="quiet" onClick={() => show(onward ?? steps.at(-1)!)}>
-          {onward ? words.goOn : words.lastCheck}
-        </Button>
-        <WingLink className={buttonClass("quiet")}>{words.leave}</WingLink>
+        {onward ? (
+          <Button variant="good" className="col-span-full" onClick={() => show(onward)}>
+            {words.goOn}
+          </Button>
+        ) : (
+          <Button variant="good" hint={words.final} className="col-span-full text-[1.75rem]" onClick={close}>
+            {words.closeAndSign}
+          </Button>
+        )}
+        {walk.source !== "paper" && (
+          <Button hint={words.pauseHint} onClick={pause}>
+            {words.pause}
+          </Button>
+        )}
+        {onward ? (
+          <Button onClick={() => moveTo({ walk: walk.id, at: CALL_OFF })}>{words.callOff}</Button>
+        ) : (
+          <Button variant="quiet" onClick={() => show(steps.at(-1)!)}>
+            {words.lastCheck}
+          </Button>
+        )}
+        <WingLink className={`${buttonClass("quiet")} col-span-full`}>{words.leave}</WingLink>
       </BottomBar>
     </main>
   );

@@ -6,12 +6,13 @@ import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
 import { RigsScreen } from "./rigs-screen";
+import { PaperScreen } from "./paper-screen";
 import { WalkScreen } from "./walk-screen";
 
 /** The field wing: everything that works with no network, on one static page. */
 export function FieldWing() {
   const sync = useSyncView();
-  const { walk, at } = addressOf(useSearch());
+  const { walk, at, paper } = addressOf(useSearch());
 
   useEffect(() => {
     void registerWorker();
@@ -20,5 +21,7 @@ export function FieldWing() {
   useEffect(() => followTaps(), []);
   useEffect(() => letGo(walk), [walk]);
 
-  return walk ? <WalkScreen key={walk} sync={sync} walk={walk} at={at} /> : <RigsScreen sync={sync} />;
+  if (walk) return <WalkScreen key={walk} sync={sync} walk={walk} at={at} />;
+  if (paper) return <PaperScreen sync={sync} rig={paper} />;
+  return <RigsScreen sync={sync} />;
 }

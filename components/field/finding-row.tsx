@@ -1,11 +1,15 @@
 import { PartDrawing } from "@/components/drawings/part-drawing";
+import type { MarkBody } from "@/lib/domain/entry";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
 
-type FindingRowProps = { check: Check; absent?: boolean };
+const words = walkingWords.held;
 
-/** A fault with its part, what was asked of it and how it is put right. */
-export function FindingRow({ check, absent = false }: FindingRowProps) {
+type FindingRowProps = { check: Check; absent?: boolean; mark: MarkBody | undefined };
+
+/** A fault with its part, what was seen, how it is put right and who may do that. */
+export function FindingRow({ check, absent = false, mark }: FindingRowProps) {
   return (
     <li className="grid grid-cols-[min(5.5rem,25vw)_minmax(0,1fr)] gap-x-3.5 border-b-hair border-rule px-4 py-3.5 md:grid-cols-[8rem_minmax(0,1fr)]">
       <div aria-hidden="true">
@@ -13,9 +17,15 @@ export function FindingRow({ check, absent = false }: FindingRowProps) {
       </div>
       <div>
         <h4 className="text-xl leading-tight font-extrabold">{check.ask}</h4>
+        {mark?.note && <p className="mt-1 font-semibold">{words.seen(mark.note)}</p>}
         <p className="mt-1 text-[1.0625rem] text-soft">
           {absent ? fieldWords.result.markedAbsent : check.mend}
         </p>
+        {!absent && (
+          <p className="mt-1 text-[1.0625rem] text-soft">
+            <span className="font-semibold text-ink">{words.who}:</span> {check.who ?? words.whoUsual}
+          </p>
+        )}
       </div>
     </li>
   );

@@ -1,21 +1,26 @@
 import { useLayoutEffect, useRef, useState } from "react";
 import type { Recorder } from "@/lib/client/recorder";
-import { MovedOn } from "@/lib/client/walk-shelf";
-import type { Outcome } from "@/lib/domain/entry";
-import { fieldWords } from "@/lib/domain/messages/field";
+import type { MarkBody, Outcome } from "@/lib/domain/entry";
 import { CLOSING, moveTo } from "./address";
 import { useSettled } from "./settling";
+import { troubleOf } from "./taking";
 import { needsReason, nextStep, stepBefore, type Step } from "./walk-plan";
 
-export type Question = "why" | "what";
+/**
+ * What stands in place of the buttons: why a hold at fault is good now, what was done about it, what is wrong with a
+ * check that was just marked fault, or what a gauge reads.
+ */
+export type Question = "why" | "what" | "details" | "measure";
 
 /** What the buttons under a check do, and what came of it. */
 export interface Marking {
-  mark: (outcome: Outcome, because?: string) => Promise<void>;
+  /** Saves a mark, then asks what belongs to it or goes on. */
+  mark: (outcome: Outcome, more?: Partial<MarkBody>) => Promise<void>;
+  /** Saves the mark anew with more in it, and stays. */
+  amend: (more: Partial<MarkBody>) => Promise<void>;
   back: () => void;
   /** Goes on without a new mark. */
   skip: () => void;
-  /** Which question stands in place of the buttons: why a hold at fault is good now, or what was done about it. */
   asking: Question | null;
   ask: (question: Question | null) => void;
   /** The outcome saved last, to be read out with the next check. */
@@ -25,7 +30,8 @@ export interface Marking {
 
 /** Marks one check: saves first, moves on only then, and takes no touch that was meant for what showed before. */
 export function useMarking(recorder: Recorder, steps: readonly Step[], step: Step): Marking {
-  const { key } = step.check;
+  const { check } = step;
+  const { key } = check;
   const [question, setQuestion] = useState<{ at: string; question: Question } | null>(null);
   const [saved, setSaved] = useState<Outcome | null>(null);
   const [trouble, setTrouble] = useState<{ at: string; words: string } | null>(null);
@@ -37,7 +43,7 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   }, [key]);
 
   const walk = recorder.view().walk.id;
-  const marks = () => recorder.view().replay.marks;
+  const state = () => recorder.view().replay;
   const show = (next: Step | null) => {
     setQuestion(null);
     moveTo({ walk, at: next?.check.key ?? CLOSING });
@@ -45,29 +51,50 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   const ask = (next: Question | null) => setQuestion(next && { at: key, question: next });
   const takes = () => settled() && !saving.current;
 
+  /** @returns whether the phone kept it */
+  const save = async (outcome: Outcome, more: Partial<MarkBody>): Promise<boolean> => {
+    saving.current = true;
+    try {
+      await recorder.mark(key, outcome, more);
+    } catch (error) {
+      saving.current = false;
+      setTrouble({ at: key, words: troubleOf(error) });
+      return false;
+    }
+    setTrouble(null);
+    setSaved(outcome);
+    return true;
+  };
+  const stay = (next: Question) => {
+    saving.current = false;
+    ask(next);
+  };
+
   return {
-    async mark(outcome, because) {
+    async mark(outcome, more = {}) {
       if (!takes()) return;
-      if (outcome === "good" && !because && needsReason(step.check, marks())) return ask("why");
-      saving.current = true;
-      try {
-        await recorder.mark(key, outcome, because ? { because } : {});
-      } catch (error) {
-        saving.current = false;
-        const { movedOn, notSaved } = fieldWords.walk;
-        return setTrouble({ at: key, words: error instanceof MovedOn ? movedOn : notSaved });
-      }
-      setTrouble(null);
-      setSaved(outcome);
-      show(nextStep(steps, marks(), key));
+      if (outcome === "good" && !more.because && needsReason(check, state().faulted)) return ask("why");
+      if (!(await save(outcome, more))) return;
+      if (outcome === "fault") return stay("details");
+      if (outcome === "good" && check.measure && !more.measured) return stay("measure");
+      show(nextStep(steps, state().marks, key));
+    },
+    async amend(more) {
+      const mark = state().marks.get(key);
+      if (!mark || saving.current) return;
+      const { outcome, measured, seen, because, note } = mark;
+      const kept = { measured, seen, because, note };
+      const known = Object.entries({ ...kept, ...more }).filter(([, value]) => value !== undefined);
+      await save(outcome, Object.fromEntries(known));
+      saving.current = false;
     },
     back() {
-      const before = stepBefore(steps, key);
+      const before = stepBefore(steps, state().marks, key);
       if (takes() && before) show(before);
       setSaved(null);
     },
     skip() {
-      if (takes()) show(nextStep(steps, marks(), key));
+      if (takes()) show(nextStep(steps, state().marks, key));
       setSaved(null);
     },
     asking,

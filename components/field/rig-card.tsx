@@ -1,18 +1,24 @@
 import { useId, useRef, useState } from "react";
+import { buttonClass } from "@/components/ui/button";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
-import type { Purpose } from "@/lib/domain/entry";
+import type { Depth, Purpose } from "@/lib/domain/entry";
 import type { BundleRig } from "@/lib/domain/field";
 import type { Member } from "@/lib/domain/member";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
+import { stalenessOf } from "@/lib/domain/standing";
 import { goTo } from "./address";
 import { startWalk } from "./browser-field";
 import { GoOn } from "./go-on";
 import { LastVerdict } from "./last-verdict";
+import { useNowMs } from "./now";
 import { OpenFindings } from "./open-findings";
 import { RigPicture } from "./rig-picture";
 import { RigStarts } from "./rig-starts";
-import { lastWalkOf, openWalksOf, purposesFor } from "./rig-state";
+import { lastWalkOf, openWalksOf, purposesFor, usualDepth } from "./rig-state";
+import { Stale } from "./stale";
 import { Trouble } from "./trouble";
+import { WingLink } from "./wing-link";
 
 const words = fieldWords.rigs;
 
@@ -29,13 +35,19 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
   const title = useId();
   const starting = useRef(false);
   const [failed, setFailed] = useState(false);
+  const nowMs = useNowMs();
+  const [chosen, setChosen] = useState<Depth | null>(null);
+  const depth = chosen ?? usualDepth(rig, walks, nowMs);
   const open = openWalksOf(rig.id, walks);
+  const last = lastWalkOf(rig, walks);
+  const stale = last !== null && stalenessOf(last, last.kept?.leftAt ?? null, nowMs) !== null;
+  const purposes = purposesFor(member.organisation.kind);
 
   const start = async (purpose: Purpose) => {
     if (starting.current) return;
     starting.current = true;
     try {
-      goTo({ walk: await startWalk(rig, member.id, purpose) });
+      goTo({ walk: await startWalk(rig, { member: member.id, purpose, depth }) });
     } catch {
       setFailed(true);
     }
@@ -49,7 +61,10 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           <h2 id={title} className="text-[1.75rem] leading-[1.1] font-extrabold tracking-[-0.01em]">
             {rig.name}
           </h2>
-          <LastVerdict last={lastWalkOf(rig, walks)} />
+          <LastVerdict last={last} />
+          <div className="-mx-4">
+            <Stale last={last} kept={last?.kept ?? null} />
+          </div>
           <OpenFindings rig={rig} />
           <div className={`mt-auto max-w-md pt-4 @2xl:block ${alone ? "" : "hidden"}`}>
             <RigPicture />
@@ -63,10 +78,15 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           {open.length > 0 && <p className="px-1 pt-1 text-base text-soft">{words.another}</p>}
           <RigStarts
             rig={rig}
-            purposes={purposesFor(member.organisation.kind)}
+            purposes={stale ? ["re-check", ...purposes.filter((each) => each !== "re-check")] : purposes}
             main={open.length === 0}
+            depth={depth}
+            onDepth={setChosen}
             onStart={start}
           />
+          <WingLink paper={rig.id} className={buttonClass("quiet")}>
+            {walkingWords.paper.open} <span className="sr-only">{words.ofRig(rig.name)}</span>
+          </WingLink>
         </div>
       </div>
     </section>

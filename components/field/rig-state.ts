@@ -1,5 +1,5 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
-import type { Purpose, Verdict } from "@/lib/domain/entry";
+import type { Depth, Purpose, Verdict } from "@/lib/domain/entry";
 import type { BundleRig } from "@/lib/domain/field";
 import type { OrganisationKind } from "@/lib/domain/member";
 
@@ -8,7 +8,7 @@ const daily: readonly Purpose[] = ["hook-up", "re-check", "unhook"];
 const purposesOf: Record<OrganisationKind, readonly Purpose[]> = {
   household: daily,
   shop: [...daily, "delivery"],
-  fleet: [...daily, "yard-out", "yard-in"],
+  fleet: ["yard-out", "yard-in", ...daily],
 };
 
 /** The walks that make sense for an organisation of this kind, the usual one first. */
@@ -36,11 +36,30 @@ export function lastWalkOf(
   };
   const newest = walks.find((walk) => walk.rig === rig.id && walk.verdict !== null);
   if (!newest || (told && (told.id === newest.id || told.at >= newest.openedAt))) return told;
-  const { id, purpose, verdict, openedAt } = newest;
-  return { id, purpose, verdict: verdict!, at: openedAt, kept: newest };
+  return lastOfWalk(newest);
+}
+
+/** A closed walk as the last one of its rig. */
+export function lastOfWalk(kept: KeptWalk): LastWalk | null {
+  const { id, purpose, verdict, openedAt } = kept;
+  return verdict && { id, purpose, verdict, at: openedAt, kept };
 }
 
 /** The walks of a rig that are open on this phone, newest first. */
 export function openWalksOf(rig: string, walks: readonly KeptWalk[]): KeptWalk[] {
   return walks.filter((walk) => walk.rig === rig && walk.seal === null);
+}
+
+/** After so long away even a practised person takes the full list again. Our own rule. */
+const LONG_GAP_MS = 30 * 24 * 60 * 60_000;
+
+/**
+ * How far the next walk of a rig goes unless someone says otherwise: as far as the last one on this phone, but in full
+ * after a long gap, after a walk that did not end in "no hold", and for a list that is new.
+ */
+export function usualDepth(rig: BundleRig, walks: readonly KeptWalk[], nowMs: number): Depth {
+  const last = walks.find((walk) => walk.rig === rig.id && walk.verdict !== null);
+  const recent = last !== undefined && nowMs - Date.parse(last.openedAt) < LONG_GAP_MS;
+  const same = last?.verdict === "no-hold" && last.revision === rig.revision.digest;
+  return recent && same ? last.depth : "full";
 }

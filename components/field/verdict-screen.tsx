@@ -1,16 +1,23 @@
-import { useRef, type ReactNode } from "react";
-import { buttonClass } from "@/components/ui/button";
+import { useRef } from "react";
+import { Button, buttonClass } from "@/components/ui/button";
 import type { WalkView } from "@/lib/client/recorder";
 import type { SyncView } from "@/lib/client/sync";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
 import { clockText } from "@/lib/client/time-words";
+import { goTo } from "./address";
 import { BottomBar } from "./bottom-bar";
+import { startWalk } from "./browser-field";
 import { Custody } from "./custody";
-import { FindingRow } from "./finding-row";
+import { Findings } from "./findings";
 import { OpenFindings } from "./open-findings";
+import { lastOfWalk } from "./rig-state";
 import { useArrival, useScreenTitle } from "./screen-title";
+import { Stale } from "./stale";
 import { StepList } from "./step-list";
+import { useTaking } from "./taking";
+import { Trouble } from "./trouble";
 import { VerdictBand } from "./verdict-band";
 import { WalkHead } from "./walk-head";
 import { stepsOf, tallyOf } from "./walk-plan";
@@ -25,9 +32,16 @@ type VerdictScreenProps = { view: WalkView; walk: KeptWalk; sync: SyncView };
 export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
   const { marks, verdict, elapsedMs } = view.replay;
   const tally = tallyOf(view.document, stepsOf(view.document, walk), marks);
-  const { holds, fixes, unmarked, unseen, lookedAt, total } = tally;
+  const { holds, unmarked, unseen, lookedAt, total } = tally;
   const rig = sync.bundle?.rigs.find(({ id }) => id === walk.rig);
   const heading = useRef<HTMLHeadingElement>(null);
+  const { take, trouble } = useTaking();
+  const walkAgain = () =>
+    take(async () => {
+      if (!rig) return;
+      const plan = { member: walk.member, purpose: walk.purpose, depth: "short" } as const;
+      goTo({ walk: await startWalk(rig, plan) });
+    });
   useScreenTitle(fieldWords.verdict[verdict]);
   useArrival(heading, "verdict");
   return (
@@ -44,20 +58,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
               {words.secure}
             </p>
           )}
-          {holds.length > 0 && (
-            <Findings title={words.holds} quiet>
-              {holds.map(({ check, absent }) => (
-                <FindingRow key={check.key} check={check} absent={absent} />
-              ))}
-            </Findings>
-          )}
-          {fixes.length > 0 && (
-            <Findings title={words.fixes}>
-              {fixes.map((check) => (
-                <FindingRow key={check.key} check={check} />
-              ))}
-            </Findings>
-          )}
+          <Findings tally={tally} marks={marks} />
           {unmarked.length + unseen.length > 0 && (
             <section>
               <h3 className="px-4 pt-4 pb-1.5 font-extrabold">{words.notSeen}</h3>
@@ -75,30 +76,38 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
               <OpenFindings rig={rig} />
             </div>
           )}
-          <p className="px-4 py-4">{words.sentence(verdict, holds.length, lookedAt, total, elapsedMs)}</p>
+          <p className="px-4 py-4">
+            {words.sentence(
+              verdict,
+              holds.length,
+              lookedAt,
+              total,
+              walk.source === "paper" ? null : elapsedMs,
+            )}
+          </p>
+          <Stale last={lastOfWalk(walk)} kept={walk} />
           <p className="px-4 pb-4 text-[0.9375rem] text-soft">{words.deference}</p>
         </div>
         <BottomBar
           height="low"
           className="flex flex-wrap items-center gap-x-4 gap-y-3 px-4 md:mt-0 md:self-start"
         >
+          {trouble && (
+            <div className="basis-full">
+              <Trouble>{trouble}</Trouble>
+            </div>
+          )}
           <div className="min-w-0 flex-[1_1_13rem]">
             <Custody walk={walk} signedOut={sync.signedOut} />
           </div>
+          {verdict === "hold" && rig && (
+            <Button hint={walkingWords.held.walkAgainHint} className="flex-1" onClick={walkAgain}>
+              {walkingWords.held.walkAgain}
+            </Button>
+          )}
           <WingLink className={`${buttonClass("plain")} min-w-29`}>{fieldWords.walk.back}</WingLink>
         </BottomBar>
       </div>
     </main>
-  );
-}
-
-type FindingsProps = { title: string; quiet?: boolean; children: ReactNode };
-
-function Findings({ title, quiet = false, children }: FindingsProps) {
-  return (
-    <section>
-      <h3 className={quiet ? "sr-only" : "px-4 pt-4 pb-1 font-extrabold"}>{title}</h3>
-      <ul>{children}</ul>
-    </section>
   );
 }

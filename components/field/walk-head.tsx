@@ -1,5 +1,6 @@
 import type { ReactNode } from "react";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { walkingWords } from "@/lib/domain/messages/walking";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { recentText } from "@/lib/client/time-words";
 import { useNowMs } from "./now";
@@ -25,7 +26,11 @@ export function WalkHead({ walk, figure, control }: WalkHeadProps) {
         </div>
       </div>
       <div className="text-right">
-        <p className="tabular text-[1.625rem] leading-none font-semibold">{figure}</p>
+        {walk.source === "paper" ? (
+          <p className="leading-none font-semibold">{walkingWords.paper.untimed}</p>
+        ) : (
+          <p className="tabular text-[1.625rem] leading-none font-semibold">{figure}</p>
+        )}
         <p role="status" className="text-sm text-soft">
           {stateWords(walk, nowMs)}
         </p>

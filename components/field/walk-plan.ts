@@ -1,7 +1,10 @@
 import type { SegmentState, StripStation } from "@/components/tape/strip";
+import type { WalkView } from "@/lib/client/recorder";
 import type { Depth, MarkBody, Purpose } from "@/lib/domain/entry";
+import { asksAboutCar, type Interruption } from "@/lib/domain/interruption";
 import { checksOf, walkChecks, type Check, type RevisionDocument } from "@/lib/domain/revision";
 import { segmentOf } from "@/lib/domain/walk-reading";
+import { CALL_OFF, CLOSING, PLAN } from "./address";
 
 /** The counting marks of a walk, by check. */
 export type Marks = ReadonlyMap<string, Pick<MarkBody, "outcome">>;
@@ -25,9 +28,38 @@ export function nextStep(steps: readonly Step[], marks: Marks, after: string | n
   return ahead.find(({ check }) => !marks.has(check.key)) ?? null;
 }
 
-/** The check before this one in walking order; null at the first. */
-export function stepBefore(steps: readonly Step[], check: string): Step | null {
-  return steps[steps.findIndex((step) => step.check.key === check) - 1] ?? null;
+/** Where in an open walk someone is: what shows, and why. */
+export type Place =
+  | { kind: "closed" | "call-off" | "plan" | "car" | "held" | "closing" }
+  | { kind: "interrupted"; interruption: Interruption }
+  | { kind: "check"; step: Step };
+
+/**
+ * Decides what a walk shows. An interruption comes before everything but calling the walk off; the question about the
+ * car before the last look; the held rig once every check has its mark.
+ * @param at what the address says
+ */
+export function placeIn(view: WalkView, steps: readonly Step[], at: string | null): Place {
+  const { document, walk, replay, interruption } = view;
+  if (walk.seal) return { kind: "closed" };
+  if (at === CALL_OFF) return { kind: "call-off" };
+  if (interruption) return { kind: "interrupted", interruption };
+  if (at === PLAN) return { kind: "plan" };
+  const { marks, verdict, carUntouched } = replay;
+  const next = nextStep(steps, marks, null);
+  const wanted = at === CLOSING ? null : (steps.find(({ check }) => check.key === at) ?? next);
+  if (!wanted) return { kind: !next && verdict === "hold" ? "held" : "closing" };
+  const { key } = wanted.check;
+  const fresh = !marks.has(key);
+  if (fresh && asksAboutCar(document, walk, [...marks.keys()], carUntouched, key)) return { kind: "car" };
+  return { kind: "check", step: wanted };
+}
+
+/** What "back one" leads to: the check marked last, so that it can be marked anew, else the one before in walking order. */
+export function stepBefore(steps: readonly Step[], marks: Marks, check: string): Step | null {
+  const last = [...marks.keys()].at(-1);
+  const undone = last === check ? undefined : steps.find((step) => step.check.key === last);
+  return undone ?? steps[steps.findIndex((step) => step.check.key === check) - 1] ?? null;
 }
 
 /** A walk as tape: its checks in walking order, those at one station in a row together. */
@@ -73,19 +105,23 @@ export function tallyOf(document: RevisionDocument, steps: readonly Step[], mark
   };
 }
 
-/** Whether calling this check good needs a reason: its last mark says that the rig must not be towed. */
-export function needsReason(check: Check, marks: Marks): boolean {
-  return check.effect === "hold" && marks.get(check.key)?.outcome === "fault";
+/** Whether calling this check good needs a reason: it was last seen to be why the rig must not be towed. */
+export function needsReason(check: Check, faulted: ReadonlySet<string>): boolean {
+  return check.effect === "hold" && faulted.has(check.key);
 }
 
 const LONE_SURROGATE = /[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/g;
 
+/** Words as they may enter a record: a lone half of an emoji would make the whole walk unreadable to the server. */
+export function plainText(text: string): string {
+  return text.replace(LONE_SURROGATE, "").replace(/\s+/g, " ").trim();
+}
+
 /**
- * The `because` of a check that was put right. A lone half of an emoji would make the whole walk unreadable to the
- * server, so it is dropped here.
+ * The `because` of a check that was put right.
  * @returns null where nothing was said
  */
 export function fixedBecause(text: string): string | null {
-  const said = text.replace(LONE_SURROGATE, "").replace(/\s+/g, " ").trim();
+  const said = plainText(text);
   return said === "" ? null : `fixed: ${said}`;
 }

@@ -3,15 +3,19 @@ import type { HeldWalk } from "@/lib/client/field";
 import type { Recorder } from "@/lib/client/recorder";
 import type { SyncView } from "@/lib/client/sync";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
-import { CLOSING } from "./address";
 import { takeUp } from "./browser-field";
+import { CallOffScreen } from "./call-off-screen";
+import { CarQuestion } from "./car-question";
 import { CheckScreen } from "./check-screen";
 import { ClosingScreen } from "./closing-screen";
 import { ElsewhereScreen } from "./elsewhere-screen";
-import { MissingWalk, ReadingWalk, StoreRefused } from "./walk-notes";
+import { HeldScreen } from "./held-screen";
+import { PlanScreen } from "./plan-screen";
+import { ResumeScreen } from "./resume-screen";
 import { useStoredWalk } from "./stored-walk";
 import { VerdictScreen } from "./verdict-screen";
-import { nextStep, stepsOf } from "./walk-plan";
+import { MissingWalk, ReadingWalk, StoreRefused } from "./walk-notes";
+import { placeIn, stepsOf } from "./walk-plan";
 
 type WalkScreenProps = { sync: SyncView; walk: string; at: string | null };
 
@@ -54,10 +58,39 @@ type LiveWalkProps = { recorder: Recorder; walk: KeptWalk; sync: SyncView; at: s
 
 function LiveWalk({ recorder, walk, sync, at }: LiveWalkProps) {
   const view = useSyncExternalStore(recorder.subscribe, recorder.view);
-  if (view.walk.seal) return <VerdictScreen view={view} walk={walk} sync={sync} />;
   const steps = stepsOf(view.document, view.walk);
-  const asked = at === CLOSING ? null : steps.find(({ check }) => check.key === at);
-  const step = asked === undefined ? nextStep(steps, view.replay.marks, null) : asked;
   const props = { recorder, view, walk, steps };
-  return step ? <CheckScreen {...props} step={step} /> : <ClosingScreen {...props} />;
+  useReturn(recorder);
+  const place = placeIn(view, steps, at);
+  switch (place.kind) {
+    case "closed":
+      return <VerdictScreen view={view} walk={walk} sync={sync} />;
+    case "call-off":
+      return <CallOffScreen recorder={recorder} view={view} walk={walk} />;
+    case "interrupted":
+      return <ResumeScreen {...props} interruption={place.interruption} />;
+    case "plan":
+      return <PlanScreen {...props} />;
+    case "car":
+      return <CarQuestion recorder={recorder} view={view} walk={walk} />;
+    case "held":
+      return <HeldScreen {...props} />;
+    case "closing":
+      return <ClosingScreen {...props} />;
+    case "check":
+      return <CheckScreen {...props} step={place.step} />;
+  }
+}
+
+/** A page that comes back into sight after long is a walk that was left. */
+function useReturn(recorder: Recorder): void {
+  useEffect(() => {
+    let hiddenAtMs: number | null = null;
+    const follow = () => {
+      if (document.visibilityState === "hidden") hiddenAtMs = Date.now();
+      else if (hiddenAtMs !== null) recorder.returned(Math.max(0, Date.now() - hiddenAtMs));
+    };
+    document.addEventListener("visibilitychange", follow);
+    return () => document.removeEventListener("visibilitychange", follow);
+  }, [recorder]);
 }

@@ -1,8 +1,7 @@
-import type { Depth, Purpose } from "../domain/entry";
 import type { BundleRig } from "../domain/field";
 import { browserClock, type Clock } from "./clock";
 import { deviceFor } from "./device";
-import { Recorder, type Ground } from "./recorder";
+import { Recorder, type Ground, type WalkPlan } from "./recorder";
 import { openStore } from "./store";
 import { Sync } from "./sync";
 
@@ -52,8 +51,8 @@ export class Field {
   }
 
   /** Opens a walk on a rig; resolves when its first entry is saved on this phone. */
-  async open(rig: BundleRig, member: string, purpose: Purpose, depth: Depth): Promise<HeldWalk> {
-    const recorder = await Recorder.open(await this.ground(member), rig, { member, purpose, depth });
+  async open(rig: BundleRig, plan: WalkPlan): Promise<HeldWalk> {
+    const recorder = await Recorder.open(await this.ground(plan.member), rig, plan);
     return (await this.hold(recorder.view().walk.id, async () => recorder)) as HeldWalk;
   }
 
@@ -63,6 +62,12 @@ export class Field {
    */
   async takeUp(member: string, walk: string): Promise<HeldWalk | "elsewhere" | null> {
     return this.hold(walk, async () => Recorder.takeUp(await this.ground(member), walk));
+  }
+
+  /** Keeps that a rig was left, or its car entered, after a closed walk: its verdict is stale from now on. */
+  async left(walk: string): Promise<void> {
+    await this.sync.shelf.amend(walk, () => ({ leftAt: new Date(this.clock().wallMs).toISOString() }));
+    await this.sync.read();
   }
 
   /** One tab records a walk: the browser's lock is taken before the walk is read and kept until it is let go. */

@@ -25,6 +25,8 @@ export interface KeptWalk {
   /** Set when the walk is closed; final. */
   seal: Seal | null;
   verdict: Verdict | null;
+  /** When someone said that the rig was left, or its car entered, after this walk. */
+  leftAt?: string;
   /** Set when a receipt was verified against a pinned server key. */
   receipt: Receipt | null;
   /** Why the server would not take it, if it said so. */

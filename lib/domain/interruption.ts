@@ -1,5 +1,5 @@
-import type { Entry, Purpose, Depth } from "./entry";
-import { checksOf, walkChecks, type RevisionDocument } from "./revision";
+import type { Depth, Entry, Purpose } from "./entry";
+import { checksOf, keysAtStation, walkChecks, type RevisionDocument } from "./revision";
 
 /** How long a walk may lie still with the phone away before it counts as left. Our own rule: no figure is published. */
 export const LEFT_MS = 10 * 60_000;
@@ -53,40 +53,32 @@ export function againAfterBreak(
 }
 
 /**
- * The checks to ask again after a fault was mended: the check itself, what mending it can change, and the look at
- * every joint at the end. What cannot have changed keeps its mark.
+ * The checks to ask again after a fault was mended: the check itself, what mending it can change, and the holds of the
+ * last look. What cannot have changed keeps its mark.
  * @param mended keys of the checks that were mended
- * @param markedInOrder keys with a counting mark
+ * @param marked keys with a counting mark
  */
 export function againAfterMending(
   document: RevisionDocument,
   mended: readonly string[],
-  markedInOrder: readonly string[],
-  carEntered: boolean,
+  marked: readonly string[],
 ): string[] {
   const checks = checksOf(document);
-  const again = new Set(mended);
-  for (const key of mended) for (const touched of checks.get(key)?.touches ?? []) again.add(touched);
-  for (const key of stationKeysOf(document, "last-look")) {
-    if (checks.get(key)?.effect === "hold") again.add(key);
-  }
-  if (carEntered) for (const key of cabinMarks(document, markedInOrder)) again.add(key);
-  const marked = new Set(markedInOrder);
-  return inListOrder(
-    document,
-    [...again].filter((key) => marked.has(key)),
-  );
+  const touched = mended.flatMap((key) => checks.get(key)?.touches ?? []);
+  const lastLook = keysAtStation(document, "last-look").filter((key) => checks.get(key)?.effect === "hold");
+  const again = [...mended, ...touched, ...lastLook].filter((key) => marked.includes(key));
+  return inListOrder(document, again);
 }
 
 /** The marked checks that are made in the car's cabin. */
 export function cabinMarks(document: RevisionDocument, marked: readonly string[]): string[] {
-  const cabin = new Set(stationKeysOf(document, "car-cabin"));
+  const cabin = new Set(keysAtStation(document, "car-cabin"));
   return marked.filter((key) => cabin.has(key));
 }
 
 /**
- * Whether this is the moment to ask if anyone has been in the car: the cabin is marked, its last answer is older than
- * that mark, and the check to come is the first of the last look.
+ * Whether this is the moment to ask if anyone has been in the car: the cabin is marked, nobody has answered since, and
+ * the check to come belongs to the last look.
  */
 export function asksAboutCar(
   document: RevisionDocument,
@@ -99,12 +91,6 @@ export function asksAboutCar(
   return walkChecks(document, walk.purpose, walk.depth).some(
     ({ station, check }) => check.key === next && station.key === "last-look",
   );
-}
-
-function stationKeysOf(document: RevisionDocument, station: string): string[] {
-  return document.list.stations
-    .filter(({ key }) => key === station)
-    .flatMap(({ checks }) => checks.map(({ key }) => key));
 }
 
 function inListOrder(document: RevisionDocument, keys: Iterable<string>): string[] {

@@ -1,6 +1,5 @@
 import { bodyOf, type Entry, type MarkBody, type OpenBody, type PhotoBody, type Verdict } from "./entry";
-import { cabinMarks } from "./interruption";
-import { checksOf, type RevisionDocument } from "./revision";
+import { checksOf, keysAtStation, type RevisionDocument } from "./revision";
 
 /** The mark that counts for a check, and when it was made. */
 export interface CountingMark extends MarkBody {
@@ -21,7 +20,7 @@ export interface Replay {
   elapsedMs: number;
   /** Checks last seen at fault, whatever was voided or not seen since: calling a hold among them good needs a reason. */
   faulted: ReadonlySet<string>;
-  /** Nobody has been in the car since the cabin was last marked: someone said so. */
+  /** Someone said that nobody has been in the car since the cabin was marked, and nothing but the last look came since. */
   carUntouched: boolean;
   photos: readonly PhotoBody[];
 }
@@ -38,6 +37,7 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
   let elapsedMs = 0;
   const faulted = new Set<string>();
   const photos: PhotoBody[] = [];
+  const lastLook = new Set(keysAtStation(document, "last-look"));
   let carUntouched = false;
   for (const entry of entries) {
     elapsedMs = entry.elapsedMs;
@@ -54,7 +54,8 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
     marks.set(mark.check, { ...mark, at: entry.at, elapsedMs });
     if (mark.outcome === "fault") faulted.add(mark.check);
     if (mark.outcome === "good" || mark.outcome === "absent") faulted.delete(mark.check);
-    if (cabinMarks(document, [mark.check]).length > 0) carUntouched = false;
+    // The answer is about this moment: it holds while the last look goes on, not over further work on the rig.
+    if (!lastLook.has(mark.check)) carUntouched = false;
   }
   const faults = [...marks.values()].filter((mark) => mark.outcome === "fault").length;
   return {

@@ -112,6 +112,13 @@ export function checksOf(document: RevisionDocument): Map<string, Check> {
   return new Map(document.list.stations.flatMap((s) => s.checks).map((check) => [check.key, check]));
 }
 
+/** The keys of the checks made at a station, whatever walk they belong to. */
+export function keysAtStation(document: RevisionDocument, station: StationKey): string[] {
+  return document.list.stations
+    .filter(({ key }) => key === station)
+    .flatMap(({ checks }) => checks.map(({ key }) => key));
+}
+
 /** The checks of one walk in walking order, each with the station it is made at. */
 export function walkChecks(
   document: RevisionDocument,

@@ -49,10 +49,40 @@ describe("what is asked next", () => {
     expect(nextStep(steps, marked(made), after)?.check.key ?? null).toBe(expected);
   });
 
-  test("one back, and no further than the first", () => {
-    expect(stepBefore(steps, "air")?.check.key).toBe("cables");
-    expect(stepBefore(steps, "pin")).toBeNull();
-    expect(stepBefore(steps, "no such check")).toBeNull();
+  test.each<[string, [string, Outcome][], string, string | null]>([
+    [
+      "the check marked last, to mark it anew",
+      [
+        ["pin", "good"],
+        ["cables", "good"],
+      ],
+      "air",
+      "cables",
+    ],
+    [
+      "marked last wherever it stands",
+      [
+        ["cables", "good"],
+        ["pin", "good"],
+      ],
+      "air",
+      "pin",
+    ],
+    [
+      "from the one marked last, the one before in order",
+      [
+        ["pin", "good"],
+        ["cables", "good"],
+      ],
+      "cables",
+      "pin",
+    ],
+    ["with nothing marked, the one before in order", [], "cables", "pin"],
+    ["no further than the first", [], "pin", null],
+    ["nothing before an unknown check", [], "no such check", null],
+  ])("one back: %s", (_, made, from, expected) => {
+    const marks = new Map(made.map(([key, outcome]) => [key, { outcome }]));
+    expect(stepBefore(steps, marks, from)?.check.key ?? null).toBe(expected);
   });
 });
 
@@ -104,13 +134,11 @@ describe("what the marks come to", () => {
   });
 });
 
-test("only a hold at fault needs a reason to become good", () => {
+test("only a hold last seen at fault needs a reason to become good", () => {
   const checks = checksOf(document);
-  const reason = (key: string, outcome: Outcome) => needsReason(checks.get(key)!, marked({ [key]: outcome }));
-  expect(reason("pin", "fault")).toBe(true);
-  expect(reason("pin", "unseen")).toBe(false);
-  expect(reason("tires", "fault")).toBe(false);
-  expect(needsReason(checks.get("pin")!, marked({}))).toBe(false);
+  expect(needsReason(checks.get("pin")!, new Set(["pin"]))).toBe(true);
+  expect(needsReason(checks.get("pin")!, new Set(["cables"]))).toBe(false);
+  expect(needsReason(checks.get("tires")!, new Set(["tires"]))).toBe(false);
 });
 
 test.each([

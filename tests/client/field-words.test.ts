@@ -14,10 +14,14 @@ test.each([
 });
 
 test("a query string reads back as the address it was made from", () => {
-  const address = { walk: "w", at: "arm left&" };
+  const address = { walk: "w", at: "arm left&", paper: null };
+  expect(addressOf(new URL(hrefOf({ paper: "r" }), "http://x").search)).toMatchObject({
+    walk: null,
+    paper: "r",
+  });
   expect(addressOf(new URL(hrefOf(address), "http://x").search)).toEqual(address);
-  expect(addressOf("")).toEqual({ walk: null, at: null });
-  expect(addressOf("?walk=")).toEqual({ walk: null, at: null });
+  expect(addressOf("")).toEqual({ walk: null, at: null, paper: null });
+  expect(addressOf("?walk=")).toEqual({ walk: null, at: null, paper: null });
 });
 
 describe("a rig as this phone knows it", () => {
@@ -55,10 +59,10 @@ describe("a rig as this phone knows it", () => {
     expect(openWalksOf("r", [open, kept("k", "2026-03-01")])).toEqual([open]);
   });
 
-  test("each kind of organization has its walks, hook-up first", () => {
+  test("each kind of organization has its walks, the usual one first", () => {
     expect(purposesFor("household")).toEqual(["hook-up", "re-check", "unhook"]);
     expect(purposesFor("shop")).toEqual(["hook-up", "re-check", "unhook", "delivery"]);
-    expect(purposesFor("fleet")).toEqual(["hook-up", "re-check", "unhook", "yard-out", "yard-in"]);
+    expect(purposesFor("fleet")).toEqual(["yard-out", "yard-in", "hook-up", "re-check", "unhook"]);
   });
 });
 

@@ -116,7 +116,7 @@ export const fieldWords = {
     back: "Back to rigs",
     place: (place: number, total: number) => `${place} of ${total}`,
     timer: "Walking time",
-    close: "Close…",
+    stop: "Stop…",
     good: "Good",
     asDrawn: "as drawn",
     fault: "Fault",
@@ -160,6 +160,9 @@ export const fieldWords = {
     closeAndSign: "Close and sign",
     final: "nothing can be added after",
     goOn: "Go on with the walk",
+    pause: "Pause",
+    pauseHint: "time stands still",
+    callOff: "Call it off…",
     lastCheck: "Back to the last check",
     leave: "Back to rigs, the walk stays open",
     notSaved: "Not closed. This phone did not save it. Try again; if it stays so, free some space.",
@@ -176,10 +179,10 @@ export const fieldWords = {
     markedAbsent:
       "Marked as not on this rig, but its list asks for it. Look again, or have the rig sheet corrected.",
     leftOut: "Not marked",
-    sentence: (kind: Verdict, holds: number, done: number, total: number, elapsedMs: number) =>
+    sentence: (kind: Verdict, holds: number, done: number, total: number, elapsedMs: number | null) =>
       [
         kind === "hold" ? `${verdict.hold}: ${counted(holds, "hold", "holds")}.` : `${verdict[kind]}.`,
-        `${done} of ${total} looked at, ${spell(elapsedMs)}.`,
+        `${done} of ${total} looked at, ${elapsedMs === null ? "from paper, untimed" : spell(elapsedMs)}.`,
         notStatement,
       ].join(" "),
     deference,
