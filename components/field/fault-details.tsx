@@ -34,7 +34,10 @@ export function FaultDetails({ check, asDrawn, callouts, marking }: FaultDetails
           ))}
         </div>
       )}
-      <form onSubmit={keep}>
+      <Button variant="good" onClick={goOn}>
+        {words.goOn}
+      </Button>
+      <form onSubmit={keep} className="flex flex-col gap-2.5 pt-2">
         <TextField
           size="field"
           label={words.own}
@@ -44,10 +47,8 @@ export function FaultDetails({ check, asDrawn, callouts, marking }: FaultDetails
           enterKeyHint="done"
           onChange={(event) => setText(event.target.value)}
         />
+        {plainText(text) !== callouts.own && <Button type="submit">{words.keep}</Button>}
       </form>
-      <Button variant="good" onClick={goOn}>
-        {words.goOn}
-      </Button>
       <div className="acts-two">
         <Button variant="quiet" onClick={() => marking.mark("good", { because: "mis-tap" })}>
           {words.misTap}

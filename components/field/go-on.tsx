@@ -1,7 +1,7 @@
 import { Button } from "@/components/ui/button";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { CLOSING, goTo } from "./address";
+import { CALL_OFF, goTo } from "./address";
 import { KeptStrip } from "./last-verdict";
 import { useStoredWalk } from "./stored-walk";
 import { VerdictMark } from "./verdict-mark";
@@ -29,8 +29,8 @@ export function GoOn({ walk }: { walk: KeptWalk }) {
       <Button variant="good" onClick={() => goTo({ walk: walk.id })}>
         {words.goOn(walk.purpose, stored && { place: next?.place ?? null, total: steps.length })}
       </Button>
-      <Button variant="quiet" onClick={() => goTo({ walk: walk.id, at: CLOSING })}>
-        {words.closeAsIs}
+      <Button variant="quiet" onClick={() => goTo({ walk: walk.id, at: CALL_OFF })}>
+        {words.callOff}
       </Button>
     </div>
   );

@@ -6,10 +6,9 @@ import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { againAfterBreak, cabinMarks, type Interruption } from "@/lib/domain/interruption";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { walkingWords } from "@/lib/domain/messages/walking";
-import { moveTo } from "./address";
+import { CALL_OFF, moveTo } from "./address";
 import { BottomBar } from "./bottom-bar";
 import { FieldFrame } from "./field-frame";
-import { CALL_OFF } from "./address";
 import { useArrival, useScreenTitle } from "./screen-title";
 import { useSettled } from "./settling";
 import { StepList } from "./step-list";
@@ -107,7 +106,7 @@ export function ResumeScreen({ recorder, view, walk, steps, interruption }: Resu
           )}
         </div>
         <div className="acts-two">
-          {awayMs !== null && awayMs < MOMENT_MS && (
+          {kind === "left" && awayMs !== null && awayMs < MOMENT_MS && (
             <Button variant="quiet" onClick={onlyPhone}>
               {words.onlyPhone}
             </Button>

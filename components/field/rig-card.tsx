@@ -40,7 +40,7 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
   const depth = chosen ?? usualDepth(rig, walks, nowMs);
   const open = openWalksOf(rig.id, walks);
   const last = lastWalkOf(rig, walks);
-  const stale = last !== null && stalenessOf(last, last.kept?.leftAt ?? null, nowMs) !== null;
+  const left = last !== null && stalenessOf(last, last.kept?.leftAt ?? null, nowMs) === "left";
   const purposes = purposesFor(member.organisation.kind);
 
   const start = async (purpose: Purpose) => {
@@ -78,7 +78,7 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           {open.length > 0 && <p className="px-1 pt-1 text-base text-soft">{words.another}</p>}
           <RigStarts
             rig={rig}
-            purposes={stale ? ["re-check", ...purposes.filter((each) => each !== "re-check")] : purposes}
+            purposes={left ? ["re-check", ...purposes.filter((each) => each !== "re-check")] : purposes}
             main={open.length === 0}
             depth={depth}
             onDepth={setChosen}

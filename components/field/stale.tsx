@@ -22,7 +22,7 @@ export function Stale({ last, kept }: { last: LastWalk | null; kept: KeptWalk | 
         <p className="w-fit bg-paper px-1 font-extrabold">
           {stale === "left" ? words.leftTitle(recentText(kept!.leftAt!, nowMs)) : words.oldTitle}
         </p>
-        <p className="w-fit bg-paper px-1">{words.advice}</p>
+        <p className="w-fit bg-paper px-1">{stale === "left" ? words.leftAdvice : words.oldAdvice}</p>
       </div>
     );
   }

@@ -60,7 +60,7 @@ export const fieldWords = {
     ofRig: (name: string) => `(${name})`,
     goOn: (kind: Purpose, at: Progress | null) =>
       `Go on: ${lower(purpose[kind])}${at ? `, ${reached(at)}` : ""}`,
-    closeAsIs: "Close it as it stands",
+    callOff: "Call it off…",
     another: "Or start another walk",
     openFinding: (since: string, ask: string) => `Do not tow: open finding since ${since}. ${ask}`,
     openFix: (since: string, ask: string) => `Fix soon: open finding since ${since}. ${ask}`,

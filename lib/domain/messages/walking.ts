@@ -1,4 +1,4 @@
-import { purposeWords as purpose, verdictWords as verdict } from "./walk";
+import { purposeWords as purpose } from "./walk";
 import type { Purpose } from "../entry";
 
 const lower = (text: string) => text.charAt(0).toLowerCase() + text.slice(1);
@@ -16,7 +16,7 @@ export const walkingWords = {
     mended: "Mended on the spot",
     own: "In a few words",
     ownHint: "Not needed. What you touch above is kept at once.",
-    keep: "Keep the words",
+    keep: "Keep these words",
     goOn: "Go on",
     misTap: "Mis-tap: it is good",
     more: "Say what is wrong",
@@ -85,13 +85,12 @@ export const walkingWords = {
   },
 
   stale: {
-    question: "Has the rig been left alone, or anyone been in the car, since?",
-    left: "Yes: left, or entered",
-    stands:
-      "This stands while someone stays with the rig. It goes stale when the rig is left or the car is entered.",
+    left: "The rig was left, or the car entered",
+    stands: "This stands while someone stays with the rig and nobody is in the car.",
     leftTitle: (when: string) => `Stale since ${when}: the rig was left or the car entered`,
+    leftAdvice: "Walk a re-check before towing, and the cabin too if anyone was in the car.",
     oldTitle: "Stale: hours have passed since",
-    advice: "Walk a re-check before towing, the cabin too if anyone was in the car.",
+    oldAdvice: "It says how the rig was then. Walk again before towing.",
   },
 
   depth: {
@@ -136,6 +135,4 @@ export const walkingWords = {
     state: (done: number, total: number) => `${done} of ${total} marked`,
     back: "Back to the check",
   },
-
-  standing: { stale: `${verdict["no-hold"]}, stale` },
 } as const;
