@@ -74,9 +74,11 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
     async mark(outcome, more = {}) {
       if (!takes()) return;
       if (outcome === "good" && !more.because && needsReason(check, state().faulted)) return ask("why");
+      const then = outcome === "fault" ? "details" : outcome === "good" && check.measure ? "measure" : null;
+      // What is asked after the mark belongs to this check, which without an address of its own is no longer the next.
+      if (then) moveTo({ walk, at: key });
       if (!(await save(outcome, more))) return;
-      if (outcome === "fault") return stay("details");
-      if (outcome === "good" && check.measure && !more.measured) return stay("measure");
+      if (then) return stay(then);
       show(nextStep(steps, state().marks, key));
     },
     async amend(more) {

@@ -1,50 +1,19 @@
 import AxeBuilder from "@axe-core/playwright";
-import type { Page } from "@playwright/test";
 import { expect, test } from "../support/product";
-
-const DRIVER = "driver@demo.example";
-/** A touch counts this long after a check appeared. */
-const SETTLED_MS = 700;
-
-const good = /^Good/;
-const closeAndSign = /^Close and sign/;
-
-/** Signed in, with the bundle and the worker on the phone. */
-async function readyPhone(page: Page, product: { signIn: (page: Page, email: string) => Promise<void> }) {
-  await product.signIn(page, DRIVER);
-  await page.goto("/field");
-  await expect(page.getByRole("button", { name: /^Hook-up/ }).first()).toBeVisible();
-  await page.evaluate(async () => void (await navigator.serviceWorker.ready));
-}
-
-async function tap(page: Page, name: RegExp): Promise<void> {
-  await page.waitForTimeout(SETTLED_MS);
-  await page.getByRole("button", { name }).click();
-}
-
-const ask = (page: Page) => page.getByRole("heading", { level: 2 });
-const place = async (page: Page) =>
-  (await page.getByText(/^\d+ of \d+$/).innerText()).split(" of ").map(Number);
-
-/** Answers each check that is left, in turn, until the closing screen shows. */
-async function walk(page: Page, answer: (ask: string) => RegExp = () => good): Promise<void> {
-  await page.getByRole("button", { name: good }).waitFor();
-  for (;;) {
-    const asked = await ask(page).innerText();
-    await tap(page, answer(asked));
-    await expect(ask(page)).not.toHaveText(asked);
-    if (await page.getByRole("button", { name: closeAndSign }).isVisible()) return;
-  }
-}
-
-/** Starts a hook-up by the first control of that name. */
-async function startHookUp(page: Page): Promise<void> {
-  await page
-    .getByRole("button", { name: /^Hook-up/ })
-    .first()
-    .click();
-  await expect(page.getByRole("button", { name: good })).toBeVisible();
-}
+import {
+  ask,
+  closeAndSign,
+  DRIVER,
+  fault,
+  good,
+  markFault,
+  place,
+  readyPhone,
+  SETTLED_MS,
+  startHookUp,
+  tap,
+  walkOn,
+} from "../support/walking";
 
 test("cold start with no server, a fault on a hold, saved; the server is back, received by itself", async ({
   page,
@@ -61,11 +30,12 @@ test("cold start with no server, a fault on a hold, saved; the server is back, r
   await startHookUp(cold);
   const [, total] = await place(cold);
   let faulty = "";
-  await walk(cold, (asked) => {
+  await walkOn(cold, (asked) => {
     faulty ||= asked;
-    return faulty === asked ? /^Fault \(do not tow\)/ : good;
+    return faulty === asked ? fault : good;
   });
-  await cold.getByRole("button", { name: closeAndSign }).click();
+  await tap(cold, /^Call it off/);
+  await tap(cold, /^needs a part/);
 
   await expect(cold.getByRole("heading", { name: "Do not tow" })).toBeVisible();
   await expect(cold.getByRole("heading", { name: faulty })).toBeVisible();
@@ -91,7 +61,7 @@ test("cold start with no server, a fault on a hold, saved; the server is back, r
 test("all good is no hold marked, with what that says and does not say", async ({ page, product }) => {
   await readyPhone(page, product);
   await startHookUp(page);
-  await walk(page);
+  await walkOn(page);
   await page.getByRole("button", { name: closeAndSign }).click();
   await expect(page.getByRole("heading", { name: "No hold marked" })).toBeVisible();
   await expect(page.getByRole("main")).toContainText(
@@ -127,33 +97,10 @@ test("a double tap marks once, and the first touch within 600 ms of a check is i
   expect(await place(page)).toEqual([3, expect.any(Number)]);
 });
 
-test("a reload in the middle of a walk goes on at the same check", async ({ page, product }) => {
-  await readyPhone(page, product);
-  await startHookUp(page);
-  await tap(page, good);
-  await tap(page, good);
-  await expect(page.getByText(/^3 of \d+$/)).toBeVisible();
-  const here = await ask(page).innerText();
-  await page.reload();
-  await expect(ask(page)).toHaveText(here);
-  expect((await place(page))[0]).toBe(3);
-
-  await tap(page, /^Back one/);
-  await expect(page.getByText("Marked: good")).toBeVisible();
-  const back = await ask(page).innerText();
-  await page.reload();
-  await expect(ask(page)).toHaveText(back);
-
-  await page.goBack();
-  await expect(page.getByRole("button", { name: /^Go on: hook-up, 3 of \d+/ })).toBeVisible();
-});
-
 test("a hold at fault becomes good only with a reason", async ({ page, product }) => {
   await readyPhone(page, product);
   await startHookUp(page);
-  const held = await ask(page).innerText();
-  await tap(page, /^Fault \(do not tow\)/);
-  await expect(ask(page)).not.toHaveText(held);
+  const held = await markFault(page);
   await tap(page, /^Back one/);
   await tap(page, good);
   await expect(page.getByText("Why is it good now?")).toBeVisible();
@@ -179,6 +126,7 @@ test("a second tab reads the walk that the first one records", async ({ page, co
   await expect(second.getByRole("button", { name: good })).toHaveCount(0);
   await page.close();
   await second.getByRole("button", { name: "Take it up here" }).click();
+  await tap(second, /^Only the phone was away/);
   await expect(second.getByText(/^2 of \d+$/)).toBeVisible();
 });
 
@@ -255,16 +203,31 @@ for (const colorScheme of ["light", "dark"] as const) {
     await clean();
     await startHookUp(page);
     await clean();
-    await tap(page, /^Fault \(do not tow\)/);
+    await tap(page, fault);
+    await expect(page.getByText("What is not as drawn?")).toBeVisible();
+    await clean();
+    await tap(page, /^Go on$/);
     await tap(page, /^Back one/);
     await clean();
     await tap(page, good);
     await expect(page.getByText("Why is it good now?")).toBeVisible();
     await clean();
-    await tap(page, /^Leave it as fault/);
-    await tap(page, /^Close…/);
+    await tap(page, /^It was fixed/);
     await clean();
-    await page.getByRole("button", { name: closeAndSign }).click();
+    await tap(page, /^Back$/);
+    await tap(page, /^Leave it as fault/);
+    await tap(page, /^Show the stations/);
+    await clean();
+    await tap(page, /^Back to the check/);
+    await tap(page, /^Stop…/);
+    await clean();
+    await tap(page, /^Pause/);
+    await tap(page, /^Go on: hook-up/);
+    await expect(page.getByText(/^Paused/)).toBeVisible();
+    await clean();
+    await tap(page, /^Call it off/);
+    await clean();
+    await tap(page, /^called away/);
     await expect(page.getByRole("heading", { name: "Do not tow" })).toBeVisible();
     await clean();
     await page.getByRole("link", { name: "Back to rigs" }).click();
