@@ -34,8 +34,8 @@ export function WheelsDrawing({ size = "full", standing = false, onCallout }: Wh
 
           {!standing && <ArmsWindow onCallout={onCallout} />}
           <Callout
-            letter="B"
-            lines={words.callouts.B}
+            letter={standing ? "A" : "B"}
+            lines={standing ? stopped.callouts.A : rolled.callouts.B}
             at={[166, 318]}
             to={[
               [216, 262],

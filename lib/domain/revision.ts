@@ -26,6 +26,15 @@ export const partKeys = [
   "last-look",
   "chocks",
   "bar-stowed",
+  "ball",
+  "pintle",
+  "arm-quick",
+  "base-plate",
+  "short-cables",
+  "arms-locked",
+  "lanyard",
+  "air-line",
+  "charge-line",
 ] as const;
 export type PartKey = (typeof partKeys)[number];
 
@@ -38,6 +47,7 @@ export const drawnStates = ["off", "standing", "joints", "tires", "installed", "
 export type DrawnState = (typeof drawnStates)[number];
 
 export const effects = ["hold", "fix"] as const;
+export type Effect = (typeof effects)[number];
 
 /**
  * What a check's value is measured in. `unit` is the one it is kept in; a person enters it in theirs. `beside` is what
