@@ -23,12 +23,15 @@ export function AirLineDrawing({ size = "full", onCallout }: DrawingProps) {
           <path d="M-4 279H394" className="dr-fine dr-open" />
 
           {/* The hose between the vehicles. */}
-          <Wire d="M196 110C238 110 236 236 272 236C306 236 288 158 322 158" width={15} />
+          <Wire d="M196 110C246 110 222 240 258 240C290 240 268 158 302 158" width={15} />
 
           <Coupler />
-          <g transform="translate(390 100) scale(-0.520 0.520)">
-            <Coupler />
-          </g>
+          {/* Its other end, in a coupler of the same kind. */}
+          <path d="M348 140H360V176H348Z" className="dr-part dr-shade" />
+          <path d="M340 146H350V170H340Z" className="dr-part" />
+          <path d="M312 142H340V174H312Z" className="dr-part dr-shade" />
+          <path d="M319 147V169M326 147V169M333 147V169" className="dr-fine" />
+          <path d="M298 149H313V167H298Z" className="dr-part" />
 
           <Callout
             letter="A"
@@ -40,8 +43,8 @@ export function AirLineDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[170, 244]}
-            to={[[240, 210]]}
+            at={[164, 242]}
+            to={[[229, 200]]}
             label="left"
             onCallout={onCallout}
           />
@@ -49,7 +52,7 @@ export function AirLineDrawing({ size = "full", onCallout }: DrawingProps) {
             letter="C"
             lines={words.callouts.C}
             at={[274, 84]}
-            to={[[328, 148]]}
+            to={[[326, 148]]}
             label="above"
             onCallout={onCallout}
           />

@@ -28,24 +28,24 @@ export function ArmQuickDrawing({ side = "left", size = "full", onCallout }: Arm
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[x(130), 58]}
-            to={[[x(188), 160]]}
+            at={[x(136), 62]}
+            to={[[x(174), 150]]}
             label={toward("left")}
             onCallout={onCallout}
           />
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[x(286), 60]}
-            to={[[x(247), 140]]}
+            at={[x(280), 62]}
+            to={[[x(255), 146]]}
             label={toward("right")}
             onCallout={onCallout}
           />
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[x(132), 288]}
-            to={[[x(180), 208]]}
+            at={[x(122), 294]}
+            to={[[x(174), 224]]}
             label={toward("left")}
             onCallout={onCallout}
           />
@@ -56,39 +56,46 @@ export function ArmQuickDrawing({ side = "left", size = "full", onCallout }: Arm
 }
 
 function Art({ hatch }: { hatch: string }) {
-  const bumper = "M394 92C366 96 354 116 352 148L348 216C348 246 360 266 394 272";
+  const bumper = "M394 82C368 86 358 108 356 144L352 218C352 250 362 274 394 280";
   return (
     <>
       <path d={`${bumper}Z`} fill={hatch} />
       <path d={bumper} className="dr-edge dr-open" />
 
-      {/* Arm: tube, collar, knuckle with its bolt. */}
-      <path d="M-4 158H64V204H-4" className="dr-edge" />
-      <path d="M-4 169H60" className="dr-fine dr-open" />
-      <path d="M80 156H128Q146 156 146 168V194Q146 206 128 206H80Z" className="dr-edge" />
-      <path d="M60 147H84V215H60Z" className="dr-edge dr-shade" />
-      <circle cx="116" cy="181" r="11" className="dr-part dr-shade" />
-      <path d="M111 172.400L121 172.400L126 181L121 189.600H111L106 181Z" className="dr-fine dr-open" />
+      {/* Arm: tube, collar, knuckle with its bolt, neck of the insert. */}
+      <path d="M-4 155H46V207H-4" className="dr-edge" />
+      <path d="M-4 167H42" className="dr-fine dr-open" />
+      <path d="M62 152H112Q134 152 134 166V196Q134 210 112 210H62Z" className="dr-edge" />
+      <path d="M42 142H68V220H42Z" className="dr-edge dr-shade" />
+      <circle cx="100" cy="181" r="13" className="dr-part dr-shade" />
+      <path d="M94 171L106 171L112 181L106 191H94L88 181Z" className="dr-fine dr-open" />
+      <path d="M130 163H152V199H130Z" className="dr-edge" />
 
-      {/* Insert: neck, flange against the socket. */}
-      <path d="M142 166H166V196H142Z" className="dr-edge" />
+      {/* Socket, open where the insert's lugs lie behind its ledge. */}
+      <path d="M192 136H356V226H192Z" className="dr-edge" />
+      <path
+        d="M268 136q7 11 0 23t0 22t0 23t0 22H344q7 -11 0 -23t0 -22t0 -23t0 -22Z"
+        className="dr-part dr-shade"
+      />
+      <path d="M266 158H304V204H266Z" className="dr-part" />
+      <path d="M274 136H290V156H274ZM274 226H290V206H274Z" className="dr-blank" />
+      <path d="M274 136H290V156H274ZM274 226H290V206H274Z" fill={hatch} />
+      <path d="M274 136V156H290V136M274 226V206H290V226" className="dr-part dr-open" />
+      <path d="M296 143H318V219H296Z" className="dr-edge" />
+      <path
+        d="M268 136q7 11 0 23t0 22t0 23t0 22M344 226q7 -11 0 -23t0 -22t0 -23t0 -22"
+        className="dr-part dr-open"
+      />
 
-      {/* Socket, open where the lugs lie behind its ledge. */}
-      <path d="M196 146H352V216H196Z" className="dr-edge" />
-      <path d="M264 146q6 9 0 17t0 18t0 18t0 17H336q6 -9 0 -17t0 -18t0 -18t0 -17Z" className="dr-part dr-shade" />
-      <path d="M260 160H310V202H260Z" className="dr-part" />
-      <path d="M267 146H284V158H267ZM267 216H284V204H267Z" className="dr-part" />
-      <path d="M267 146H284V158H267ZM267 216H284V204H267Z" fill={hatch} />
-      <path d="M290 150H310V212H290Z" className="dr-edge" />
-      <path d="M262 162H262V200H262Z" className="dr-fine" />
-      <path d="M264 146q6 9 0 17t0 18t0 18t0 17M336 216q6 -9 0 -17t0 -18t0 -18t0 -17" className="dr-fine dr-open" />
-      <path d="M182 136H202V226H182Z" className="dr-edge dr-shade" />
-      <path d="M162 144H182V218H162Z" className="dr-edge" />
-      <path d="M166 162H198" className="dr-edge" />
+      {/* Lip of the socket, flange of the insert against it, a mark on each. */}
+      <path d="M174 122H200V240H174Z" className="dr-edge dr-shade" />
+      <path d="M148 132H174V230H148Z" className="dr-edge" />
+      <path d="M154 149L170 158L154 167ZM194 149L178 158L194 167Z" className="dr-solid" />
 
       {/* Spring clip: its leg through socket and insert, its bow closed around the outside. */}
-      <path d="M226 148V214" className="dr-behind" />
-      <Wire d="M226 146V128C226 112 262 118 262 150C262 172 246 176 246 190C246 206 256 236 236 246C226 250 220 244 226 236V216" width={9} />
+      <path d="M226 140V222" className="dr-behind" />
+      <path d="M220 112H232V136H220ZM220 226H232V252Q226 256 220 252Z" className="dr-part dr-shade" />
+      <Wire d="M228 112C270 100 274 262 226 256C214 254 214 242 224 242H238" width={8.5} />
     </>
   );
 }
@@ -104,7 +111,7 @@ function SmallArt({ hatch }: { hatch: string }) {
       <path d="M30 25H36V51H30Z" className="dr-part" />
       <path d="M30 33H42" className="dr-edge" />
       <path d="M58 31H72V45H58Z" className="dr-fine dr-shade" />
-      <path d="M50 20C50 14 62 14 62 26C62 36 56 36 56 42C56 50 60 58 54 60C50 61 48 58 50 54" className="dr-line dr-open" />
+      <path d="M49 16V60M49 16C66 12 66 58 49 60Q44 58 49 54H54" className="dr-line dr-open" />
     </>
   );
 }

@@ -23,26 +23,32 @@ export function BallDrawing({ size = "full", onCallout }: DrawingProps) {
           <path d="M124 238H192V250H124Z" className="dr-part" />
           <path d="M142 216L138 240H178L174 216Z" className="dr-edge" />
 
-          {/* Bar's tongue and the coupler's shell, cut along its middle. */}
-          <path d="M228 152H394V208H228Z" className="dr-edge" />
-          <path d="M228 164H394" className="dr-fine dr-open" />
-          <path d="M106 214V188Q106 138 158 138H300V208H252L232 222H208V186A50 46 0 0 0 116 186V214Z" className="dr-edge" />
-          <path d="M106 214V188Q106 138 158 138H236V152H222Q206 158 206 184A48 46 0 0 0 116 184V214Z" fill={hatch} />
-          <circle cx="158" cy="186" r="41" className="dr-edge" />
-          <path d="M132 170Q140 156 156 154" className="dr-fine dr-open" />
-
-          {/* Clamp, closed under the ball. */}
-          <path d="M200 204Q196 218 184 220L190 234H218V204Z" className="dr-part dr-shade" />
-
-          {/* Latch: ears, lever, tab in its slot. */}
-          <path d="M206 138V112Q206 100 218 100H232Q244 100 244 112V138Z" className="dr-part dr-shade" />
+          {/* Bar's tongue and the coupler's shell, its front cut along the middle. */}
+          <path d="M286 152H394V208H286Z" className="dr-edge" />
+          <path d="M300 164H394" className="dr-fine dr-open" />
           <path
-            d="M178 112H330Q346 112 350 98L360 100Q358 130 336 130H192V152H178Z"
+            d="M106 216V188Q106 138 158 138H300V212H250L238 226H208V186A46 46 0 0 0 116 186V216Z"
             className="dr-edge"
           />
+          <path
+            d="M106 216V188Q106 138 158 138H232q-6 11 0 22t0 22t0 22t0 22H208V186A46 46 0 0 0 116 186V216Z"
+            fill={hatch}
+          />
+          <path d="M232 138q-6 11 0 22t0 22t0 22t0 22" className="dr-fine dr-open" />
+          <circle cx="160" cy="186" r="42" className="dr-edge" />
+          <path d="M132 172Q140 156 158 154" className="dr-fine dr-open" />
+
+          {/* Clamp, closed under the ball. */}
+          <path d="M206 208H224V238H192Q186 238 186 230V222Q200 218 206 208Z" className="dr-part dr-shade" />
+
+          {/* Latch: ears for pivot and pin, lever, tab in its slot. */}
+          <path
+            d="M206 138V112Q206 100 218 100H232Q244 100 244 112V138ZM266 138V106Q266 98 274 98H298Q306 98 306 106V138Z"
+            className="dr-part dr-shade"
+          />
+          <path d="M178 112H330Q346 112 350 98L360 100Q358 130 336 130H192V152H178Z" className="dr-edge" />
           <path d="M178 138H192V152H178Z" className="dr-solid" />
           <circle cx="225" cy="121" r="7" className="dr-part dr-shade" />
-          <path d="M262 138V98H310V138" className="dr-part dr-open" />
 
           <HairpinLeg x={286} y={121} />
           <circle cx="286" cy="121" r="11" className="dr-edge dr-shade" />
@@ -51,7 +57,7 @@ export function BallDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[58, 60]}
+            at={[96, 64]}
             to={[[185, 128]]}
             label="above"
             onCallout={onCallout}
@@ -59,7 +65,7 @@ export function BallDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[200, 44]}
+            at={[214, 42]}
             to={[[280, 110]]}
             label="right"
             onCallout={onCallout}

@@ -19,9 +19,10 @@ export function BasePlateDrawing({ size = "full", onCallout }: DrawingProps) {
       {(hatch) => (
         <>
           {/* What hides the frame rails. */}
-          <path d="M-4 -4H394V60Q360 76 300 78H90Q30 76 -4 60Z" fill={hatch} />
-          <path d="M-4 60Q30 76 90 78H300Q360 76 394 60" className="dr-edge dr-open" />
-          <path d="M22 76H78V100H22ZM312 76H368V100H312Z" className="dr-part" />
+          <path d="M26 -4H74V100H26ZM316 -4H364V100H316Z" className="dr-part" />
+          <path d="M-4 -4H394V14Q360 32 300 34H90Q30 32 -4 14Z" className="dr-blank" />
+          <path d="M-4 -4H394V14Q360 32 300 34H90Q30 32 -4 14Z" fill={hatch} />
+          <path d="M-4 14Q30 32 90 34H300Q360 32 394 14" className="dr-edge dr-open" />
 
           <path d="M70 130H320V170H70Z" className="dr-edge" />
           <path d="M70 140H320" className="dr-fine dr-open" />
@@ -33,7 +34,10 @@ export function BasePlateDrawing({ size = "full", onCallout }: DrawingProps) {
           <Tabs x={268} />
 
           {/* Push down, pull up. */}
-          <path d="M318 212V262M309 222L318 211L327 222M309 252L318 263L327 252" className="dr-part dr-open" />
+          <path
+            d="M318 212V262M309 222L318 211L327 222M309 252L318 263L327 252"
+            className="dr-part dr-open"
+          />
 
           {/* A bolt close up. */}
           <path d="M40 190L50 246M60 188L110 240" className="dr-fine dr-open" />
@@ -45,14 +49,14 @@ export function BasePlateDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[158, 292]}
-            to={[[101, 263]]}
+            at={[156, 270]}
+            to={[[102, 258]]}
             onCallout={onCallout}
           />
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[166, 40]}
+            at={[174, 78]}
             to={[
               [64, 122],
               [146, 172],
@@ -62,7 +66,7 @@ export function BasePlateDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[352, 296]}
+            at={[360, 308]}
             to={[[318, 238]]}
             label="left"
             onCallout={onCallout}
@@ -79,7 +83,7 @@ function Bolt({ x, y }: { x: number; y: number }) {
     <g transform={`translate(${x} ${y})`}>
       <circle r="12.500" className="dr-fine" />
       <path d="M-4.500 -8L4.500 -8L9 0L4.500 8H-4.500L-9 0Z" className="dr-fine" />
-      <path d="M2 -2L16 -16" strokeWidth="3" className="dr-wire-out" />
+      <path d="M0 0L11 -11" strokeWidth="3" className="dr-wire-out" />
     </g>
   );
 }
@@ -88,10 +92,13 @@ function Bolt({ x, y }: { x: number; y: number }) {
 function Tabs({ x }: { x: number }) {
   return (
     <g transform={`translate(${x} 0)`}>
-      <path d="M-20 164H20V236H-20Z" className="dr-part dr-shade" />
-      <path d="M-32 176H32V190H-32ZM-32 220H32V234H-32Z" className="dr-edge" />
-      <path d="M-6 176V190M6 176V190M-6 220V234M6 220V234" className="dr-behind" />
-      <path d="M-24 170q4 -6 8 0t8 0t8 0t8 0t8 0t8 0" className="dr-part dr-open" />
+      <path d="M-20 164H20V238H-20Z" className="dr-part dr-shade" />
+      <path d="M-32 182H32V196H-32ZM-32 224H32V238H-32Z" className="dr-edge" />
+      <path d="M-6 182V196M6 182V196M-6 224V238M6 224V238" className="dr-behind" />
+      <path
+        d="M-28 170q4 8 8 0q4 8 8 0q4 8 8 0q4 8 8 0q4 8 8 0q4 8 8 0q4 8 8 0"
+        className="dr-part dr-open"
+      />
     </g>
   );
 }

@@ -80,14 +80,14 @@ export function CabinDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[26, 306]}
+            at={[28, 306]}
             to={[[62, 242]]}
             onCallout={onCallout}
           />
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[192, 330]}
+            at={[192, 322]}
             to={[[230, 300]]}
             onCallout={onCallout}
           />

@@ -64,11 +64,7 @@ export function Callout({ letter, lines = [], at, to, label = "right", onCallout
       {leaders.map(({ d, toX, toY }) => (
         <g key={d}>
           <path d={d} className="dr-leader" />
-          {isMarked ? (
-            <Cross x={toX} y={toY} />
-          ) : (
-            <circle cx={toX} cy={toY} r="3" className="dr-solid" />
-          )}
+          {isMarked ? <Cross x={toX} y={toY} /> : <circle cx={toX} cy={toY} r="3" className="dr-solid" />}
         </g>
       ))}
       <g className="dr-mark">

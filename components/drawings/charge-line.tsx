@@ -47,7 +47,7 @@ export function ChargeLineDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[40, 164]}
+            at={[58, 168]}
             to={[[70, 112]]}
             label="below"
             onCallout={onCallout}

@@ -43,8 +43,8 @@ export function LanyardDrawing({ size = "full", onCallout }: DrawingProps) {
           <path d="M258 124H271V148H258Z" className="dr-part" />
           <circle cx="247" cy="136" r="10" strokeWidth="7" className="dr-wire-out" />
           <circle cx="247" cy="136" r="10" strokeWidth="2.6" className="dr-wire-in" />
-          <Wire d="M222 139C206 142 206 188 180 190S146 148 134 138" width={8} kind="cable" />
-          <CableEnd x={224} y={138} turn={-7} />
+          <Wire d="M213 142C202 206 152 206 131 139" width={8} kind="cable" />
+          <CableEnd x={220} y={140} turn={-10} />
           <CableEnd x={122} y={130} turn={206} />
           <path d="M74 112H86Q98 112 98 124T86 138H74Z" className="dr-part" />
           <QuickLink x={98} y={124} turn={10} scale={1.15} />
@@ -52,23 +52,17 @@ export function LanyardDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[226, 64]}
+            at={[302, 72]}
             to={[[265, 132]]}
             label="above"
             onCallout={onCallout}
           />
-          <Callout
-            letter="B"
-            lines={words.callouts.B}
-            at={[96, 44]}
-            to={[[90, 118]]}
-            onCallout={onCallout}
-          />
+          <Callout letter="B" lines={words.callouts.B} at={[96, 44]} to={[[90, 118]]} onCallout={onCallout} />
           <Callout
             letter="C"
             lines={words.callouts.C}
             at={[176, 296]}
-            to={[[180, 190]]}
+            to={[[174, 190]]}
             onCallout={onCallout}
           />
         </>

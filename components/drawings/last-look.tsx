@@ -82,7 +82,7 @@ export function LastLookDrawing({ size = "full", only, onCallout }: LastLookProp
               <Callout
                 letter="A"
                 lines={words.callouts.A}
-                at={[110, 22]}
+                at={[110, 26]}
                 to={[[108, 160]]}
                 onCallout={onCallout}
               />

@@ -48,7 +48,7 @@ export function PintleDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[262, 82]}
+            at={[256, 76]}
             to={[[232, 164]]}
             onCallout={onCallout}
           />
@@ -82,10 +82,7 @@ function PintleSmall() {
         <>
           <path d="M0 14H12V66H0Z" className="dr-part dr-shade" />
           <path d="M38 30H74V48H38ZM74 32H88V46H74Z" className="dr-part" />
-          <path
-            d="M12 28H26V38A11 11 0 0 0 48 38L50 30Q58 24 60 36Q58 62 36 64H12Z"
-            className="dr-part"
-          />
+          <path d="M12 28H26V38A11 11 0 0 0 48 38L50 30Q58 24 60 36Q58 62 36 64H12Z" className="dr-part" />
           <circle cx="37" cy="38" r="8.5" className="dr-part" />
           <circle cx="37" cy="38" r="8.5" fill={hatch} />
           <circle cx="72" cy="39" r="8.5" className="dr-part" />

@@ -36,7 +36,7 @@ export function WheelsDrawing({ size = "full", standing = false, onCallout }: Wh
           <Callout
             letter={standing ? "A" : "B"}
             lines={standing ? stopped.callouts.A : rolled.callouts.B}
-            at={[166, 318]}
+            at={[166, 310]}
             to={[
               [216, 262],
               [336, 262],

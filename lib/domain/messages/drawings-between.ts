@@ -61,10 +61,10 @@ export const betweenWords = {
     title: "Short cables of the removable base-plate arms, from above",
     description:
       "Two removable arms sit in the base plate’s sockets on the car. Each has a short cable of its own from an eye on " +
-      "the arm to an eye on the car’s frame, and every link is screwed shut.",
+      "the arm to an eye on the part of the base plate that stays on the car, and every link is screwed shut.",
     callouts: {
       A: ["one at", "each arm"],
-      B: ["to the car’s", "frame"],
+      B: ["to the part that", "stays on the car"],
       C: ["links screwed shut"],
     },
   },
@@ -76,7 +76,7 @@ export const betweenWords = {
     callouts: {
       A: ["latch home, left and right"],
       B: ["both arms", "drawn out"],
-      C: ["plunger down"],
+      C: ["plunger", "down"],
     },
   },
   lanyard: {

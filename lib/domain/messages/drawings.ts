@@ -169,7 +169,8 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
   },
   "last-look-tires": {
     title: "Every tire of the rig from above",
-    description: "A path leads once around the coach’s tail, the bar and the car. Every tire is marked on it.",
+    description:
+      "A path leads once around the coach’s tail, the bar and the car. Every tire is marked on it.",
     callouts: {
       A: ["every tire"],
     },
