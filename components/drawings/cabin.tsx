@@ -13,7 +13,7 @@ const words = drawingWords.cabin;
 export function CabinDrawing({ size = "full", onCallout }: DrawingProps) {
   if (size === "small") return <CabinSmall />;
   return (
-    <Frame {...words} height={350}>
+    <Frame {...words} height={358}>
       {(hatch) => (
         <>
           {/* Windshield, dash, instrument hood. */}
@@ -87,7 +87,7 @@ export function CabinDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[192, 322]}
+            at={[198, 332]}
             to={[[230, 300]]}
             onCallout={onCallout}
           />

@@ -37,7 +37,7 @@ export function Callout({ letter, lines = [], at, to, label = "right", onCallout
     return { d: `M${startX.toFixed(1)} ${startY.toFixed(1)}L${toX} ${toY}`, toX, toY };
   });
   const anchor = label === "left" ? "end" : label === "right" ? "start" : "middle";
-  const textX = label === "left" ? x - radius - 7 : label === "right" ? x + radius + 7 : x;
+  const textX = label === "left" ? x - radius - 8 : label === "right" ? x + radius + 8 : x;
   const firstY = {
     left: y + 5.5 - ((rows - 1) * lineHeight) / 2,
     right: y + 5.5 - ((rows - 1) * lineHeight) / 2,
@@ -68,7 +68,7 @@ export function Callout({ letter, lines = [], at, to, label = "right", onCallout
         </g>
       ))}
       <g className="dr-mark">
-        {isMarked && <circle cx={x} cy={y} r={radius + 4.5} className="dr-mark-rim" />}
+        {isMarked && <circle cx={x} cy={y} r={radius + 3.5} className="dr-mark-rim" />}
         <circle cx={x} cy={y} r={radius} className="dr-ring" />
         <text x={x} y={y + 6} className="dr-letter">
           {letter}
@@ -107,7 +107,7 @@ function besideOf(
   lines: readonly string[],
   { x, y, anchor }: { x: number; y: number; anchor: string },
 ): Stretch {
-  const length = Math.max(0, ...lines.map((line) => line.length)) * 8.4;
+  const length = Math.max(0, ...lines.map((line) => line.length)) * 7.8;
   const from = { start: 0, middle: -length / 2, end: -length }[anchor] ?? 0;
   return [x + from, y, x + from + length, y];
 }
