@@ -13,59 +13,57 @@ export function ChargeLineDrawing({ size = "full", onCallout }: DrawingProps) {
     <Frame {...words} height={336}>
       {(hatch) => (
         <>
-          {/* Battery on its tray. */}
-          <path d="M188 296H384V312H188Z" fill={hatch} />
-          <path d="M188 296H384V312H188Z" className="dr-part dr-open" />
-          <path d="M204 176H368V296H204Z" className="dr-edge" />
-          <path d="M198 160H374V184H198Z" className="dr-edge dr-shade" />
-          <path d="M222 214H350V276H222Z" className="dr-fine" />
-          <path d="M240 237V253M232 245H248M324 245H340" className="dr-edge" />
-          <path d="M322 146H346V160H322Z" className="dr-part" />
-          <path d="M232 140H256V160H232Z" className="dr-part" />
+          {/* Battery on its tray, the minus post under its cap. */}
+          <path d="M104 298H384V316H104Z" fill={hatch} />
+          <path d="M104 298H384V316H104Z" className="dr-part dr-open" />
+          <path d="M120 192H368V298H120Z" className="dr-edge" />
+          <path d="M150 214H338V276H150Z" className="dr-fine" />
+          <path d="M303 235V255M293 245H313M175 245H195" className="dr-edge dr-open" />
+          <path d="M112 172H376V196H112Z" className="dr-edge dr-shade" />
+          <path d="M172 154H196V172H172Z" className="dr-part" />
+          <path d="M291 150H315V172H291Z" className="dr-part" />
 
-          {/* Line: from the coach's side into the plug, on to the fuse, up to the post. */}
-          <Wire d="M-4 96H40" width={13} />
-          <Wire d="M124 96C150 96 150 96 166 96C236 96 222 96 238 120" width={13} />
-          <Wire d="M-4 96H24" width={13} />
+          {/* The line: into the plug, on to the fuse, down to the post. */}
+          <Wire d="M-4 94H30" width={13} />
+          <Wire d="M112 94H230C286 94 276 100 286 136" width={13} />
 
           {/* Plug and socket, pushed home. */}
-          <path d="M16 76H70V116H16Z" className="dr-edge dr-shade" />
-          <path d="M26 84V108M34 84V108M42 84V108" className="dr-fine" />
-          <path d="M70 70H118V122H70Z" className="dr-edge" />
-          <path d="M70 88H106M70 104H106" className="dr-behind" />
+          <path d="M16 74H70V114H16Z" className="dr-edge dr-shade" />
+          <path d="M26 82V106M34 82V106M42 82V106" className="dr-fine" />
+          <path d="M70 68H118V120H70Z" className="dr-edge" />
+          <path d="M70 86H106M70 102H106" className="dr-behind" />
 
           {/* Clamp round the post. */}
-          <path d="M222 122H266Q274 122 274 130V146H214V130Q214 122 222 122Z" className="dr-edge dr-shade" />
-          <circle cx="244" cy="134" r="7" className="dr-part" />
+          <path d="M275 132H325Q333 132 333 140V160H267V140Q267 132 275 132Z" className="dr-edge dr-shade" />
+          <circle cx="303" cy="146" r="7.5" className="dr-part" />
 
           {/* Fuse holder, cover shut. */}
-          <path d="M142 76H196V118H142Z" className="dr-edge" />
-          <path d="M138 66H200V84H138Z" className="dr-edge dr-shade" />
-          <path d="M154 118V128H162V118M176 118V128H184V118" className="dr-fine" />
-          <path d="M156 94H182V108H156Z" className="dr-fine" />
+          <path d="M154 72H214V120H154Z" className="dr-edge" />
+          <path d="M149 60H219V80H149Z" className="dr-edge dr-shade" />
+          <path d="M168 92H200V108H168Z" className="dr-fine" />
+          <path d="M176 92V108M192 92V108" className="dr-fine" />
 
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[58, 168]}
-            to={[[70, 112]]}
+            at={[52, 162]}
+            to={[[70, 110]]}
             label="below"
             onCallout={onCallout}
           />
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[120, 28]}
-            to={[[160, 74]]}
-            label="right"
+            at={[126, 30]}
+            to={[[172, 70]]}
             onCallout={onCallout}
           />
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[258, 66]}
-            to={[[248, 126]]}
-            label="right"
+            at={[324, 80]}
+            to={[[314, 138]]}
+            label="above"
             onCallout={onCallout}
           />
         </>

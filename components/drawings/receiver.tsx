@@ -55,8 +55,8 @@ export function ReceiverDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[28, 240]}
-            to={[[98, 176]]}
+            at={[28, 252]}
+            to={[[104, 181]]}
             onCallout={onCallout}
           />
           <Callout
