@@ -54,7 +54,7 @@ export function BarStowedDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[366, 290]}
+            at={[362, 286]}
             to={[
               [345, 252],
               [354, 174],
@@ -65,7 +65,7 @@ export function BarStowedDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[24, 226]}
+            at={[28, 226]}
             to={[[34, 168]]}
             label="right"
             onCallout={onCallout}

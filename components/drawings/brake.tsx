@@ -87,7 +87,7 @@ function Box({ onCallout }: Pick<DrawingProps, "onCallout">) {
       <Callout
         letter="D"
         lines={box.callouts.D}
-        at={[366, 318]}
+        at={[360, 310]}
         to={[[343, 262]]}
         label="left"
         onCallout={onCallout}

@@ -13,7 +13,7 @@ const words = drawingWords.cabin;
 export function CabinDrawing({ size = "full", onCallout }: DrawingProps) {
   if (size === "small") return <CabinSmall />;
   return (
-    <Frame {...words} height={350}>
+    <Frame {...words} height={358}>
       {(hatch) => (
         <>
           {/* Windshield, dash, instrument hood. */}
@@ -80,14 +80,14 @@ export function CabinDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[26, 306]}
+            at={[28, 306]}
             to={[[62, 242]]}
             onCallout={onCallout}
           />
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[192, 330]}
+            at={[198, 332]}
             to={[[230, 300]]}
             onCallout={onCallout}
           />

@@ -80,7 +80,7 @@ export function CablesDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[100, 254]}
+            at={[92, 244]}
             to={[[147, 160]]}
             onCallout={onCallout}
           />

@@ -61,7 +61,7 @@ export function ChocksDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[236, 26]}
+            at={[236, 28]}
             to={[[322, 88]]}
             label="left"
             onCallout={onCallout}

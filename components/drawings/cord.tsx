@@ -78,7 +78,7 @@ function On({ onCallout }: LinesProps) {
       <path d="M60 228Q76 216 98 222L102 231" className="dr-part dr-open" />
       <path d="M308 228Q296 216 278 222L274 231" className="dr-part dr-open" />
 
-      <Callout letter="A" lines={on.callouts.A} at={[22, 294]} to={[[72, 244]]} onCallout={onCallout} />
+      <Callout letter="A" lines={on.callouts.A} at={[24, 298]} to={[[72, 244]]} onCallout={onCallout} />
       <Callout letter="B" lines={on.callouts.B} at={[158, 246]} to={[[204, 313]]} onCallout={onCallout} />
       <Callout letter="C" lines={on.callouts.C} at={[142, 40]} to={[[102, 140]]} onCallout={onCallout} />
       <Callout

@@ -1,9 +1,9 @@
-import { drawingWords } from "@/lib/domain/messages/drawings";
+import { drawingWords, type DrawingWords } from "@/lib/domain/messages/drawings";
 import { Callout } from "./callout";
 import { Frame, type DrawingProps } from "./frame";
 import { SmallFrame } from "./small-frame";
 
-const words = drawingWords["last-look"];
+const both = drawingWords["last-look"];
 const walk = "M20 270H352Q384 270 384 238V82Q384 50 352 50H22";
 const joints = [
   [108, 160],
@@ -31,7 +31,8 @@ type LastLookProps = DrawingProps & { only?: "joints" | "tires" };
 
 /** The whole rig from above with the walk around it: a ring for each joint to put a hand on, a bar for each tire. */
 export function LastLookDrawing({ size = "full", only, onCallout }: LastLookProps) {
-  if (size === "small") return <LastLookSmall />;
+  const words = only ? drawingWords[`last-look-${only}`] : both;
+  if (size === "small") return <LastLookSmall words={words} />;
   return (
     <Frame {...words} height={330}>
       {(hatch) => (
@@ -81,7 +82,7 @@ export function LastLookDrawing({ size = "full", only, onCallout }: LastLookProp
               <Callout
                 letter="A"
                 lines={words.callouts.A}
-                at={[110, 22]}
+                at={[110, 26]}
                 to={[[108, 160]]}
                 onCallout={onCallout}
               />
@@ -89,8 +90,8 @@ export function LastLookDrawing({ size = "full", only, onCallout }: LastLookProp
           )}
           {only !== "joints" && (
             <Callout
-              letter="B"
-              lines={words.callouts.B}
+              letter={only ? "A" : "B"}
+              lines={only ? words.callouts.A : words.callouts.B}
               at={[250, 302]}
               to={[
                 [284, 244],
@@ -122,7 +123,7 @@ function Hand({ x, y, turn }: { x: number; y: number; turn: number }) {
   );
 }
 
-function LastLookSmall() {
+function LastLookSmall({ words }: { words: DrawingWords }) {
   return (
     <SmallFrame {...words}>
       {() => (

@@ -1,19 +1,29 @@
 import type { ReactNode } from "react";
 import type { CalloutLetter, DrawingSide } from "@/lib/domain/messages/drawings";
 import type { DrawnState, PartKey } from "@/lib/domain/revision";
+import { AirLineDrawing } from "./air-line";
 import { ArmDrawing } from "./arm";
+import { ArmQuickDrawing } from "./arm-quick";
+import { ArmsLockedDrawing } from "./arms-locked";
+import { BallDrawing } from "./ball";
 import { BarStowedDrawing } from "./bar-stowed";
+import { BasePlateDrawing } from "./base-plate";
 import { BrakeDrawing } from "./brake";
 import { CabinDrawing } from "./cabin";
 import { CablesDrawing } from "./cables";
+import { ChargeLineDrawing } from "./charge-line";
 import { ChocksDrawing } from "./chocks";
 import { CordDrawing } from "./cord";
 import { type LampLook, LampsDrawing } from "./lamps";
+import { LanyardDrawing } from "./lanyard";
 import { LastLookDrawing } from "./last-look";
+import { PintleDrawing } from "./pintle";
 import { ReceiverDrawing } from "./receiver";
+import { ShortCablesDrawing } from "./short-cables";
+import { type Shown, ShownContext } from "./shown";
 import { WheelsDrawing } from "./wheels";
 
-export type PartDrawingProps = {
+export type PartDrawingProps = Omit<Shown, "bare"> & {
   part: PartKey;
   /** Which arm; the other parts have one drawing for both sides. */
   side?: DrawingSide;
@@ -27,7 +37,9 @@ export type PartDrawingProps = {
   onCallout?: (letter: CalloutLetter) => void;
 };
 
-const table: Record<PartKey, (props: PartDrawingProps) => ReactNode> = {
+type ArtProps = Omit<PartDrawingProps, keyof Shown>;
+
+const table: Record<PartKey, (props: ArtProps) => ReactNode> = {
   receiver: ReceiverDrawing,
   arm: ArmDrawing,
   cables: CablesDrawing,
@@ -41,9 +53,22 @@ const table: Record<PartKey, (props: PartDrawingProps) => ReactNode> = {
   ),
   chocks: ChocksDrawing,
   "bar-stowed": BarStowedDrawing,
+  ball: BallDrawing,
+  pintle: PintleDrawing,
+  "arm-quick": ArmQuickDrawing,
+  "base-plate": BasePlateDrawing,
+  "short-cables": ShortCablesDrawing,
+  "arms-locked": ArmsLockedDrawing,
+  lanyard: LanyardDrawing,
+  "air-line": AirLineDrawing,
+  "charge-line": ChargeLineDrawing,
 };
 
-/** The drawing of one part as it should be. */
-export function PartDrawing(props: PartDrawingProps) {
-  return table[props.part](props);
+/** The drawing of one part as it should be, with what someone said is not so struck out. */
+export function PartDrawing({ marked, effect, figures, ...art }: PartDrawingProps) {
+  return (
+    <ShownContext value={{ marked, effect, figures, bare: art.drawn === "place" }}>
+      {table[art.part](art)}
+    </ShownContext>
+  );
 }

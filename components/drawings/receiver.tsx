@@ -55,14 +55,14 @@ export function ReceiverDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="A"
             lines={words.callouts.A}
-            at={[26, 240]}
-            to={[[98, 176]]}
+            at={[28, 252]}
+            to={[[104, 181]]}
             onCallout={onCallout}
           />
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[196, 306]}
+            at={[196, 302]}
             to={[[258, 290]]}
             label="left"
             onCallout={onCallout}

@@ -34,9 +34,9 @@ export function WheelsDrawing({ size = "full", standing = false, onCallout }: Wh
 
           {!standing && <ArmsWindow onCallout={onCallout} />}
           <Callout
-            letter="B"
-            lines={words.callouts.B}
-            at={[166, 318]}
+            letter={standing ? "A" : "B"}
+            lines={standing ? stopped.callouts.A : rolled.callouts.B}
+            at={[166, 310]}
             to={[
               [216, 262],
               [336, 262],

@@ -1,5 +1,5 @@
 import { useRef } from "react";
-import { CabinDrawing } from "@/components/drawings/cabin";
+import { DrawingSheet } from "@/components/drawings/drawing-sheet";
 import { Button } from "@/components/ui/button";
 import type { Recorder, WalkView } from "@/lib/client/recorder";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
@@ -47,11 +47,7 @@ export function CarQuestion({ recorder, view, walk }: CarQuestionProps) {
       }
       strip={<WalkStrip view={view} />}
       where={<p className="px-4 py-1.5 text-base font-extrabold">{words.title}</p>}
-      picture={
-        <div className="absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full [&_.dr-callout]:hidden">
-          <CabinDrawing />
-        </div>
-      }
+      picture={<DrawingSheet part="cabin" drawn="place" />}
       words={
         <>
           <h2

@@ -1,9 +1,9 @@
-import { PartDrawing } from "@/components/drawings/part-drawing";
 import type { Recorder, WalkView } from "@/lib/client/recorder";
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { BecauseQuestion } from "./because-question";
 import { useCallouts } from "./callouts";
+import { CheckPicture } from "./check-picture";
 import { CheckWords } from "./check-words";
 import { FaultDetails } from "./fault-details";
 import { MarkButtons } from "./mark-buttons";
@@ -49,16 +49,12 @@ export function CheckScreen({ recorder, view, walk, steps, step }: CheckScreenPr
       strip={<WalkStrip view={view} now={check.key} />}
       where={<WalkPlace walk={walk.id} step={step} total={steps.length} />}
       picture={
-        <div
-          className={`absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full ${asDrawn ? "" : "[&_.dr-callout]:hidden"}`}
-        >
-          <PartDrawing
-            part={check.part}
-            side={check.side}
-            drawn={check.drawn}
-            onCallout={asDrawn ? callouts.touch : undefined}
-          />
-        </div>
+        <CheckPicture
+          check={check}
+          marked={callouts.chosen}
+          onTouch={callouts.touch}
+          asking={marking.asking !== null}
+        />
       }
       words={
         <CheckWords

@@ -22,7 +22,7 @@ export function WalkFrame({ head, strip, where, picture, words, acts }: WalkFram
       <div className="md:col-start-2 md:row-start-1">{head}</div>
       <div className="px-4 md:col-start-2 md:row-start-2 md:pb-2">{strip}</div>
       <div className="md:col-start-1 md:row-start-1 md:self-end">{where}</div>
-      <div className="relative min-h-44 flex-1 border-y-hair border-rule md:col-start-1 md:row-span-3 md:row-start-2 md:border-r-hair md:border-b-0">
+      <div className="flex flex-1 flex-col border-y-hair border-rule md:col-start-1 md:row-span-3 md:row-start-2 md:border-r-hair md:border-b-0">
         {picture}
       </div>
       <div className="md:col-start-2 md:row-start-3">{words}</div>

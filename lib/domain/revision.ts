@@ -26,6 +26,15 @@ export const partKeys = [
   "last-look",
   "chocks",
   "bar-stowed",
+  "ball",
+  "pintle",
+  "arm-quick",
+  "base-plate",
+  "short-cables",
+  "arms-locked",
+  "lanyard",
+  "air-line",
+  "charge-line",
 ] as const;
 export type PartKey = (typeof partKeys)[number];
 
@@ -38,6 +47,7 @@ export const drawnStates = ["off", "standing", "joints", "tires", "installed", "
 export type DrawnState = (typeof drawnStates)[number];
 
 export const effects = ["hold", "fix"] as const;
+export type Effect = (typeof effects)[number];
 
 /**
  * What a check's value is measured in. `unit` is the one it is kept in; a person enters it in theirs. `beside` is what
@@ -53,7 +63,7 @@ export type Measure = z.infer<typeof measureShape>;
 
 /**
  * One thing to look at: what is asked, how to look, why it matters and what a fault does. `who` says who may mend it,
- * `touches` names the checks that mending it can change.
+ * `touches` names the checks that mending it can change, `figures` are the rig's own numbers by callout.
  */
 export const checkShape = z.looseObject({
   key: z.string().check(z.minLength(1)),
@@ -71,6 +81,7 @@ export const checkShape = z.looseObject({
   who: z.optional(z.string()),
   touches: z.optional(z.array(z.string())),
   measure: z.optional(measureShape),
+  figures: z.optional(z.partialRecord(z.enum(["A", "B", "C", "D"]), z.string())),
 });
 export type Check = z.infer<typeof checkShape>;
 

@@ -1,13 +1,23 @@
 import type { PartKey, StationKey } from "../revision";
+import { betweenWords } from "./drawings-between";
 
 export type DrawingSide = "left" | "right";
-export type CalloutLetter = "A" | "B" | "C" | "D";
+export const calloutLetters = ["A", "B", "C", "D"] as const;
+export type CalloutLetter = (typeof calloutLetters)[number];
+/** The parts that are drawn for each side. */
+export type SidedPart = "arm" | "arm-quick";
 /**
  * An arm end has words of its own for each side, the cord when it is off, the wheels when they stand, the brake when it
- * is built into the car.
+ * is built into the car, the last look where it is for joints or for tires alone.
  */
 export type DrawingKey =
-  Exclude<PartKey, "arm"> | `arm-${DrawingSide}` | "cord-off" | "wheels-standing" | "brake-installed";
+  | Exclude<PartKey, SidedPart>
+  | `${SidedPart}-${DrawingSide}`
+  | "cord-off"
+  | "wheels-standing"
+  | "brake-installed"
+  | "last-look-joints"
+  | "last-look-tires";
 
 export type DrawingWords = {
   title: string;
@@ -29,6 +39,7 @@ const armDescription = (side: string) =>
   "tab and its ring is snapped over the pin’s end.";
 
 export const drawingWords: Record<DrawingKey, DrawingWords> = {
+  ...betweenWords,
   receiver: {
     title: "Receiver, drop receiver and bar at the coach’s tail",
     description:
@@ -129,7 +140,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
     description:
       "The coach and the car stand still. Marked are the wheels on one side of the car; each has its pair on the other side.",
     callouts: {
-      B: ["left against right"],
+      A: ["left against right"],
     },
   },
   lamps: {
@@ -145,6 +156,23 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
     callouts: {
       A: ["a hand on every joint"],
       B: ["every tire"],
+    },
+  },
+  "last-look-joints": {
+    title: "Every joint of the rig from above",
+    description:
+      "A path leads once around the coach’s tail, the bar and the car. Marked on it are the joints to put a hand on: " +
+      "hitch pin, both arm pins, both cables at each end, the cord’s two plugs and the lanyard.",
+    callouts: {
+      A: ["a hand on every joint"],
+    },
+  },
+  "last-look-tires": {
+    title: "Every tire of the rig from above",
+    description:
+      "A path leads once around the coach’s tail, the bar and the car. Every tire is marked on it.",
+    callouts: {
+      A: ["every tire"],
     },
   },
   chocks: {
@@ -177,6 +205,12 @@ export const lampWords = {
   flashing: "flashing",
   dark: "dark",
   description: (left: string, right: string) => `Left lamp ${left}, right lamp ${right}.`,
+} as const;
+
+export const legendWords = {
+  list: "Called out on the drawing",
+  /** After a label that someone touched, for someone who cannot see that it is struck out. */
+  marked: "not as drawn",
 } as const;
 
 /** Where you stand on the rig plan, for someone who cannot see it. */
