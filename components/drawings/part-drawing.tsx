@@ -10,6 +10,18 @@ import { ChocksDrawing } from "./chocks";
 import { CordDrawing } from "./cord";
 import { type LampLook, LampsDrawing } from "./lamps";
 import { LastLookDrawing } from "./last-look";
+import { CoachHeldDrawing } from "./coach-held";
+import { SteeringDrawing } from "./steering";
+import { ParkingBrakeDrawing } from "./parking-brake";
+import { FuseDrawing } from "./fuse";
+import { PedalDrawing } from "./pedal";
+import { BrakeAirDrawing } from "./brake-air";
+import { BrakeHydraulicDrawing } from "./brake-hydraulic";
+import { BrakeSurgeDrawing } from "./brake-surge";
+import { MonitorDrawing } from "./monitor";
+import { ManualApplyDrawing } from "./manual-apply";
+import { JacksDrawing } from "./jacks";
+import { LightBarDrawing } from "./light-bar";
 import { ReceiverDrawing } from "./receiver";
 import { WheelsDrawing } from "./wheels";
 
@@ -41,6 +53,18 @@ const table: Record<PartKey, (props: PartDrawingProps) => ReactNode> = {
   ),
   chocks: ChocksDrawing,
   "bar-stowed": BarStowedDrawing,
+  "coach-held": CoachHeldDrawing,
+  steering: SteeringDrawing,
+  "parking-brake": ParkingBrakeDrawing,
+  fuse: ({ drawn, ...props }) => <FuseDrawing off={drawn === "off"} {...props} />,
+  pedal: PedalDrawing,
+  "brake-air": BrakeAirDrawing,
+  "brake-hydraulic": BrakeHydraulicDrawing,
+  "brake-surge": BrakeSurgeDrawing,
+  monitor: MonitorDrawing,
+  "manual-apply": ManualApplyDrawing,
+  jacks: JacksDrawing,
+  "light-bar": LightBarDrawing,
 };
 
 /** The drawing of one part as it should be. */

@@ -26,6 +26,18 @@ export const partKeys = [
   "last-look",
   "chocks",
   "bar-stowed",
+  "coach-held",
+  "steering",
+  "parking-brake",
+  "fuse",
+  "pedal",
+  "brake-air",
+  "brake-hydraulic",
+  "brake-surge",
+  "monitor",
+  "manual-apply",
+  "jacks",
+  "light-bar",
 ] as const;
 export type PartKey = (typeof partKeys)[number];
 

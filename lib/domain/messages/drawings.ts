@@ -1,13 +1,19 @@
 import type { PartKey, StationKey } from "../revision";
+import { cabinDrawingWords } from "./drawings-cabin";
 
 export type DrawingSide = "left" | "right";
 export type CalloutLetter = "A" | "B" | "C" | "D";
 /**
- * An arm end has words of its own for each side, the cord when it is off, the wheels when they stand, the brake when it
+ * An arm end has words of its own for each side, the cord when it is off, the fuse when it is out, the wheels when they stand, the brake when it
  * is built into the car.
  */
 export type DrawingKey =
-  Exclude<PartKey, "arm"> | `arm-${DrawingSide}` | "cord-off" | "wheels-standing" | "brake-installed";
+  | Exclude<PartKey, "arm">
+  | `arm-${DrawingSide}`
+  | "cord-off"
+  | "fuse-off"
+  | "wheels-standing"
+  | "brake-installed";
 
 export type DrawingWords = {
   title: string;
@@ -168,6 +174,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       C: ["hitch pin,", "its clip"],
     },
   },
+  ...cabinDrawingWords,
 };
 
 export const lampWords = {
