@@ -1,6 +1,6 @@
 import { drawingWords } from "@/lib/domain/messages/drawings";
 import { Callout } from "./callout";
-import { Footwell, Pedal } from "./footwell";
+import { Footwell, Pedal, Seat } from "./footwell";
 import { Frame, type DrawingProps } from "./frame";
 import { SmallFrame } from "./small-frame";
 import { Wire } from "./wire";
@@ -17,9 +17,7 @@ export function BrakeAirDrawing({ size = "full", onCallout }: DrawingProps) {
           <Footwell hatch={hatch} />
           <Pedal />
           <Cylinder />
-          <path d="M394 66H350Q328 66 326 86L322 174Q322 190 338 190H394Z" fill={hatch} />
-          <path d="M394 66H350Q328 66 326 86L322 174Q322 190 338 190H394" className="dr-edge dr-open" />
-          <path d="M340 190V206M384 190V206" className="dr-part" />
+          <Seat hatch={hatch} />
 
           {/* The line between the vehicles. */}
           <path d="M10 230H194V340H10Z" className="dr-edge" />
@@ -67,14 +65,14 @@ function Cylinder() {
       <Wire d="M226 186C216 200 206 201 190 201H76" width={7} kind="cord" />
       <g transform="translate(122 150) rotate(14)">
         <path d="M-2 0H30" strokeWidth="10" className="dr-wire-out" />
-        <path d="M-2 0H30" strokeWidth="5.400" className="dr-wire-in" />
+        <path d="M-2 0H30" strokeWidth="5.4" className="dr-wire-in" />
         <path d="M-14 -19H4V-9H-4V9H4V19H-14" className="dr-part dr-open" />
         <path d="M4 -12H12V12H4Z" className="dr-part dr-shade" />
         <path d="M24 -16H116V16H24Z" className="dr-edge" />
         <path d="M24 -19H36V19H24ZM104 -19H118V19H104Z" className="dr-part dr-shade" />
         <path d="M40 -8H100" className="dr-fine" />
         <path d="M118 -6H130A6 6 0 0 1 130 6H118Z" className="dr-part" />
-        <circle cx="131" r="3.500" className="dr-solid" />
+        <circle cx="131" r="3.5" className="dr-solid" />
       </g>
     </>
   );
@@ -100,11 +98,11 @@ function CoachPedal() {
       <path d="M222 312A12 12 0 0 1 246 312V324H222Z" className="dr-part dr-lit" />
       <path d="M216 324H252" className="dr-part" />
       <path d="M216 302L209 296M252 302L259 296M234 293V287" className="dr-line" />
-      <path d="M288 329L338 285L344 292L296 334" className="dr-behind dr-open" />
+      <path d="M288 326L342 294L346 301L294 334" className="dr-behind dr-open" />
       <path d="M286 327L358 312" strokeWidth="13" className="dr-wire-out" />
-      <path d="M286 327L358 312" strokeWidth="7.500" className="dr-wire-in" />
+      <path d="M286 327L358 312" strokeWidth="7.5" className="dr-wire-in" />
       <circle cx="288" cy="328" r="5" className="dr-part" />
-      <path d="M336 274V306M328 297L336 307L344 297" className="dr-edge dr-open" />
+      <path d="M362 284V304M354 295L362 305L370 295" className="dr-edge dr-open" />
     </>
   );
 }

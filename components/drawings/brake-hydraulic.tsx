@@ -38,7 +38,7 @@ export function BrakeHydraulicDrawing({ size = "full", onCallout }: DrawingProps
           <path d="M136 146H214V218H136Z" className="dr-edge dr-shade" />
           <path d="M144 147V217M151 147V217M206 147V217M199 147V217" className="dr-fine" />
           <path d="M158 146q6 9 0 18t0 18t0 18t0 18H192q6 -9 0 -18t0 -18t0 -18t0 -18Z" className="dr-blank" />
-          <path d="M160 147.600H192V160H160ZM160 204H192V216.400H160Z" fill={hatch} />
+          <path d="M160 147.6H192V160H160ZM160 204H192V216.4H160Z" fill={hatch} />
           <path
             d="M158 146q6 9 0 18t0 18t0 18t0 18M192 146q6 9 0 18t0 18t0 18t0 18M160 160H194M160 204H194"
             className="dr-fine dr-open"
@@ -80,7 +80,7 @@ function BrakeHydraulicSmall() {
           <path d="M0 66H88" className="dr-part" />
           <path d="M8 8H16V54H8Z" className="dr-part dr-shade" />
           <path d="M66 32Q80 32 92 44" strokeWidth="12" className="dr-wire-out" />
-          <path d="M66 32Q80 32 92 44" strokeWidth="7.500" className="dr-wire-in" />
+          <path d="M66 32Q80 32 92 44" strokeWidth="7.5" className="dr-wire-in" />
           <path d="M16 25H32V39H16ZM54 25H66V39H54Z" className="dr-part" />
           <path d="M30 18H56V46H30Z" className="dr-part dr-shade" />
           <path d="M37 19V45M43 19V45M49 19V45" className="dr-fine" />

@@ -1,6 +1,6 @@
 import { drawingWords } from "@/lib/domain/messages/drawings";
 import { Callout } from "./callout";
-import { DashLamp } from "./dash-lamp";
+import { DashLamp, onAmber } from "./dash-lamp";
 import { Frame, type DrawingProps } from "./frame";
 import { SmallFrame } from "./small-frame";
 
@@ -24,13 +24,10 @@ export function CoachHeldDrawing({ size = "full", onCallout }: DrawingProps) {
           {/* The coach's dash. */}
           <path d="M10 10H186V126H10Z" className="dr-edge" />
           <path
-            d="M12 82A52 52 0 0 1 64 112V124H12ZM184 82A52 52 0 0 0 132 112V124H184Z"
+            d="M11.6 82A52 52 0 0 1 62 124.4H11.6ZM184.4 82A52 52 0 0 0 134 124.4H184.4Z"
             className="dr-tone"
           />
-          <path
-            d="M11.600 82A52 52 0 0 1 62 125M184.400 82A52 52 0 0 0 134 125"
-            className="dr-part dr-open"
-          />
+          <path d="M11.6 82A52 52 0 0 1 62 125M184.4 82A52 52 0 0 0 134 125" className="dr-part dr-open" />
           <path
             d="M14 98L22 99M24 90L28 96M38 94L36 101M50 105L44 109M182 98L174 99M158 94L160 101M146 105L152 109M172 90L168 96"
             className="dr-fine"
@@ -40,7 +37,7 @@ export function CoachHeldDrawing({ size = "full", onCallout }: DrawingProps) {
 
           {/* The car's wheel. */}
           <path d="M204 10H380V126H204Z" className="dr-edge" />
-          <path d="M205.600 117H378.400V124.400H205.600Z" fill={hatch} />
+          <path d="M205.6 117H378.4V124.4H205.6Z" fill={hatch} />
           <path d="M204 116H380M206 66H240A52 52 0 0 1 344 66H378" className="dr-part dr-open" />
           <circle cx="292" cy="74" r="42" className="dr-edge dr-shade" />
           <circle cx="292" cy="74" r="27" className="dr-part" />
@@ -53,19 +50,19 @@ export function CoachHeldDrawing({ size = "full", onCallout }: DrawingProps) {
           <Callout
             letter="B"
             lines={words.callouts.B}
-            at={[234, 156]}
+            at={[292, 158]}
+            label="left"
             to={[
-              [252, 106],
-              [332, 106],
+              [254, 107],
+              [330, 107],
             ]}
             onCallout={onCallout}
           />
           <Callout
             letter="C"
             lines={words.callouts.C}
-            at={[198, 314]}
-            label="left"
-            to={[[238, 280]]}
+            at={[140, 315]}
+            to={[[128, 286]]}
             onCallout={onCallout}
           />
         </>
@@ -74,7 +71,7 @@ export function CoachHeldDrawing({ size = "full", onCallout }: DrawingProps) {
   );
 }
 
-/** Coach and car one behind the other, apart, with a spirit level on the ground between them. */
+/** Coach and car one behind the other, apart; below the ground, a spirit level with its bubble in the middle. */
 function Vehicles() {
   return (
     <>
@@ -91,9 +88,10 @@ function Vehicles() {
           <circle cx={x} cy="267" r="7" className="dr-fine" />
         </g>
       ))}
-      <path d="M224 271H258V283H224Z" className="dr-fine" />
-      <path d="M235 272V282M247 272V282" className="dr-fine" />
-      <circle cx="239" cy="278.500" r="2.600" className="dr-solid" />
+      <path d="M262 304H342V326H262Z" className="dr-edge dr-shade" />
+      <path d="M276 309H328A6 6 0 0 1 328 321H276A6 6 0 0 1 276 309Z" className="dr-part" />
+      <path d="M294 310V320M310 310V320" className="dr-fine" />
+      <circle cx="302" cy="315" r="4.5" className="dr-part" />
       <path
         d="M262 272V252Q262 244 270 242L294 236L312 216Q315 213 320 213H350Q356 213 359 218L370 236Q378 240 378 250V272Z"
         className="dr-edge"
@@ -118,12 +116,12 @@ function CoachHeldSmall() {
           <path d="M0 68H88" className="dr-part" />
           <path d="M4 34Q6 22 12 20H38Q42 20 42 24V60H4Z" className="dr-part" />
           <path d="M9 36Q10 27 14 25H20V36Z" className="dr-fine dr-shade" />
-          <circle cx="24" cy="60" r="7.500" className="dr-part dr-shade" />
+          <circle cx="24" cy="60" r="7.5" className="dr-part dr-shade" />
           <path d="M50 60V50L56 47L63 36H76L82 47L85 50V60Z" className="dr-part" />
-          <circle cx="68" cy="59" r="8.500" className="dr-part dr-shade" />
+          <circle cx="68" cy="59" r="8.5" className="dr-part dr-shade" />
           <path d="M50 68L58 58L64 68ZM86 68L78 58L72 68Z" className="dr-fine dr-solid" />
           <circle cx="24" cy="10" r="7" className="dr-part dr-lit" />
-          <path d="M22 14V6.500H25A2.200 2.200 0 0 1 25 11H22" className="dr-fine dr-open" />
+          <path d="M22 14V6.5H25A2.2 2.2 0 0 1 25 11H22" stroke={onAmber} strokeWidth="1.6" fill="none" />
         </>
       )}
     </SmallFrame>

@@ -9,6 +9,18 @@ export function Footwell({ hatch, to = 394 }: { hatch: string; to?: number }) {
   );
 }
 
+/** The front edge of the driver's seat on that floor, cut. */
+export function Seat({ hatch }: { hatch: string }) {
+  const edge = "M394 66H350Q328 66 326 86L322 174Q322 190 338 190H394";
+  return (
+    <>
+      <path d={`${edge}Z`} fill={hatch} />
+      <path d={edge} className="dr-edge dr-open" />
+      <path d="M340 190V206M384 190V206" className="dr-part" />
+    </>
+  );
+}
+
 /** The brake pedal in that footwell with its bracket and stop; pressed, its place at rest is dashed. */
 export function Pedal({ pressed = false }: { pressed?: boolean }) {
   return (
@@ -32,7 +44,7 @@ export function Pedal({ pressed = false }: { pressed?: boolean }) {
       </g>
       <path d="M124 58H136V70H125Z" className="dr-solid" />
       <circle cx="100" cy="36" r="11" className="dr-edge" />
-      <circle cx="100" cy="36" r="3.500" className="dr-solid" />
+      <circle cx="100" cy="36" r="3.5" className="dr-solid" />
     </>
   );
 }

@@ -17,8 +17,11 @@ export function JacksDrawing({ size = "full", onCallout }: DrawingProps) {
 
           {/* Body, skirt cut, bumper, receiver. */}
           <path d="M-4 -4H342Q352 60 350 108H-4Z" className="dr-edge" />
-          <path d="M-4 108H350V122Q300 114 250 122T150 122T50 122T-4 122Z" fill={hatch} />
-          <path d="M-4 122Q50 130 50 122T150 122T250 122Q300 114 350 122V108" className="dr-fine dr-open" />
+          <path d="M-4 108H350V122q-22 7 -44 0t-44 0t-44 0t-44 0t-44 0t-44 0t-44 0t-44 0Z" fill={hatch} />
+          <path
+            d="M350 108V122q-22 7 -44 0t-44 0t-44 0t-44 0t-44 0t-44 0t-44 0t-44 0"
+            className="dr-fine dr-open"
+          />
           <path d="M338 52H349V84H336Z" className="dr-part dr-shade" />
           <path d="M-4 20H318V-4" className="dr-fine dr-open" />
 

@@ -99,7 +99,7 @@ function LightBarSmall() {
           <path d="M18 34V12M70 34V12" className="dr-edge" />
           <path d="M2 34H86V46H2Z" className="dr-edge" />
           <path d="M6 37H24V43H6ZM82 37H64V43H82Z" className="dr-fine dr-shade" />
-          <path d="M48 34Q50 26 56 22" className="dr-edge dr-open" />
+          <path d="M58 46Q56 53 61 58" className="dr-edge dr-open" />
           <path d="M34 50H54V58H34Z" className="dr-fine" />
         </>
       )}

@@ -15,7 +15,7 @@ export function ManualApplyDrawing({ size = "full", onCallout }: DrawingProps) {
       {(hatch) => (
         <>
           <path d="M8 10H190V246H8Z" className="dr-edge" />
-          <path d="M9.600 196H188.400V244.400H9.600Z" className="dr-tone" />
+          <path d="M9.6 196H188.4V244.4H9.6Z" className="dr-tone" />
           <path d="M9 196H189" className="dr-part" />
           <path
             d="M34 152H164Q172 152 172 160V204Q172 212 164 212H34Q26 212 26 204V160Q26 152 34 152Z"
@@ -23,10 +23,14 @@ export function ManualApplyDrawing({ size = "full", onCallout }: DrawingProps) {
           />
           <path d="M40 166H84V198H40Z" className="dr-part dr-shade" />
           <path d="M46 176H76M46 186H68" className="dr-fine" />
-          <circle cx="144" cy="182" r="10" className="dr-part dr-lit" />
+          <circle cx="140" cy="182" r="9" className="dr-part dr-lit" />
+          <path
+            d="M140 168V163M150 172L154 168M154 182H159M150 192L154 196M140 196V201M130 192L126 196M126 182H121M130 172L126 168"
+            className="dr-fine"
+          />
           <path d="M98 142H126V154H98Z" className="dr-part dr-shade" />
           <PressHand x={110} y={144} />
-          <path d="M-4 -4H394V8.400H-4ZM191.600 4H204V250H191.600Z" className="dr-blank" />
+          <path d="M-4 -4H394V8.4H-4ZM191.6 4H204V250H191.6Z" className="dr-blank" />
           <path d="M8 10H190V246H8Z" className="dr-edge dr-open" />
 
           <path d="M200 10H382V246H200Z" className="dr-edge" />
@@ -64,7 +68,7 @@ function ManualApplySmall() {
           <path d="M16 34H28V40H16Z" className="dr-part dr-shade" />
           <circle cx="32" cy="51" r="4" className="dr-fine dr-lit" />
           <path d="M22 26L30 12L46 0" strokeWidth="11" className="dr-wire-out" />
-          <path d="M22 26L30 12L46 0" strokeWidth="6.500" className="dr-wire-in" />
+          <path d="M22 26L30 12L46 0" strokeWidth="6.5" className="dr-wire-in" />
           <path d="M50 0V74H88V66H60L54 50Z" fill={hatch} />
           <path d="M54 0Q50 30 54 50L60 66H88" className="dr-part dr-open" />
           <path d="M72 2Q74 20 64 34" className="dr-edge dr-open" />

@@ -27,7 +27,7 @@ export function ParkingBrakeDrawing({ size = "full", onCallout }: DrawingProps) 
           {[0, 72, 144, 216, 288].map((turn) => (
             <g key={turn} transform={`rotate(${turn} 142 192)`}>
               <path d="M134 176L128 148M150 176L156 148" className="dr-part" />
-              <circle cx="142" cy="179" r="2.600" className="dr-solid" />
+              <circle cx="142" cy="179" r="2.6" className="dr-solid" />
             </g>
           ))}
           <circle cx="142" cy="192" r="19" className="dr-part dr-open" />
@@ -43,7 +43,7 @@ export function ParkingBrakeDrawing({ size = "full", onCallout }: DrawingProps) 
           <path d="M232 110Q286 118 342 108" className="dr-part dr-open" />
           <path d="M242 111Q242 94 256 94H278Q290 94 290 110" className="dr-part dr-shade" />
           <Wire d="M260 98L328 92" width={16} />
-          <path d="M300 94.500L328 92" strokeWidth="16" className="dr-wire-out" />
+          <path d="M300 94.5L328 92" strokeWidth="16" className="dr-wire-out" />
           <path d="M306 50Q318 62 318 78M311 70L318 79L325 71" className="dr-fine dr-open" />
           <DashLamp x={350} y={42} />
 
@@ -81,7 +81,8 @@ function Gone() {
     <>
       <path
         d="M6 278L58 230Q62 226 66 229L70 236A86 86 0 0 0 116 274L118 278"
-        className="dr-behind dr-open"
+        className="dr-line dr-open"
+        strokeDasharray="6 6"
       />
       <path d="M52 258H22M32 249L21 258L32 267" className="dr-line dr-open" />
     </>

@@ -32,7 +32,7 @@ export function SteeringDrawing({ size = "full", onCallout }: DrawingProps) {
             d="M174 160H216Q226 160 226 172T212 196H178Q164 188 164 174T174 160Z"
             className="dr-part dr-shade"
           />
-          <Wire d="M195 72A98 98 0 1 1 194.900 72Z" width={23} />
+          <Wire d="M195 72A98 98 0 1 1 194.9 72Z" width={23} />
           <path d="M134 132A72 72 0 0 1 256 132" className="dr-edge dr-open" />
           <path d="M131 113L133 134L153 127M259 113L257 134L237 127" className="dr-edge dr-open" />
 
@@ -59,7 +59,7 @@ function SteeringSmall() {
       {() => (
         <>
           <circle cx="44" cy="40" r="27" strokeWidth="9" className="dr-wire-out" />
-          <circle cx="44" cy="40" r="27" strokeWidth="4.200" className="dr-wire-in" />
+          <circle cx="44" cy="40" r="27" strokeWidth="4.2" className="dr-wire-in" />
           <path d="M20 38H68V45L52 50V66H36V50L20 45Z" className="dr-line dr-shade" />
           <path
             d="M28 30A20 20 0 0 1 60 30M27 21L28 31L37 28M61 21L60 31L51 28"

@@ -9,7 +9,7 @@ export const cabinDrawingWords = {
       "chock is pushed tight against the tread in front of the car’s wheel and another behind it.",
     callouts: {
       A: ["coach brake", "set: lamp lit"],
-      B: ["car chocked", "both sides"],
+      B: ["chocked,", "both sides"],
       C: ["level ground"],
     },
   },
@@ -107,7 +107,7 @@ export const cabinDrawingWords = {
   "manual-apply": {
     title: "Brake applied by hand from the coach",
     description:
-      "A finger presses the control in the coach. In the car the brake pedal goes down from its place at rest, which is " +
+      "A finger presses the control in the coach and its lamp is lit. In the car the brake pedal goes down from its place at rest, which is " +
       "dashed.",
     callouts: {
       A: ["control", "pressed"],
