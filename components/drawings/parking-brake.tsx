@@ -79,11 +79,7 @@ export function ParkingBrakeDrawing({ size = "full", onCallout }: DrawingProps) 
 function Gone() {
   return (
     <>
-      <path
-        d="M6 278L58 230Q62 226 66 229L70 236A86 86 0 0 0 116 274L118 278"
-        className="dr-line dr-open"
-        strokeDasharray="6 6"
-      />
+      <path d="M6 278L58 230Q62 226 66 229" className="dr-line dr-open" strokeDasharray="6 6" />
       <path d="M52 258H22M32 249L21 258L32 267" className="dr-line dr-open" />
     </>
   );
