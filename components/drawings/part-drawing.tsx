@@ -9,18 +9,30 @@ import { BallDrawing } from "./ball";
 import { BarStowedDrawing } from "./bar-stowed";
 import { BasePlateDrawing } from "./base-plate";
 import { BrakeDrawing } from "./brake";
+import { BrakeAirDrawing } from "./brake-air";
+import { BrakeHydraulicDrawing } from "./brake-hydraulic";
+import { BrakeSurgeDrawing } from "./brake-surge";
 import { CabinDrawing } from "./cabin";
 import { CablesDrawing } from "./cables";
 import { ChargeLineDrawing } from "./charge-line";
 import { ChocksDrawing } from "./chocks";
+import { CoachHeldDrawing } from "./coach-held";
 import { CordDrawing } from "./cord";
+import { FuseDrawing } from "./fuse";
+import { JacksDrawing } from "./jacks";
 import { type LampLook, LampsDrawing } from "./lamps";
 import { LanyardDrawing } from "./lanyard";
 import { LastLookDrawing } from "./last-look";
+import { LightBarDrawing } from "./light-bar";
+import { ManualApplyDrawing } from "./manual-apply";
+import { MonitorDrawing } from "./monitor";
+import { ParkingBrakeDrawing } from "./parking-brake";
+import { PedalDrawing } from "./pedal";
 import { PintleDrawing } from "./pintle";
 import { ReceiverDrawing } from "./receiver";
 import { ShortCablesDrawing } from "./short-cables";
 import { type Shown, ShownContext } from "./shown";
+import { SteeringDrawing } from "./steering";
 import { WheelsDrawing } from "./wheels";
 
 export type PartDrawingProps = Omit<Shown, "bare"> & {
@@ -62,6 +74,18 @@ const table: Record<PartKey, (props: ArtProps) => ReactNode> = {
   lanyard: LanyardDrawing,
   "air-line": AirLineDrawing,
   "charge-line": ChargeLineDrawing,
+  "coach-held": CoachHeldDrawing,
+  steering: SteeringDrawing,
+  "parking-brake": ParkingBrakeDrawing,
+  fuse: ({ drawn, ...props }) => <FuseDrawing off={drawn === "off"} {...props} />,
+  pedal: PedalDrawing,
+  "brake-air": BrakeAirDrawing,
+  "brake-hydraulic": BrakeHydraulicDrawing,
+  "brake-surge": BrakeSurgeDrawing,
+  monitor: MonitorDrawing,
+  "manual-apply": ManualApplyDrawing,
+  jacks: JacksDrawing,
+  "light-bar": LightBarDrawing,
 };
 
 /** The drawing of one part as it should be, with what someone said is not so struck out. */

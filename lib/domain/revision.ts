@@ -35,6 +35,18 @@ export const partKeys = [
   "lanyard",
   "air-line",
   "charge-line",
+  "coach-held",
+  "steering",
+  "parking-brake",
+  "fuse",
+  "pedal",
+  "brake-air",
+  "brake-hydraulic",
+  "brake-surge",
+  "monitor",
+  "manual-apply",
+  "jacks",
+  "light-bar",
 ] as const;
 export type PartKey = (typeof partKeys)[number];
 

@@ -1,5 +1,6 @@
 import type { PartKey, StationKey } from "../revision";
 import { betweenWords } from "./drawings-between";
+import { cabinDrawingWords } from "./drawings-cabin";
 
 export type DrawingSide = "left" | "right";
 export const calloutLetters = ["A", "B", "C", "D"] as const;
@@ -7,13 +8,14 @@ export type CalloutLetter = (typeof calloutLetters)[number];
 /** The parts that are drawn for each side. */
 export type SidedPart = "arm" | "arm-quick";
 /**
- * An arm end has words of its own for each side, the cord when it is off, the wheels when they stand, the brake when it
- * is built into the car, the last look where it is for joints or for tires alone.
+ * An arm end has words of its own for each side, the cord when it is off, the fuse when it is out, the wheels when they
+ * stand, the brake when it is built into the car, the last look where it is for joints or for tires alone.
  */
 export type DrawingKey =
   | Exclude<PartKey, SidedPart>
   | `${SidedPart}-${DrawingSide}`
   | "cord-off"
+  | "fuse-off"
   | "wheels-standing"
   | "brake-installed"
   | "last-look-joints"
@@ -196,6 +198,7 @@ export const drawingWords: Record<DrawingKey, DrawingWords> = {
       C: ["hitch pin,", "its clip"],
     },
   },
+  ...cabinDrawingWords,
 };
 
 export const lampWords = {
