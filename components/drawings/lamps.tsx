@@ -1,16 +1,23 @@
+import type { LampState, Signal } from "@/lib/domain/entry";
+import { separateLook } from "@/lib/domain/lamp-board";
 import { drawingWords, lampWords } from "@/lib/domain/messages/drawings";
 import { Frame, type DrawingProps } from "./frame";
 import { SmallFrame } from "./small-frame";
 
-export type LampLook = "steady" | "flashing" | "dark";
-type LampsProps = Pick<DrawingProps, "size"> & { left?: LampLook; right?: LampLook };
+type LampsProps = Pick<DrawingProps, "size"> & {
+  left?: LampState;
+  right?: LampState;
+  /** Two lamps a side for this signal: turn above, stop and tail below. */
+  separate?: Signal;
+};
 
 const lens = "M46 128H100Q110 128 110 138V162Q110 172 100 172H42Q41 148 46 128Z";
-const stripes = [46, 62, 78, 94];
+const upper = "M46 128H100Q110 128 110 138V148H42Q43 138 46 128Z";
+const lower = "M42 152H110V162Q110 172 100 172H42Z";
 const rays = "M30 124L13 113M25 146L5 144M26 166L7 172";
 
 /** The car's tail from behind, each lamp as the signal should show it; your left is the car's left. */
-export function LampsDrawing({ size = "full", left = "steady", right = "steady" }: LampsProps) {
+export function LampsDrawing({ size = "full", left = "steady", right = "steady", separate }: LampsProps) {
   const { title, description } = drawingWords.lamps;
   const told = `${description} ${lampWords.description(lampWords[left], lampWords[right])}`;
   if (size === "small") return <LampsSmall title={title} description={told} left={left} right={right} />;
@@ -38,9 +45,9 @@ export function LampsDrawing({ size = "full", left = "steady", right = "steady" 
             className="dr-part"
           />
           <path d="M182 240H208" className="dr-fine" />
-          <Lamp look={left} />
+          <Side state={left} separate={separate} />
           <g transform="translate(390 0) scale(-1 1)">
-            <Lamp look={right} />
+            <Side state={right} separate={separate} />
           </g>
           <text x="78" y="199" textAnchor="middle" className="dr-label">
             {lampWords[left]}
@@ -60,30 +67,80 @@ export function LampsDrawing({ size = "full", left = "steady", right = "steady" 
   );
 }
 
-function Lamp({ look }: { look: LampLook }) {
-  if (look === "dark") {
-    return (
-      <>
-        <path d={lens} className="dr-edge" />
-        <path d="M58 140H98M56 150H98M56 160H98" className="dr-behind" />
-      </>
-    );
-  }
-  const flashing = look === "flashing";
+function Side({ state, separate }: { state: LampState; separate?: Signal }) {
+  const shown = separate && separateLook(separate, state);
   return (
     <>
-      <path d={lens} className={`dr-edge ${flashing ? "" : "dr-lit"}`} />
-      {flashing && stripes.map((x) => <path key={x} d={`M${x} 130h8v40h-8Z`} className="dr-lit" />)}
-      {flashing && <path d={lens} className="dr-edge dr-lit dr-flash" />}
-      <path d={rays} strokeDasharray={flashing ? "5 5" : undefined} className="dr-edge" />
+      {shown ? (
+        <>
+          <Lens path={upper} top={130} height={16} state={shown.turn} />
+          <Lens path={lower} top={154} height={16} state={shown.stop} />
+        </>
+      ) : (
+        <Lens path={lens} top={130} height={40} state={state} />
+      )}
+      {(state === "steady" || state === "flashing") && (
+        <path d={rays} strokeDasharray={state === "flashing" ? "5 5" : undefined} className="dr-edge" />
+      )}
     </>
   );
 }
 
-type SmallProps = { title: string; description: string; left: LampLook; right: LampLook };
+type LensProps = { path: string; top: number; height: number; state: LampState };
+
+/** Form tells the states apart: filled, striped, a thin core of light, dashed, a question. */
+function Lens({ path, top, height, state }: LensProps) {
+  const middle = top + height / 2;
+  switch (state) {
+    case "steady":
+      return <path d={path} className="dr-edge dr-lit" />;
+    case "flashing":
+      return (
+        <>
+          <path d={path} className="dr-edge" />
+          {[48, 64, 80, 96].map((x) => (
+            <path key={x} d={`M${x} ${top}h8v${height}h-8Z`} className="dr-lit" />
+          ))}
+          <path d={path} className="dr-edge dr-lit dr-flash" />
+        </>
+      );
+    case "dim":
+      return (
+        <>
+          <path d={path} className="dr-edge" />
+          <circle cx="78" cy={middle} r={height / 5} className="dr-fine dr-lit" />
+        </>
+      );
+    case "dark":
+      return (
+        <>
+          <path d={path} className="dr-edge" />
+          <path d={`M58 ${top + height / 4}H98M56 ${top + (3 * height) / 4}H98`} className="dr-behind" />
+        </>
+      );
+    case "wrong":
+      return (
+        <>
+          <path d={path} className="dr-edge" />
+          <path
+            d={`M60 ${top + height / 5}L96 ${top + (4 * height) / 5}M96 ${top + height / 5}L60 ${top + (4 * height) / 5}`}
+            className="dr-part"
+          />
+        </>
+      );
+  }
+}
+
+type SmallProps = { title: string; description: string; left: LampState; right: LampState };
 
 function LampsSmall({ left, right, ...words }: SmallProps) {
-  const look = { steady: "dr-lit", flashing: "dr-lit", dark: "" };
+  const look: Record<LampState, string> = {
+    steady: "dr-lit",
+    flashing: "dr-lit",
+    dim: "",
+    dark: "",
+    wrong: "",
+  };
   return (
     <SmallFrame {...words}>
       {() => (

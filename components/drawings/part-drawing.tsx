@@ -1,4 +1,5 @@
 import type { ReactNode } from "react";
+import type { LampState, Signal } from "@/lib/domain/entry";
 import type { CalloutLetter, DrawingSide } from "@/lib/domain/messages/drawings";
 import type { DrawnState, PartKey } from "@/lib/domain/revision";
 import { AirLineDrawing } from "./air-line";
@@ -20,7 +21,7 @@ import { CoachHeldDrawing } from "./coach-held";
 import { CordDrawing } from "./cord";
 import { FuseDrawing } from "./fuse";
 import { JacksDrawing } from "./jacks";
-import { type LampLook, LampsDrawing } from "./lamps";
+import { LampsDrawing } from "./lamps";
 import { LanyardDrawing } from "./lanyard";
 import { LastLookDrawing } from "./last-look";
 import { LightBarDrawing } from "./light-bar";
@@ -44,7 +45,7 @@ export type PartDrawingProps = Omit<Shown, "bare"> & {
   /** full: with lettered callouts, as wide as its place. small: 88 by 74 or so, without words. */
   size?: "full" | "small";
   /** For part "lamps": what each lamp should show. */
-  lamps?: { left: LampLook; right: LampLook };
+  lamps?: { left: LampState; right: LampState; separate?: Signal };
   /** Called when someone touches a callout; offer the same by a button as well. */
   onCallout?: (letter: CalloutLetter) => void;
 };
@@ -59,7 +60,7 @@ const table: Record<PartKey, (props: ArtProps) => ReactNode> = {
   cabin: CabinDrawing,
   brake: ({ drawn, ...props }) => <BrakeDrawing installed={drawn === "installed"} {...props} />,
   wheels: ({ drawn, ...props }) => <WheelsDrawing standing={drawn === "standing"} {...props} />,
-  lamps: ({ size, lamps }) => <LampsDrawing size={size} left={lamps?.left} right={lamps?.right} />,
+  lamps: ({ size, lamps }) => <LampsDrawing size={size} {...lamps} />,
   "last-look": ({ drawn, ...props }) => (
     <LastLookDrawing only={drawn === "joints" || drawn === "tires" ? drawn : undefined} {...props} />
   ),

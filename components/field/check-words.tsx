@@ -5,19 +5,19 @@ import type { MarkBody } from "@/lib/domain/entry";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
+import type { Marking } from "./marking";
 import { segmentOf } from "@/lib/domain/walk-reading";
 
 type CheckWordsProps = {
   check: Check;
   mark: MarkBody | undefined;
-  /** While a question stands below, the focus is there. */
-  asking: boolean;
-  onKeep: () => void;
-  onDetails: () => void;
+  marking: Marking;
 };
 
 /** What a check asks, how to look, what can happen, and the mark that it has already. */
-export function CheckWords({ check, mark, asking, onKeep, onDetails }: CheckWordsProps) {
+export function CheckWords({ check, mark, marking }: CheckWordsProps) {
+  // While a question stands below, the focus is there.
+  const asking = marking.asking !== null;
   const ask = useRef<HTMLHeadingElement>(null);
   useEffect(() => {
     if (!asking) ask.current?.focus({ preventScroll: true });
@@ -47,11 +47,11 @@ export function CheckWords({ check, mark, asking, onKeep, onDetails }: CheckWord
             )}
           </p>
           {mark.outcome === "fault" && (
-            <Button variant="quiet" onClick={onDetails}>
+            <Button variant="quiet" onClick={() => marking.ask("details")}>
               {walkingWords.details.more}
             </Button>
           )}
-          <Button variant="quiet" className="ml-auto" onClick={onKeep}>
+          <Button variant="quiet" className="ml-auto" onClick={marking.skip}>
             {fieldWords.walk.keep}
           </Button>
         </div>

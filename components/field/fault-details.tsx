@@ -11,10 +11,11 @@ import { plainText } from "./walk-plan";
 
 const words = walkingWords.details;
 
-type FaultDetailsProps = { check: Check; asDrawn: boolean; callouts: Callouts; marking: Marking };
+type FaultDetailsProps = { check: Check; callouts: Callouts; marking: Marking };
 
 /** After a fault is saved: what is wrong, by touch or in words. None of it is needed to go on. */
-export function FaultDetails({ check, asDrawn, callouts, marking }: FaultDetailsProps) {
+export function FaultDetails({ check, callouts, marking }: FaultDetailsProps) {
+  const called = callouts.all.length > 0;
   const [text, setText] = useState(callouts.own);
   const keep = (event: FormEvent) => {
     event.preventDefault();
@@ -25,9 +26,9 @@ export function FaultDetails({ check, asDrawn, callouts, marking }: FaultDetails
     marking.skip();
   };
   return (
-    <Question id="details" title={asDrawn ? words.title : words.titlePlace}>
+    <Question id="details" title={called ? words.title : words.titlePlace}>
       {check.effect === "hold" && <p className="px-1 font-extrabold text-hold">{words.hold}</p>}
-      {asDrawn && callouts.all.length > 0 && (
+      {called && (
         <div className="acts-two">
           {callouts.all.map(({ letter, text: label }) => (
             <Callout key={letter} letter={letter} label={label} callouts={callouts} />

@@ -8,15 +8,14 @@ const third = "min-w-23 flex-1";
 
 type MarkButtonsProps = {
   check: Check;
-  /** Whether the drawing shows what is asked for. */
-  asDrawn: boolean;
   first: boolean;
   marking: Marking;
 };
 
 /** The four answers to a check and the way back, where the thumb is. */
-export function MarkButtons({ check, asDrawn, first, marking }: MarkButtonsProps) {
+export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
   const holds = check.effect === "hold";
+  const asDrawn = check.drawn !== "place";
   return (
     <div className="flex flex-col gap-2.5">
       {/* Good takes two columns of the row below and the gap between them; with large text each takes a row. */}

@@ -16,6 +16,8 @@ export type Question = "why" | "what" | "details" | "measure";
 export interface Marking {
   /** Saves a mark, then asks what belongs to it or goes on. */
   mark: (outcome: Outcome, more?: Partial<MarkBody>) => Promise<void>;
+  /** Saves a mark that is not the last word on this check, and stays. */
+  keep: (outcome: Outcome, more: Partial<MarkBody>) => Promise<void>;
   /** Saves the mark anew with more in it, and stays. */
   amend: (more: Partial<MarkBody>) => Promise<void>;
   back: () => void;
@@ -36,10 +38,13 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   const [saved, setSaved] = useState<Outcome | null>(null);
   const [trouble, setTrouble] = useState<{ at: string; words: string } | null>(null);
   const saving = useRef(false);
+  /** What was to be saved when the question why came first. */
+  const pending = useRef<Partial<MarkBody>>({});
   const asking = question?.at === key ? question.question : null;
   const settled = useSettled(`${key} ${asking}`);
   useLayoutEffect(() => {
     saving.current = false;
+    pending.current = {};
   }, [key]);
 
   const walk = recorder.view().walk.id;
@@ -73,13 +78,22 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   return {
     async mark(outcome, more = {}) {
       if (!takes()) return;
-      if (outcome === "good" && !more.because && needsReason(check, state().faulted)) return ask("why");
+      if (outcome === "good" && !more.because && needsReason(check, state().faulted)) {
+        pending.current = more;
+        return ask("why");
+      }
       const then = outcome === "fault" ? "details" : outcome === "good" && check.measure ? "measure" : null;
       // What is asked after the mark belongs to this check, which without an address of its own is no longer the next.
       if (then) moveTo({ walk, at: key });
-      if (!(await save(outcome, more))) return;
+      if (!(await save(outcome, { ...(more.because && pending.current), ...more }))) return;
       if (then) return stay(then);
       show(nextStep(steps, state().marks, key));
+    },
+    async keep(outcome, more) {
+      if (saving.current) return;
+      moveTo({ walk, at: key });
+      await save(outcome, more);
+      saving.current = false;
     },
     async amend(more) {
       const mark = state().marks.get(key);

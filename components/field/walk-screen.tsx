@@ -6,6 +6,9 @@ import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { takeUp } from "./browser-field";
 import { CallOffScreen } from "./call-off-screen";
 import { CarQuestion } from "./car-question";
+import { BrakeIdleScreen } from "@/components/lamps/brake-idle-screen";
+import { LampScreen } from "@/components/lamps/lamp-screen";
+import type { CheckScreenProps } from "./check-frame";
 import { CheckScreen } from "./check-screen";
 import { ClosingScreen } from "./closing-screen";
 import { ElsewhereScreen } from "./elsewhere-screen";
@@ -78,7 +81,19 @@ function LiveWalk({ recorder, walk, sync, at }: LiveWalkProps) {
     case "closing":
       return <ClosingScreen {...props} />;
     case "check":
-      return <CheckScreen {...props} step={place.step} />;
+      return <CheckOfKind {...props} step={place.step} />;
+  }
+}
+
+/** A check in the way that its kind is looked at. */
+function CheckOfKind(props: CheckScreenProps) {
+  switch (props.step.check.kind) {
+    case "lamps":
+      return <LampScreen key={props.step.check.key} {...props} />;
+    case "brake-idle":
+      return <BrakeIdleScreen key={props.step.check.key} {...props} />;
+    case "look":
+      return <CheckScreen {...props} />;
   }
 }
 

@@ -15,6 +15,9 @@ export type Purpose = (typeof purposes)[number];
 export type Depth = (typeof depths)[number];
 export type Outcome = (typeof outcomes)[number];
 export type Verdict = (typeof verdicts)[number];
+export type Signal = (typeof signals)[number];
+export type Lamp = (typeof lamps)[number];
+export type LampState = (typeof lampStates)[number];
 
 /** The most canonical bytes one entry may have. */
 export const ENTRY_BYTES = 16 * 1024;

@@ -1,5 +1,5 @@
 import * as z from "zod/mini";
-import { purposes, type Depth, type Purpose } from "./entry";
+import { lamps, lampStates, purposes, signals, type Depth, type Purpose } from "./entry";
 
 /** The seven places to stand, in walking order. */
 export const stationKeys = [
@@ -74,6 +74,15 @@ export const measureShape = z.looseObject({
 export type Measure = z.infer<typeof measureShape>;
 
 /**
+ * How a rig's lamps answer. `combined`: one red lamp a side does tail, stop and turn; `separate`: a turn lamp of its
+ * own beside it. `expected` is what this rig does when it is known to be right, where that differs from the usual.
+ */
+export const lampsShape = z.looseObject({
+  layout: z.enum(["combined", "separate"]),
+  expected: z.optional(z.partialRecord(z.enum(signals), z.partialRecord(z.enum(lamps), z.enum(lampStates)))),
+});
+
+/**
  * One thing to look at: what is asked, how to look, why it matters and what a fault does. `who` says who may mend it,
  * `touches` names the checks that mending it can change, `figures` are the rig's own numbers by callout.
  */
@@ -93,6 +102,7 @@ export const checkShape = z.looseObject({
   who: z.optional(z.string()),
   touches: z.optional(z.array(z.string())),
   measure: z.optional(measureShape),
+  lamps: z.optional(lampsShape),
   figures: z.optional(z.partialRecord(z.enum(["A", "B", "C", "D"]), z.string())),
 });
 export type Check = z.infer<typeof checkShape>;

@@ -206,7 +206,9 @@ export const lampWords = {
   right: "RIGHT",
   steady: "steady",
   flashing: "flashing",
+  dim: "dim",
   dark: "dark",
+  wrong: "wrong",
   description: (left: string, right: string) => `Left lamp ${left}, right lamp ${right}.`,
 } as const;
 

@@ -1,0 +1,23 @@
+import type { Check } from "@/lib/domain/revision";
+import { BecauseQuestion } from "./because-question";
+import type { Callouts } from "./callouts";
+import { FaultDetails } from "./fault-details";
+import type { Marking } from "./marking";
+import { MeasureQuestion } from "./measure-question";
+
+type CheckQuestionProps = { check: Check; callouts: Callouts; marking: Marking };
+
+/** What is asked in place of the buttons, while something is. */
+export function CheckQuestion({ check, callouts, marking }: CheckQuestionProps) {
+  switch (marking.asking) {
+    case "why":
+    case "what":
+      return <BecauseQuestion marking={marking} />;
+    case "details":
+      return <FaultDetails check={check} callouts={callouts} marking={marking} />;
+    case "measure":
+      return check.measure ? <MeasureQuestion measure={check.measure} marking={marking} /> : null;
+    case null:
+      return null;
+  }
+}

@@ -1,0 +1,88 @@
+import { useState } from "react";
+import type { Marking } from "@/components/field/marking";
+import { useSettled } from "@/components/field/settling";
+import { signals, type Signal } from "@/lib/domain/entry";
+import { boardOutcome, expectedOf, type LampPair, type Seen } from "@/lib/domain/lamp-board";
+import type { Check } from "@/lib/domain/revision";
+
+/** What shows at the board: a signal as it should be, one that is odd, or something beside the signals. */
+export type BoardView = "signal" | "odd" | "whole" | "how" | "clip";
+
+/** A lamp board in use. Every signal is saved as it is answered, in the check's mark. */
+export interface Board {
+  signal: Signal;
+  /** Counted from 1. */
+  place: number;
+  next: Signal | null;
+  /** The signals that nobody has answered yet. */
+  open: readonly Signal[];
+  view: BoardView;
+  show: (view: BoardView) => void;
+  asDrawn: () => void;
+  odd: (pair: LampPair) => void;
+  unseen: () => void;
+  back: () => void;
+  /** Goes to a signal, as a script does. */
+  goTo: (signal: Signal) => void;
+}
+
+/**
+ * Runs a board over its seven signals.
+ * @param seen what the check's mark has so far
+ * @param note kept with the mark: where the signals were seen, if not on the spot
+ */
+export function useBoard(check: Check, marking: Marking, seen: Seen, note: string | undefined): Board {
+  const [passed, setPassed] = useState<readonly Signal[]>([]);
+  const answered = (signal: Signal) => seen[signal] !== undefined || passed.includes(signal);
+  const [at, setAt] = useState<Signal>(() => signals.find((signal) => !answered(signal)) ?? signals[0]);
+  const [view, setView] = useState<BoardView>("signal");
+  const settled = useSettled(`${at} ${view}`);
+  const place = signals.indexOf(at) + 1;
+
+  const onward = (done: readonly Signal[], after: Seen, changed: boolean) => {
+    const open = signals.filter((signal) => after[signal] === undefined && !done.includes(signal));
+    const ahead = open.find((signal) => signals.indexOf(signal) >= place) ?? open[0];
+    const more = { ...(Object.keys(after).length > 0 && { seen: after }), ...(note && { note }) };
+    if (!ahead) return void marking.mark(boardOutcome(check, after), more);
+    if (changed) void marking.keep(boardOutcome(check, after), more);
+    setAt(ahead);
+    setView("signal");
+  };
+  const answer = (pair: LampPair) => {
+    if (!settled()) return;
+    setPassed(passed.filter((signal) => signal !== at));
+    onward(
+      passed.filter((signal) => signal !== at),
+      { ...seen, [at]: pair },
+      true,
+    );
+  };
+
+  return {
+    signal: at,
+    place,
+    next: signals[place] ?? null,
+    open: signals.filter((signal) => !answered(signal)),
+    view,
+    show: (next) => settled() && setView(next),
+    asDrawn: () => answer(expectedOf(check, at)),
+    odd: answer,
+    unseen() {
+      if (!settled()) return;
+      const done = [...passed.filter((signal) => signal !== at), at];
+      setPassed(done);
+      const after: Seen = { ...seen };
+      delete after[at];
+      onward(done, after, seen[at] !== undefined);
+    },
+    back() {
+      if (view !== "signal") setView("signal");
+      else if (place > 1 && settled()) setAt(signals[place - 2]!);
+      else marking.back();
+    },
+    goTo(signal) {
+      setAt(signal);
+      setView("signal");
+    },
+  };
+}

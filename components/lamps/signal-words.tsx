@@ -1,0 +1,38 @@
+import { useEffect, useRef } from "react";
+import type { Check } from "@/lib/domain/revision";
+import { lampBoardWords as words } from "@/lib/domain/messages/lamps";
+import type { Board } from "./board";
+
+type SignalWordsProps = {
+  check: Check;
+  board: Board;
+  /** A question stands below, and has the focus. */
+  quiet: boolean;
+};
+
+/** The signal in a big word, what the driver does for it, and what comes next. */
+export function SignalWords({ check, board, quiet }: SignalWordsProps) {
+  const heading = useRef<HTMLHeadingElement>(null);
+  const { signal, next, view } = board;
+  useEffect(() => {
+    if (!quiet && view === "signal") heading.current?.focus({ preventScroll: true });
+  }, [signal, quiet, view]);
+  return (
+    <div className="flex flex-col px-4">
+      <h2
+        ref={heading}
+        tabIndex={-1}
+        className="pt-3.5 text-[1.875rem] leading-[1.1] font-extrabold tracking-[-0.01em] outline-none md:text-[2.5rem]"
+      >
+        {words.signal[signal]}
+      </h2>
+      {!quiet && (
+        <>
+          <p className="pt-1 text-soft md:text-xl">{words.driver[signal]}</p>
+          <p className="pt-1 text-base text-soft">{words.next(next)}</p>
+          {check.lamps?.layout === "separate" && <p className="pt-1 text-base text-soft">{words.separate}</p>}
+        </>
+      )}
+    </div>
+  );
+}
