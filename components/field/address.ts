@@ -1,12 +1,16 @@
 import { useSyncExternalStore } from "react";
 
-/** Where in the field wing someone is. `at` is a check's key, or "close" for the closing screen. */
+/**
+ * Where in the field wing someone is. `at` is a check's key, or "close" for the closing screen; without a walk it is
+ * "new-rig" where a rig is made.
+ */
 export interface Address {
   walk: string | null;
   at: string | null;
 }
 
 export const CLOSING = "close";
+export const NEW_RIG = "new-rig";
 
 const listeners = new Set<() => void>();
 
@@ -21,7 +25,10 @@ function subscribe(listener: () => void): () => void {
 
 /** The wing's own path for an address: one document, ids in the query string. */
 export function hrefOf({ walk, at }: Partial<Address>): string {
-  const query = new URLSearchParams({ ...(walk && { walk }), ...(walk && at && { at }) }).toString();
+  const query = new URLSearchParams({
+    ...(walk && { walk }),
+    ...((walk || at === NEW_RIG) && at && { at }),
+  }).toString();
   return query ? `/field?${query}` : "/field";
 }
 

@@ -1,7 +1,8 @@
 "use client";
 
 import { useEffect } from "react";
-import { addressOf, useSearch } from "./address";
+import { NewRig } from "@/components/starter/new-rig";
+import { addressOf, NEW_RIG, useSearch } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
@@ -20,5 +21,6 @@ export function FieldWing() {
   useEffect(() => followTaps(), []);
   useEffect(() => letGo(walk), [walk]);
 
+  if (!walk && at === NEW_RIG) return <NewRig />;
   return walk ? <WalkScreen key={walk} sync={sync} walk={walk} at={at} /> : <RigsScreen sync={sync} />;
 }

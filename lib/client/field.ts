@@ -58,11 +58,13 @@ export class Field {
   }
 
   /**
-   * Takes up a walk of this member's that is on this phone.
+   * Takes up a walk that is on this phone.
    * @returns null where it is not, "elsewhere" while another tab records it
    */
   async takeUp(member: string, walk: string): Promise<HeldWalk | "elsewhere" | null> {
-    return this.hold(walk, async () => Recorder.takeUp(await this.ground(member), walk));
+    // A walk made without an account goes on with its own device beside an account's.
+    const opener = (await this.sync.shelf.walk(walk))?.member ?? member;
+    return this.hold(walk, async () => Recorder.takeUp(await this.ground(opener), walk));
   }
 
   /** One tab records a walk: the browser's lock is taken before the walk is read and kept until it is let go. */
