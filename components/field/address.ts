@@ -1,12 +1,12 @@
 import { useSyncExternalStore } from "react";
 
-/** Where in the field wing someone is. `at` is a check's key, or one of the places below. */
-export interface Address {
-  walk: string | null;
-  at: string | null;
-  /** The rig whose paper cards show. */
-  paper: string | null;
-}
+const parts = ["walk", "at", "paper", "prompt", "settings"] as const;
+
+/**
+ * Where in the field wing someone is: in a walk, `at` a check's key or one of the places below; at a rig's `paper`
+ * cards; at what this phone prompts someone through; in the settings; or nowhere of these, among the rigs.
+ */
+export type Address = Record<(typeof parts)[number], string | null>;
 
 /** Where a walk is stopped or closed. */
 export const CLOSING = "close";
@@ -14,6 +14,8 @@ export const CLOSING = "close";
 export const CALL_OFF = "call-off";
 /** The stations of a walk. */
 export const PLAN = "plan";
+/** Without a walk: where a rig is made on this phone. */
+export const NEW_RIG = "new-rig";
 
 const listeners = new Set<() => void>();
 
@@ -27,23 +29,16 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** The wing's own path for an address: one document, ids in the query string. */
-export function hrefOf({ walk, at, paper }: Partial<Address>): string {
-  const query = new URLSearchParams({
-    ...(walk && { walk }),
-    ...(walk && at && { at }),
-    ...(!walk && paper && { paper }),
-  }).toString();
+export function hrefOf(address: Partial<Address>): string {
+  const said = parts.flatMap((part) => (address[part] ? [[part, address[part]]] : []));
+  const query = new URLSearchParams(said).toString();
   return query ? `/field?${query}` : "/field";
 }
 
 /** The address that a query string says. */
 export function addressOf(search: string): Address {
   const query = new URLSearchParams(search);
-  return {
-    walk: query.get("walk") || null,
-    at: query.get("at") || null,
-    paper: query.get("paper") || null,
-  };
+  return Object.fromEntries(parts.map((part) => [part, query.get(part) || null])) as Address;
 }
 
 /** The query string now; the empty one while the page is prerendered. */

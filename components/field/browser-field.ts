@@ -16,6 +16,7 @@ const unread: SyncView = {
   ready: false,
   storeRefused: false,
   bundle: null,
+  local: null,
   walks: [],
   signedOut: false,
   roleRefused: false,

@@ -1,7 +1,9 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { recentText } from "@/lib/client/time-words";
-import { SIGN_IN } from "./no-rigs";
+import { localWords } from "@/lib/domain/messages/account";
+import { useSyncView } from "./browser-field";
+import { SIGN_IN, SIGN_UP } from "./no-rigs";
 import { useNowMs } from "./now";
 
 const words = fieldWords.result;
@@ -27,6 +29,7 @@ export function Custody({ walk, signedOut }: CustodyProps) {
 
 function Onward({ walk, signedOut }: CustodyProps) {
   const nowMs = useNowMs();
+  const madeWithoutAccount = useSyncView().local?.member.id === walk.member;
   if (walk.receipt) {
     const when = recentText(walk.receipt.receivedAt, nowMs);
     return <p className="leading-tight font-extrabold">{words.received(when)}</p>;
@@ -35,6 +38,15 @@ function Onward({ walk, signedOut }: CustodyProps) {
     return (
       <p className="text-base">
         <strong>{words.refusedTitle}.</strong> {words.refused(walk.refused)}
+      </p>
+    );
+  }
+  if (madeWithoutAccount) {
+    return (
+      <p className="text-base text-soft">
+        <a href={SIGN_UP} className="inline-block py-2 underline">
+          {localWords.signUpFirst}
+        </a>
       </p>
     );
   }

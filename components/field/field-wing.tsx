@@ -1,7 +1,8 @@
 "use client";
 
 import { useEffect } from "react";
-import { addressOf, useSearch } from "./address";
+import { NewRig } from "@/components/starter/new-rig";
+import { addressOf, NEW_RIG, useSearch } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
@@ -23,5 +24,6 @@ export function FieldWing() {
 
   if (walk) return <WalkScreen key={walk} sync={sync} walk={walk} at={at} />;
   if (paper) return <PaperScreen sync={sync} rig={paper} />;
+  if (at === NEW_RIG) return <NewRig />;
   return <RigsScreen sync={sync} />;
 }

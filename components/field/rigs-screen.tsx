@@ -1,7 +1,9 @@
 import { useEffect, useState } from "react";
 import { EmptyState } from "@/components/ui/empty-state";
 import { Skeleton } from "@/components/ui/skeleton";
-import type { SyncView } from "@/lib/client/sync";
+import { LocalNote, LocalRigsFoot } from "@/components/starter/local-note";
+import { LocalRigs } from "@/components/starter/local-rigs";
+import { isLocalOnly, type SyncView } from "@/lib/client/sync";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { FieldFrame } from "./field-frame";
 import { KeptWalks } from "./kept-walks";
@@ -27,12 +29,13 @@ export function RigsScreen({ sync }: { sync: SyncView }) {
 }
 
 function Rigs({ sync }: { sync: SyncView }) {
-  const { ready, bundle, walks } = sync;
+  const { ready, bundle, local, walks } = sync;
+  const localOnly = isLocalOnly(sync);
   if (!ready) return <ReadingStore />;
   if (!bundle) return <NoRigs sync={sync} />;
   return (
     <>
-      <SyncNotes sync={sync} />
+      {localOnly && !sync.roleRefused ? <LocalNote /> : <SyncNotes sync={sync} />}
       <div className="flex flex-col gap-y-4 lg:grid lg:grid-cols-[minmax(0,1fr)_23rem] lg:items-start lg:gap-x-8">
         <div>
           {bundle.rigs.length === 0 && (
@@ -47,6 +50,8 @@ function Rigs({ sync }: { sync: SyncView }) {
               alone={bundle.rigs.length === 1}
             />
           ))}
+          {localOnly && <LocalRigsFoot rigs={bundle.rigs.length} />}
+          {local && !localOnly && <LocalRigs local={local} walks={walks} />}
         </div>
         <KeptWalks walks={walks} />
       </div>

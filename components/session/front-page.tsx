@@ -1,5 +1,6 @@
 import { frontWords } from "@/lib/domain/messages/session";
 import { FrontDrawing } from "./front-drawing";
+import { SignUpLine } from "./no-account";
 import { TapeCourse } from "./tape-course";
 import { WaySign } from "./way-sign";
 
@@ -19,7 +20,10 @@ export function FrontPage() {
             </p>
             <p className="mt-3 max-w-[58ch]">{frontWords.job}</p>
           </div>
-          <WaySign />
+          <div>
+            <WaySign />
+            <SignUpLine />
+          </div>
         </div>
         <section className="mt-8 border-t-hair border-ink pt-3 lg:mt-6">
           <h2 className="text-base font-semibold text-soft">{frontWords.stationsTitle}</h2>

@@ -4,6 +4,7 @@ import { useEffect, useState } from "react";
 import { reloadWhenRestored, whoAmI } from "@/lib/client/session";
 import type { Member } from "@/lib/domain/member";
 import { signInWords } from "@/lib/domain/messages/session";
+import { NoAccount } from "./no-account";
 import { PlainPage } from "./plain-page";
 import { SignInForm } from "./sign-in-form";
 import { SignedInNote } from "./signed-in-note";
@@ -33,6 +34,7 @@ export function SignInPage() {
         </>
       )}
       <SignInForm />
+      <NoAccount />
     </PlainPage>
   );
 }

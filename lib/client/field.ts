@@ -57,11 +57,13 @@ export class Field {
   }
 
   /**
-   * Takes up a walk of this member's that is on this phone.
+   * Takes up a walk that is on this phone.
    * @returns null where it is not, "elsewhere" while another tab records it
    */
   async takeUp(member: string, walk: string): Promise<HeldWalk | "elsewhere" | null> {
-    return this.hold(walk, async () => Recorder.takeUp(await this.ground(member), walk));
+    // A walk made without an account goes on with its own device beside an account's.
+    const opener = (await this.sync.shelf.walk(walk))?.member ?? member;
+    return this.hold(walk, async () => Recorder.takeUp(await this.ground(opener), walk));
   }
 
   /** Keeps that a rig was left, or its car entered, after a closed walk: its verdict is stale from now on. */

@@ -6,6 +6,7 @@ import { fetchBundle, keptBundle } from "./bundle";
 import { deviceFor, registrationOf, setRegistered } from "./device";
 import { drainOnce, isUnsent } from "./drain";
 import { nextTry } from "./drain-timing";
+import { keptLocal, localBundle } from "./local-rigs";
 import { WalkShelf, type KeptWalk } from "./walk-shelf";
 
 /** What the field wing shows of the phone's store and of its dealings with the server. */
@@ -14,8 +15,11 @@ export interface SyncView {
   ready: boolean;
   /** The browser would not let the store be read: nothing can be kept here. */
   storeRefused: boolean;
+  /** The server's bundle; where none ever came, what was made here without an account. */
   bundle: Bundle | null;
-  /** The bundle's member's walks on this phone, newest first. */
+  /** What was made here without an account, also beside an account's bundle. */
+  local: Bundle | null;
+  /** The walks on this phone of the bundle's member and of those made without an account, newest first. */
   walks: KeptWalk[];
   /** The server said that nobody is signed in; recording goes on. */
   signedOut: boolean;
@@ -49,6 +53,7 @@ export class Sync {
     ready: false,
     storeRefused: false,
     bundle: null,
+    local: null,
     walks: [],
     signedOut: false,
     roleRefused: false,
@@ -102,9 +107,13 @@ export class Sync {
   /** Reads the store again without trying anything. */
   async read(): Promise<void> {
     try {
-      const bundle = await keptBundle(this.ground.store);
-      const walks = (await this.shelf.walks()).filter((walk) => walk.member === bundle?.member.id);
-      this.show({ ready: true, storeRefused: false, bundle, walks });
+      const { store } = this.ground;
+      const kept = await keptLocal(store);
+      const local = kept && localBundle(kept);
+      const bundle = (await keptBundle(store)) ?? local;
+      const members = [bundle?.member.id, local?.member.id];
+      const walks = (await this.shelf.walks()).filter((walk) => members.includes(walk.member));
+      this.show({ ready: true, storeRefused: false, bundle, local, walks });
     } catch {
       this.show({ storeRefused: true });
     }
@@ -122,9 +131,24 @@ export class Sync {
     const { savedAt, stirredAt, triedAt, failures, notBefore } = this;
     // Nobody signed in, or someone who makes no walks: either way only a sign-in helps.
     const signedOut = this.current.signedOut || this.current.roleRefused;
-    const pending = this.wantsBundle() || this.current.walks.some(isUnsent);
+    const pending = isLocalOnly(this.current) ? this.stirred() : this.hasSomething();
     const at = nextTry({ pending, signedOut, savedAt, stirredAt, triedAt, failures, notBefore, spread });
     if (at !== null) this.timer = setTimeout(() => void this.attempt(), Math.max(0, at - nowMs()));
+  }
+
+  private hasSomething(): boolean {
+    const { bundle, walks } = this.current;
+    // Walks made without an account beside one wait for a sign-up, which may never come.
+    return this.wantsBundle() || walks.some((walk) => walk.member === bundle?.member.id && isUnsent(walk));
+  }
+
+  /**
+   * Without an account there is nothing to send. Only a sign-in changes that, and someone may have signed in before
+   * the rig was made or in another tab: so the server is asked once each time the page is opened or comes back, and
+   * not again and again at a campsite with no signal.
+   */
+  private stirred(): boolean {
+    return this.stirredAt !== null && (this.triedAt === null || this.stirredAt > this.triedAt);
   }
 
   private wantsBundle(): boolean {
@@ -195,6 +219,11 @@ export class Sync {
     const walks = await this.shelf.walks();
     return walks.map((w) => `${w.acknowledged} ${w.receipt !== null} ${w.refused}`).join();
   }
+}
+
+/** Whether this phone has never had an account's bundle, only what was made on it without one. */
+export function isLocalOnly({ bundle, local }: Pick<SyncView, "bundle" | "local">): boolean {
+  return local !== null && bundle === local;
 }
 
 function isForeign(answer: EnvelopeAnswer): boolean {

@@ -11,6 +11,8 @@ export const problems = {
   "wrong-shape": { status: 422, title: "The request is not of the expected shape." },
   "not-found": { status: 404, title: "There is nothing here." },
   "device-taken": { status: 409, title: "That device id belongs to another key or member." },
+  "address-taken": { status: 409, title: "There is an account with that address already." },
+  "id-taken": { status: 409, title: "An id in this request belongs to something that exists already." },
   "too-many-attempts": { status: 429, title: "Too many failed attempts. Wait, then try again." },
   unavailable: { status: 503, title: "The database does not answer. Try again shortly." },
   internal: { status: 500, title: "Something went wrong on the server." },

@@ -32,7 +32,8 @@ export async function checkCredentials({ email, password }: Credentials): Promis
   return found.member;
 }
 
-function normalAddress(email: string): string {
+/** An email address as it is stored and compared. */
+export function normalAddress(email: string): string {
   return email.trim().toLowerCase();
 }
 

@@ -1,6 +1,6 @@
 import type { Check, RevisionDocument } from "@/lib/domain/revision";
-import * as check from "./checks";
-import { revisionDocument, type HandWritten } from "./document";
+import * as check from "@/lib/domain/plain-checks";
+import { plainDocument, type PlainList } from "@/lib/domain/plain-list";
 import { longCoachSheet, shortCoachSheet } from "./fleet-sheets";
 
 const brakeBox = check.hold({
@@ -56,7 +56,7 @@ function endState(page: string, proof: string): Check {
 }
 
 /** What both of the fleet's lists have in common; `tail` is what there is to see at the car's tail. */
-function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "sheet"> {
+function list(brake: Check, cabin: Check, tail: Check[]): Omit<PlainList, "sheet"> {
   const hookUp = [
     check.receiverPins,
     check.arm("left"),
@@ -84,6 +84,7 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "she
   ];
   const unhook = [check.carHeld, check.linesOff, check.barStowed];
   return {
+    catalogue: "hand-written 1",
     checks: {
       "coach-tail": [check.receiverPins, check.barStowed],
       "car-nose": [check.arm("left"), check.arm("right")],
@@ -105,7 +106,7 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<HandWritten, "she
 }
 
 /** The fleet's long coach with the pickup: a brake installed in the car, its lamps on diodes. */
-export const longCoachRig: RevisionDocument = revisionDocument({
+export const longCoachRig: RevisionDocument = plainDocument({
   sheet: longCoachSheet,
   ...list(installedBrake, endState("301", "Every step on it is done and its last line is proved."), [
     check.lamps,
@@ -113,7 +114,7 @@ export const longCoachRig: RevisionDocument = revisionDocument({
 });
 
 /** The fleet's short coach with the hatchback: a portable box and a removable light bar. */
-export const shortCoachRig: RevisionDocument = revisionDocument({
+export const shortCoachRig: RevisionDocument = plainDocument({
   sheet: shortCoachSheet,
   ...list(brakeBox, endState("188", "Every step on it is done, the engine run before it too."), [
     lightBar,

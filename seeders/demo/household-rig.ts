@@ -1,6 +1,6 @@
 import type { RevisionDocument } from "@/lib/domain/revision";
-import * as check from "./checks";
-import { revisionDocument } from "./document";
+import * as check from "@/lib/domain/plain-checks";
+import { plainDocument } from "@/lib/domain/plain-list";
 import { feet, inches, milesPerHour, pounds } from "./quantities";
 
 const sheet = {
@@ -135,8 +135,9 @@ const hookUp = [
 const unhook = [check.carHeld, check.linesOff, check.barStowed, fuseBack];
 
 /** The household's rig: a bulb kit, a portable brake box and a fuse that the manual has out while towing. */
-export const householdRig: RevisionDocument = revisionDocument({
+export const householdRig: RevisionDocument = plainDocument({
   sheet,
+  catalogue: "hand-written 1",
   checks: {
     "coach-tail": [check.receiverPins, check.barStowed],
     "car-nose": [check.arm("left"), check.arm("right")],

@@ -1,6 +1,6 @@
 import type { RevisionDocument } from "@/lib/domain/revision";
-import * as check from "./checks";
-import { revisionDocument } from "./document";
+import * as check from "@/lib/domain/plain-checks";
+import { plainDocument } from "@/lib/domain/plain-list";
 import { feet, inches, milesPerHour, pounds } from "./quantities";
 
 const sheet = {
@@ -155,8 +155,9 @@ const hookUp = [
 const unhook = [check.carHeld, check.linesOff, check.barStowed];
 
 /** The rig on the shop's floor: air-assisted brake, diode wiring, a base plate whose arms come off. */
-export const shopRig: RevisionDocument = revisionDocument({
+export const shopRig: RevisionDocument = plainDocument({
   sheet,
+  catalogue: "hand-written 1",
   checks: {
     "coach-tail": [check.receiverPins, check.barStowed],
     "car-nose": [check.arm("left"), check.arm("right")],

@@ -13,6 +13,8 @@ test("every code has its status", () => {
     "422 wrong-shape",
     "404 not-found",
     "409 device-taken",
+    "409 address-taken",
+    "409 id-taken",
     "429 too-many-attempts",
     "503 unavailable",
     "500 internal",

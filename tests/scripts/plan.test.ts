@@ -15,6 +15,7 @@ it.each<[string, Partial<Asked>, string]>([
   ["the first page asks the network first", { path: "/" }, "network-else-shell"],
   ["so does signing in", { path: "/sign-in" }, "network-else-shell"],
   ["any other page may end at the offline page", { path: "/desk" }, "network-else-offline"],
+  ["signing up is one: it does nothing without the network", { path: "/sign-up" }, "network-else-offline"],
   ["a path below the field wing is another page", { path: "/field/x" }, "network-else-offline"],
   ["the router's request fails offline", { mode: "cors", fromRouter: true }, "leave"],
   ["even if it claims to be a navigation", { fromRouter: true }, "leave"],

@@ -3,6 +3,7 @@ import { registerDevice } from "./devices";
 import { readBundle, sendEntries } from "./field";
 import { readHealth, readKeys, readOpenApi } from "./service";
 import { signIn, signOut, whoAmI } from "./session";
+import { signUp } from "./sign-up";
 import { listWalks, readRecord, readWalk } from "./walks";
 
 /** Every route there is, in the order in which the OpenAPI document lists them. */
@@ -10,6 +11,7 @@ export const contracts: readonly Contract[] = [
   signIn,
   whoAmI,
   signOut,
+  signUp,
   registerDevice,
   readBundle,
   sendEntries,

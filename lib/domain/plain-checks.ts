@@ -1,4 +1,4 @@
-import type { Check } from "@/lib/domain/revision";
+import type { Check } from "./revision";
 
 const HELD = "Secure the car first: parking brake on, wheels chocked.";
 

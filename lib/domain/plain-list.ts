@@ -1,5 +1,5 @@
-import { purposes, type Depth, type Purpose } from "@/lib/domain/entry";
-import { stationKeys, type Check, type RevisionDocument, type StationKey } from "@/lib/domain/revision";
+import { purposes, type Depth, type Purpose } from "./entry";
+import { stationKeys, type Check, type RevisionDocument, type StationKey } from "./revision";
 
 const titles: Record<StationKey, string> = {
   "coach-tail": "Coach tail",
@@ -11,15 +11,17 @@ const titles: Record<StationKey, string> = {
   "last-look": "Last look",
 };
 
-/** A hand-written list: the checks at each station, and which of them each kind of walk takes, in walking order. */
-export interface HandWritten {
+/** A list by hand: the checks at each station, and which of them each kind of walk takes, in walking order. */
+export interface PlainList {
   sheet: RevisionDocument["sheet"];
+  /** Where the checks come from. */
+  catalogue: string;
   checks: Record<StationKey, Check[]>;
   walks: Record<Purpose, Check[]>;
 }
 
-/** The revision document of a hand-written list. A short walk takes the holds of the full one. */
-export function revisionDocument({ sheet, checks, walks }: HandWritten): RevisionDocument {
+/** The revision document of a list by hand. A short walk takes the holds of the full one. */
+export function plainDocument({ sheet, catalogue, checks, walks }: PlainList): RevisionDocument {
   const depths = (list: Check[]): Record<Depth, string[]> => ({
     full: list.map(({ key }) => key),
     short: list.filter(({ effect }) => effect === "hold").map(({ key }) => key),
@@ -27,7 +29,7 @@ export function revisionDocument({ sheet, checks, walks }: HandWritten): Revisio
   return {
     v: 1,
     sheet,
-    catalogue: "hand-written 1",
+    catalogue,
     list: { stations: stationKeys.map((key) => ({ key, title: titles[key], checks: checks[key] })) },
     walks: Object.fromEntries(
       purposes.map((purpose) => [purpose, depths(walks[purpose])]),
