@@ -4,6 +4,8 @@ import { useSyncExternalStore } from "react";
 export interface Address {
   walk: string | null;
   at: string | null;
+  /** The settings, instead of a walk. */
+  settings?: true;
 }
 
 export const CLOSING = "close";
@@ -20,15 +22,21 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** The wing's own path for an address: one document, ids in the query string. */
-export function hrefOf({ walk, at }: Partial<Address>): string {
-  const query = new URLSearchParams({ ...(walk && { walk }), ...(walk && at && { at }) }).toString();
+export function hrefOf({ walk, at, settings }: Partial<Address>): string {
+  const query = new URLSearchParams({
+    ...(walk && { walk }),
+    ...(walk && at && { at }),
+    ...(!walk && settings && { settings: "1" }),
+  }).toString();
   return query ? `/field?${query}` : "/field";
 }
 
 /** The address that a query string says. */
 export function addressOf(search: string): Address {
   const query = new URLSearchParams(search);
-  return { walk: query.get("walk") || null, at: query.get("at") || null };
+  const walk = query.get("walk") || null;
+  const settings = !walk && query.has("settings") && { settings: true as const };
+  return { walk, at: query.get("at") || null, ...settings };
 }
 
 /** The query string now; the empty one while the page is prerendered. */

@@ -1,6 +1,8 @@
 "use client";
 
 import { useEffect } from "react";
+import { SettingsScreen } from "@/components/settings/settings-screen";
+import { StoreNotices } from "@/components/settings/store-notices";
 import { addressOf, useSearch } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
@@ -11,7 +13,7 @@ import { WalkScreen } from "./walk-screen";
 /** The field wing: everything that works with no network, on one static page. */
 export function FieldWing() {
   const sync = useSyncView();
-  const { walk, at } = addressOf(useSearch());
+  const { walk, at, settings } = addressOf(useSearch());
 
   useEffect(() => {
     void registerWorker();
@@ -20,5 +22,11 @@ export function FieldWing() {
   useEffect(() => followTaps(), []);
   useEffect(() => letGo(walk), [walk]);
 
-  return walk ? <WalkScreen key={walk} sync={sync} walk={walk} at={at} /> : <RigsScreen sync={sync} />;
+  return (
+    <>
+      <StoreNotices inWalk={walk !== null} />
+      {walk && <WalkScreen key={walk} sync={sync} walk={walk} at={at} />}
+      {!walk && (settings ? <SettingsScreen sync={sync} /> : <RigsScreen sync={sync} />)}
+    </>
+  );
 }
