@@ -24,7 +24,7 @@ export function FieldWing() {
 
   return (
     <>
-      <StoreNotices inWalk={walk !== null} />
+      <StoreNotices told={walk !== null || (sync.storeRefused && !settings)} />
       {walk && <WalkScreen key={walk} sync={sync} walk={walk} at={at} />}
       {!walk && (settings ? <SettingsScreen sync={sync} /> : <RigsScreen sync={sync} />)}
     </>

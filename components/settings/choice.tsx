@@ -17,11 +17,11 @@ export function Choice<K extends string>({ title, lead, options, value, onChoose
     <fieldset className="min-w-0">
       <legend className="pb-2 text-xl leading-tight font-extrabold">{title}</legend>
       {lead && <p className="-mt-1 pb-2 text-base text-soft">{lead}</p>}
-      <div className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,11rem),1fr))] gap-2.5">
+      <div className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,10rem),1fr))] gap-2.5">
         {(Object.entries(options) as [K, Option][]).map(([key, { label, hint }]) => (
           <label
             key={key}
-            className="group relative flex min-h-field items-center gap-3 rounded-[3px] border-2 border-edge px-3.5 py-2 leading-tight font-semibold has-checked:border-ink has-checked:bg-ink has-checked:text-paper"
+            className="group relative flex min-h-field items-center gap-[min(0.75rem,3%)] rounded-[3px] border-2 border-edge px-[min(0.875rem,4%)] py-2 leading-tight font-semibold has-checked:border-ink has-checked:bg-ink has-checked:text-paper"
           >
             {/* It lies over its label, so that the whole field shows the focus and takes the touch. */}
             <input
@@ -33,9 +33,9 @@ export function Choice<K extends string>({ title, lead, options, value, onChoose
             />
             <span
               aria-hidden="true"
-              className="grid size-6 shrink-0 place-items-center rounded-full border-2 border-current"
+              className="grid aspect-square w-[min(1.5rem,12%)] shrink-0 place-items-center rounded-full border-2 border-current"
             >
-              <span className="hidden size-3 rounded-full bg-current group-has-checked:block" />
+              <span className="hidden size-[50%] rounded-full bg-current group-has-checked:block" />
             </span>
             <span className="min-w-0">
               {label}

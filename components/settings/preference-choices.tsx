@@ -38,6 +38,7 @@ export function PreferenceChoices() {
       />
       <Choice
         title={settingsWords.hand.title}
+        lead={settingsWords.hand.lead}
         options={settingsWords.hand.choices}
         value={hand}
         onChoose={(value) => choose("hand", value)}

@@ -1,7 +1,7 @@
 import { useEffect, useRef } from "react";
 import { FieldFrame } from "@/components/field/field-frame";
 import { useWaitingVersion } from "@/components/field/register-worker";
-import { useArrival, useScreenTitle } from "@/components/field/screen-title";
+import { useReturn, useScreenTitle } from "@/components/field/screen-title";
 import { WingLink } from "@/components/field/wing-link";
 import type { SyncView } from "@/lib/client/sync";
 import { settingsWords } from "@/lib/domain/messages/settings";
@@ -16,13 +16,13 @@ import { StorageSection } from "./storage-section";
 export function SettingsScreen({ sync }: { sync: SyncView }) {
   const heading = useRef<HTMLHeadingElement>(null);
   useScreenTitle(settingsWords.title);
-  useArrival(heading, settingsWords.title);
+  useReturn(heading);
   // A reload in the middle of the page begins at its top.
   useEffect(() => window.scrollTo(0, 0), []);
   return (
     <FieldFrame>
       <header className="flex flex-wrap items-center justify-between gap-x-4 pt-2 pr-1 pb-1 pl-4">
-        <div className="min-w-0 py-1">
+        <div className="min-w-0 flex-[1_1_9rem] py-1">
           <h1
             ref={heading}
             tabIndex={-1}

@@ -25,14 +25,14 @@ export function useStoreGuard(): GuardView {
 
 /**
  * Above every screen of the wing: what a cleared store took with it, and what is wrong with it now.
- * @param inWalk a walk's own screen says what a mark met with, so that it is not said twice
+ * @param told the screen below says itself what is wrong now, so that it is not said twice
  */
-export function StoreNotices({ inWalk }: { inWalk: boolean }) {
+export function StoreNotices({ told }: { told: boolean }) {
   const { trouble, lost } = useStoreGuard();
   return (
     <>
       {lost && <LostNotice lost={lost} />}
-      {trouble && !inWalk && <StoreTroubleNotice trouble={trouble} />}
+      {trouble && !told && <StoreTroubleNotice trouble={trouble} />}
     </>
   );
 }
@@ -41,7 +41,8 @@ function LostNotice({ lost }: { lost: Lost }) {
   const nowMs = useNowMs();
   const walks = Object.entries(lost.walks);
   const held = useHeldRecord(walks.map(([id]) => id));
-  const title = walks.length > 0 ? lostWords.title(walks.length) : lostWords.titleReceived;
+  const cutShort = walks.some(([, { left }]) => left > 0);
+  const title = walks.length > 0 ? lostWords.title(walks.length, cutShort) : lostWords.titleReceived;
   return (
     <div role="alert" data-lost={walks.length} className="mx-auto w-full max-w-[76rem]">
       <Notice tone="caution" title={title}>

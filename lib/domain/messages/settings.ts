@@ -30,16 +30,17 @@ export const settingsWords = {
     title: "Size of text",
     choices: {
       "100": { label: "Usual" },
-      "125": { label: "Larger, 125 %" },
-      "150": { label: "Large, 150 %" },
-      "200": { label: "Largest, 200 %" },
+      "125": { label: "Larger, 125%" },
+      "150": { label: "Large, 150%" },
+      "200": { label: "Largest, 200%" },
     },
   },
   hand: {
     title: "The hand that holds the phone",
+    lead: "In the left hand, the buttons under a check change sides.",
     choices: {
       right: { label: "Right" },
-      left: { label: "Left", hint: "The buttons under a check change sides." },
+      left: { label: "Left" },
     },
   },
   sound: {
@@ -132,10 +133,11 @@ export const storeWords = {
 
 /** What a cleared store took with it. */
 export const lostWords = {
-  title: (count: number) =>
-    count === 1
-      ? "1 walk that had not been received is no longer whole on this phone"
-      : `${count} walks that had not been received are no longer whole on this phone`,
+  title: (count: number, cutShort: boolean) => {
+    const which =
+      count === 1 ? "1 walk that had not been received is" : `${count} walks that had not been received are`;
+    return `${which} no longer ${cutShort ? "whole " : ""}on this phone`;
+  },
   titleReceived: "This browser cleared what was kept on this phone",
   cleared: "This browser cleared its storage.",
   received: (count: number) =>
