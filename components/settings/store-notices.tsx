@@ -58,7 +58,7 @@ function LostNotice({ lost }: { lost: Lost }) {
         {lost.received > 0 && <p>{lostWords.received(lost.received)}</p>}
         {held && (
           <div className="py-2">
-            <p className="pb-2 font-semibold">{lostWords.held}</p>
+            <p className="pb-2 font-semibold">{lostWords.held(walks.length)}</p>
             <ExportButton file={async () => exportHeld(held())} />
           </div>
         )}

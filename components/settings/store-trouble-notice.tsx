@@ -1,7 +1,8 @@
+import { theField } from "@/components/field/browser-field";
 import { Notice } from "@/components/ui/notice";
-import { exportHeld, type HeldRecord } from "@/lib/client/record-export";
+import { exportAll, exportHeld, type HeldRecord } from "@/lib/client/record-export";
 import type { StoreTrouble } from "@/lib/client/store-trouble";
-import { storeWords } from "@/lib/domain/messages/settings";
+import { settingsWords, storeWords } from "@/lib/domain/messages/settings";
 import { ExportButton } from "./export-button";
 
 type StoreTroubleNoticeProps = {
@@ -10,7 +11,10 @@ type StoreTroubleNoticeProps = {
   held?: () => HeldRecord;
 };
 
-/** What is wrong with the phone's store, what to do, and the way to take the walk away as a file. */
+/**
+ * What is wrong with the phone's store, what to do, and the way to take the walk away as a file; without one, all that
+ * can still be read.
+ */
 export function StoreTroubleNotice({ trouble, held }: StoreTroubleNoticeProps) {
   const { title, text } = storeWords[trouble];
   return (
@@ -20,6 +24,14 @@ export function StoreTroubleNotice({ trouble, held }: StoreTroubleNoticeProps) {
         {held && (
           <div className="pt-3">
             <ExportButton file={async () => exportHeld(held())} />
+          </div>
+        )}
+        {!held && trouble !== "refused" && (
+          <div className="pt-3">
+            <ExportButton
+              label={settingsWords.storage.exportAll}
+              file={() => exportAll(theField().sync.shelf, Date.now())}
+            />
           </div>
         )}
       </Notice>

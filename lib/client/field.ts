@@ -67,7 +67,8 @@ export class Field {
 
   /** Opens a walk on a rig; resolves when its first entry is saved on this phone. */
   async open(rig: BundleRig, member: string, purpose: Purpose, depth: Depth): Promise<HeldWalk> {
-    void askToKeep();
+    // The first walk is the moment: before it there is nothing to lose, and some browsers ask the person.
+    if (this.sync.view().walks.length === 0) void askToKeep();
     const recorder = await Recorder.open(await this.ground(member), rig, { member, purpose, depth });
     return (await this.hold(recorder.view().walk.id, async () => recorder)) as HeldWalk;
   }

@@ -1,3 +1,5 @@
+import { askToKeep } from "./persistence";
+
 /** What an installed Hookfast means in this browser, and what is to be said of it before someone signs in. */
 export type InstallSituation =
   /** This is the installed app. */
@@ -41,6 +43,7 @@ export function followInstallOffer(): () => void {
   const installed = () => {
     prompt = null;
     installedNow = true;
+    void askToKeep();
     listeners.forEach((listener) => listener());
   };
   window.addEventListener("beforeinstallprompt", offered);

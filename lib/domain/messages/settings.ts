@@ -123,7 +123,7 @@ export const storeWords = {
   },
   vanished: {
     title: "What was kept on this phone is gone",
-    text: "This browser cleared its storage while the walk was open. This page still holds the walk up to its last saved mark: export it to a file before you close the page, then start the walk again.",
+    text: "The browser’s storage was cleared while the walk was open. This page still holds the walk up to its last saved mark: export it to a file before you close the page, then start the walk again.",
   },
   unknown: {
     title: "This phone’s storage does not answer",
@@ -138,15 +138,16 @@ export const lostWords = {
       count === 1 ? "1 walk that had not been received is" : `${count} walks that had not been received are`;
     return `${which} no longer ${cutShort ? "whole " : ""}on this phone`;
   },
-  titleReceived: "This browser cleared what was kept on this phone",
-  cleared: "This browser cleared its storage.",
+  titleReceived: "What was kept on this phone was cleared",
+  cleared: "This browser’s storage was cleared.",
   received: (count: number) =>
     count === 1
       ? "1 received walk went too; it is at the desk."
       : `${count} received walks went too; they are at the desk.`,
   walk: (purpose: Purpose, rig: string, when: string) => `${purposeWords[purpose]}, ${rig}, ${when}`,
   left: (left: number, length: number) => `, its first ${left} of ${length} entries are here`,
-  held: "This page still holds one of them. Export it before you close the page.",
+  held: (count: number) =>
+    `This page still holds ${count === 1 ? "it" : "one of them"}. Export it before you close the page.`,
   kept: "What keeps walks: install Hookfast on the home screen, let the browser store data, and sign in so that they are sent.",
   settings: "Storage and installing",
   read: "I have read this",
