@@ -1,4 +1,4 @@
-import { useEffect, useRef } from "react";
+import { useRef } from "react";
 import { FieldFrame } from "@/components/field/field-frame";
 import { useWaitingVersion } from "@/components/field/register-worker";
 import { useReturn, useScreenTitle } from "@/components/field/screen-title";
@@ -17,8 +17,6 @@ export function SettingsScreen({ sync }: { sync: SyncView }) {
   const heading = useRef<HTMLHeadingElement>(null);
   useScreenTitle(settingsWords.title);
   useReturn(heading);
-  // A reload in the middle of the page begins at its top.
-  useEffect(() => window.scrollTo(0, 0), []);
   return (
     <FieldFrame>
       <header className="flex flex-wrap items-center justify-between gap-x-4 pt-2 pr-1 pb-1 pl-4">
