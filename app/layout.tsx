@@ -1,5 +1,7 @@
 import type { Metadata, Viewport } from "next";
 import type { ReactNode } from "react";
+import { FollowPreferences } from "@/components/settings/follow-preferences";
+import { FIRST_PAINT } from "@/lib/client/first-paint";
 import { frontWords } from "@/lib/domain/messages/session";
 import { fontVariables } from "./fonts";
 import "./globals.css";
@@ -25,8 +27,15 @@ export const viewport: Viewport = {
 /** The document around every page. */
 export default function RootLayout({ children }: { children: ReactNode }) {
   return (
-    <html lang="en-US" className={fontVariables}>
-      <body className="font-sans">{children}</body>
+    // Its attributes are set before React comes, by the script that dresses the page as chosen.
+    <html lang="en-US" className={fontVariables} suppressHydrationWarning>
+      <head>
+        <script dangerouslySetInnerHTML={{ __html: FIRST_PAINT }} />
+      </head>
+      <body className="font-sans">
+        {children}
+        <FollowPreferences />
+      </body>
     </html>
   );
 }

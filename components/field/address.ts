@@ -17,14 +17,25 @@ export const PLAN = "plan";
 /** Without a walk: where a rig is made on this phone. */
 export const NEW_RIG = "new-rig";
 
+let moved = false;
+
+/** Whether someone has gone from one screen to another since the page was loaded. */
+export function hasMoved(): boolean {
+  return moved;
+}
+
 const listeners = new Set<() => void>();
 
 function subscribe(listener: () => void): () => void {
+  const back = () => {
+    moved = true;
+    listener();
+  };
   listeners.add(listener);
-  window.addEventListener("popstate", listener);
+  window.addEventListener("popstate", back);
   return () => {
     listeners.delete(listener);
-    window.removeEventListener("popstate", listener);
+    window.removeEventListener("popstate", back);
   };
 }
 
@@ -54,6 +65,7 @@ export function useSearch(): string {
 export function goTo(address: Partial<Address>): void {
   window.history.pushState(null, "", hrefOf(address));
   window.scrollTo(0, 0);
+  moved = true;
   for (const listener of listeners) listener();
 }
 
@@ -61,5 +73,6 @@ export function goTo(address: Partial<Address>): void {
 export function moveTo(address: Partial<Address>): void {
   window.history.replaceState(null, "", hrefOf(address));
   window.scrollTo(0, 0);
+  moved = true;
   for (const listener of listeners) listener();
 }

@@ -1,5 +1,6 @@
 import { useSyncExternalStore } from "react";
 import { Field, type HeldWalk } from "@/lib/client/field";
+import type { HeldRecord } from "@/lib/client/record-export";
 import type { SyncView } from "@/lib/client/sync";
 import type { WalkPlan } from "@/lib/client/recorder";
 import type { BundleRig } from "@/lib/domain/field";
@@ -68,6 +69,12 @@ export function takeUp(member: string, walk: string): Promise<Held> {
     () => forget(walk),
   );
   return hold;
+}
+
+/** What this tab holds in memory of the walk that it records, for when the store cannot be read; null without one. */
+export async function heldRecord(): Promise<(() => HeldRecord) | null> {
+  const outcome = await held?.hold.catch(() => null);
+  return outcome && outcome !== "elsewhere" ? outcome.recorder.held : null;
 }
 
 /** Lets go of the walk that this tab records, unless it is this one. */

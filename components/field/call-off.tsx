@@ -7,7 +7,7 @@ import { moveTo } from "./address";
 import { Question } from "./question";
 import { useSettled } from "./settling";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { plainText } from "./walk-plan";
 
 const words = walkingWords.stop;
@@ -25,7 +25,7 @@ export function CallOff({
   const [text, setText] = useState("");
   const [empty, setEmpty] = useState(false);
   const settled = useSettled("call-off");
-  const { take, trouble } = useTaking(settled);
+  const { take, error } = useTaking(settled);
 
   const callOff = (reason: string) =>
     take(async () => {
@@ -44,7 +44,7 @@ export function CallOff({
   return (
     <Question id="call-off" title={words.why}>
       <p className="px-1 text-base text-soft">{words.whyNote}</p>
-      {trouble && <Trouble>{trouble}</Trouble>}
+      <SaveTrouble error={error} held={recorder.held} />
       <div className="acts-two">
         {words.reasons.map((reason) => (
           <Button key={reason} onClick={() => callOff(reason)}>

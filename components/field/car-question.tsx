@@ -11,7 +11,7 @@ import { useArrival, useScreenTitle } from "./screen-title";
 import { useSettled } from "./settling";
 import { StopButton } from "./stop-button";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { WalkFrame } from "./walk-frame";
 import { WalkHead } from "./walk-head";
 import { WalkStrip } from "./walk-strip";
@@ -25,7 +25,7 @@ type CarQuestionProps = { recorder: Recorder; view: WalkView; walk: KeptWalk };
 export function CarQuestion({ recorder, view, walk }: CarQuestionProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   const settled = useSettled("car");
-  const { take, trouble } = useTaking(settled);
+  const { take, error } = useTaking(settled);
   useScreenTitle(fieldWords.walk.title(walk.purpose, walk.rigName));
   useArrival(heading, "car");
 
@@ -62,7 +62,7 @@ export function CarQuestion({ recorder, view, walk }: CarQuestionProps) {
       }
       acts={
         <div className="flex flex-col gap-2.5">
-          {trouble && <Trouble>{trouble}</Trouble>}
+          <SaveTrouble error={error} held={recorder.held} />
           <div className="acts-two">
             <Button variant="good" className="text-[1.875rem]" onClick={() => answer(false)}>
               {words.nobody}

@@ -5,7 +5,7 @@ import { fieldWords } from "@/lib/domain/messages/field";
 import type { Marking } from "./marking";
 import { useScreenTitle } from "./screen-title";
 import { StopButton } from "./stop-button";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { WalkFrame } from "./walk-frame";
 import { WalkHead } from "./walk-head";
 import type { Step } from "./walk-plan";
@@ -57,7 +57,7 @@ export function CheckFrame({ recorder, view, walk, steps, step, marking, ...part
           <p role="status" className="sr-only">
             {words.announce(marking.saved, station.title, place, steps.length)} {parts.announce}
           </p>
-          {marking.trouble && <Trouble>{marking.trouble}</Trouble>}
+          <SaveTrouble error={marking.error} held={recorder.held} />
           {parts.acts}
         </>
       }

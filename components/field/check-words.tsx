@@ -40,11 +40,7 @@ export function CheckWords({ check, mark, marking }: CheckWordsProps) {
           <p className="min-w-0 flex-1 font-semibold">
             {fieldWords.walk.marked(mark.outcome)}
             {mark.note && <span className="block text-base font-normal text-soft">{mark.note}</span>}
-            {mark.measured?.entered && (
-              <span className="block text-base font-normal text-soft">
-                {walkingWords.measure.read(String(mark.measured.entered.value), mark.measured.entered.unit)}
-              </span>
-            )}
+            {mark.measured && <Reading {...(mark.measured.entered ?? mark.measured)} />}
           </p>
           {mark.outcome === "fault" && (
             <Button variant="quiet" onClick={() => marking.ask("details")}>
@@ -65,5 +61,13 @@ export function CheckWords({ check, mark, marking }: CheckWordsProps) {
         </div>
       )}
     </div>
+  );
+}
+
+function Reading({ value, unit }: { value: number; unit: string }) {
+  return (
+    <span className="block text-base font-normal text-soft">
+      {walkingWords.measure.read(String(value), unit)}
+    </span>
   );
 }

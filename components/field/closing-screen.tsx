@@ -9,7 +9,7 @@ import { BottomBar } from "./bottom-bar";
 import { isSecondTap } from "./settling";
 import { StepList } from "./step-list";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { VerdictMark } from "./verdict-mark";
 import { WalkHead } from "./walk-head";
 import { nextStep, tallyOf, type Step } from "./walk-plan";
@@ -26,7 +26,7 @@ export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProp
   const { marks, verdict } = view.replay;
   const tally = tallyOf(view.document, steps, marks);
   const heading = useRef<HTMLHeadingElement>(null);
-  const { take, trouble } = useTaking();
+  const { take, error } = useTaking();
   useScreenTitle(fieldWords.walk.title(walk.purpose, walk.rigName));
   useArrival(heading, "closing");
 
@@ -71,9 +71,9 @@ export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProp
         height="tall"
         className="acts-two px-3 md:col-start-2 md:row-start-3 md:self-end md:border-0"
       >
-        {trouble && (
+        {error !== null && (
           <div className="col-span-full">
-            <Trouble>{trouble}</Trouble>
+            <SaveTrouble error={error} held={recorder.held} />
           </div>
         )}
         {onward ? (

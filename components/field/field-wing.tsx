@@ -1,8 +1,11 @@
 "use client";
 
 import { useEffect } from "react";
+import { SettingsScreen } from "@/components/settings/settings-screen";
+import { StoreNotices } from "@/components/settings/store-notices";
 import { NewRig } from "@/components/starter/new-rig";
-import { addressOf, NEW_RIG, useSearch } from "./address";
+import type { SyncView } from "@/lib/client/sync";
+import { addressOf, NEW_RIG, useSearch, type Address } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
@@ -13,7 +16,8 @@ import { WalkScreen } from "./walk-screen";
 /** The field wing: everything that works with no network, on one static page. */
 export function FieldWing() {
   const sync = useSyncView();
-  const { walk, at, paper } = addressOf(useSearch());
+  const address = addressOf(useSearch());
+  const { walk, settings } = address;
 
   useEffect(() => {
     void registerWorker();
@@ -22,8 +26,20 @@ export function FieldWing() {
   useEffect(() => followTaps(), []);
   useEffect(() => letGo(walk), [walk]);
 
+  return (
+    <>
+      <StoreNotices told={walk !== null || (sync.storeRefused && !settings)} />
+      <Screen sync={sync} address={address} />
+    </>
+  );
+}
+
+/** The one screen that an address says. */
+function Screen({ sync, address }: { sync: SyncView; address: Address }) {
+  const { walk, at, paper, settings } = address;
   if (walk) return <WalkScreen key={walk} sync={sync} walk={walk} at={at} />;
   if (paper) return <PaperScreen sync={sync} rig={paper} />;
+  if (settings) return <SettingsScreen sync={sync} />;
   if (at === NEW_RIG) return <NewRig />;
   return <RigsScreen sync={sync} />;
 }

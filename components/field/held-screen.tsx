@@ -11,7 +11,7 @@ import { Findings } from "./findings";
 import { useArrival, useScreenTitle } from "./screen-title";
 import { useSettled } from "./settling";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { VerdictBand } from "./verdict-band";
 import { WalkHead } from "./walk-head";
 import { WalkTimer } from "./walk-timer";
@@ -32,7 +32,7 @@ export function HeldScreen({ recorder, view, walk, steps }: HeldScreenProps) {
   const again = againAfterMending(view.document, held, [...marks.keys()]);
   const heading = useRef<HTMLHeadingElement>(null);
   const settled = useSettled("held");
-  const { take, trouble } = useTaking(settled);
+  const { take, error } = useTaking(settled);
   useScreenTitle(fieldWords.verdict.hold);
   useArrival(heading, "held");
 
@@ -55,7 +55,7 @@ export function HeldScreen({ recorder, view, walk, steps }: HeldScreenProps) {
       <Findings tally={tally} marks={marks} />
       <p className="px-4 py-4 text-[0.9375rem] text-soft">{fieldWords.result.deference}</p>
       <BottomBar height="tall" className="flex flex-col gap-2.5 px-3">
-        {trouble && <Trouble>{trouble}</Trouble>}
+        <SaveTrouble error={error} held={recorder.held} />
         <p className="px-1 text-base text-soft">{words.againList(again.length)}</p>
         <div className="acts-two">
           <Button variant="good" hint={words.againHint} onClick={lookAgain}>

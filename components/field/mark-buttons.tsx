@@ -19,7 +19,7 @@ export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
   return (
     <div className="flex flex-col gap-2.5">
       {/* Good takes two columns of the row below and the gap between them; with large text each takes a row. */}
-      <div className="flex flex-wrap gap-2.5">
+      <div className="by-hand flex flex-wrap gap-2.5">
         <Button
           variant="good"
           hint={asDrawn ? words.asDrawn : undefined}
@@ -36,7 +36,7 @@ export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
           {words.fault} <span className="sr-only">{holds ? words.faultHold : words.faultFix}</span>
         </Button>
       </div>
-      <div className="flex flex-wrap gap-2.5">
+      <div className="by-hand flex flex-wrap gap-2.5">
         <Button variant="quiet" className={third} disabled={first} onClick={marking.back}>
           {words.backOne}
         </Button>

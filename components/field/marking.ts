@@ -1,9 +1,9 @@
 import { useLayoutEffect, useRef, useState } from "react";
+import { feel } from "@/lib/client/feel";
 import type { Recorder } from "@/lib/client/recorder";
 import type { MarkBody, Outcome } from "@/lib/domain/entry";
 import { CLOSING, moveTo } from "./address";
 import { useSettled } from "./settling";
-import { troubleOf } from "./taking";
 import { needsReason, nextStep, stepBefore, type Step } from "./walk-plan";
 
 /**
@@ -27,7 +27,8 @@ export interface Marking {
   ask: (question: Question | null) => void;
   /** The outcome saved last, to be read out with the next check. */
   saved: Outcome | null;
-  trouble: string | null;
+  /** What the store said when a mark was not kept; null where there is nothing to say. */
+  error: unknown;
 }
 
 /** Marks one check: saves first, moves on only then, and takes no touch that was meant for what showed before. */
@@ -36,7 +37,7 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   const { key } = check;
   const [question, setQuestion] = useState<{ at: string; question: Question } | null>(null);
   const [saved, setSaved] = useState<Outcome | null>(null);
-  const [trouble, setTrouble] = useState<{ at: string; words: string } | null>(null);
+  const [trouble, setTrouble] = useState<{ at: string; error: unknown } | null>(null);
   const saving = useRef(false);
   /** What was to be saved when the question why came first. */
   const pending = useRef<Partial<MarkBody>>({});
@@ -63,11 +64,13 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
       await recorder.mark(key, outcome, more);
     } catch (error) {
       saving.current = false;
-      setTrouble({ at: key, words: troubleOf(error) });
+      setTrouble({ at: key, error });
+      feel("trouble");
       return false;
     }
     setTrouble(null);
     setSaved(outcome);
+    feel(outcome !== "fault" ? "saved" : check.effect === "hold" ? "hold" : "fault");
     return true;
   };
   const stay = (next: Question) => {
@@ -116,6 +119,6 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
     asking,
     ask,
     saved,
-    trouble: trouble?.at === key ? trouble.words : null,
+    error: trouble?.at === key ? trouble.error : null,
   };
 }

@@ -3,7 +3,8 @@ import { Button } from "@/components/ui/button";
 import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Measure } from "@/lib/domain/revision";
 import type { Marking } from "./marking";
-import { measuredOf, unitFor } from "./measured";
+import { usePreferences } from "@/components/settings/use-preferences";
+import { fromEntered, unitFor } from "@/lib/domain/units";
 import { Question } from "./question";
 
 const words = walkingWords.measure;
@@ -14,15 +15,16 @@ const LONGEST = 7;
 export function MeasureQuestion({ measure, marking }: { measure: Measure; marking: Marking }) {
   const [text, setText] = useState("");
   const [empty, setEmpty] = useState(false);
-  const unit = unitFor(measure);
+  const { units } = usePreferences();
+  const unit = unitFor(measure.quantity, units);
   const press = (key: string) => {
     setEmpty(false);
     setText((now) => (now.length >= LONGEST || (key === "." && now.includes(".")) ? now : now + key));
   };
   const save = async () => {
-    const measured = measuredOf(measure, text, unit);
-    if (!measured) return setEmpty(true);
-    await marking.amend({ measured });
+    const value = Number(text);
+    if (text === "" || !Number.isFinite(value)) return setEmpty(true);
+    await marking.amend({ measured: fromEntered(measure.quantity, value, units) });
     marking.skip();
   };
   return (

@@ -12,7 +12,7 @@ import { PaperCard } from "./paper-card";
 import { purposesFor } from "./rig-state";
 import { useScreenTitle } from "./screen-title";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { ReadingWalk } from "./walk-notes";
 import { WingLink } from "./wing-link";
 
@@ -52,7 +52,7 @@ type PaperStartProps = { rig: BundleRig; member: string; purpose: Purpose; onBac
 /** When a card was filled in; then its marks are entered one by one. */
 function PaperStart({ rig, member, purpose, onBack }: PaperStartProps) {
   const [when, setWhen] = useState("");
-  const { take, trouble } = useTaking();
+  const { take, error } = useTaking();
   const start = () =>
     take(async () => goTo({ walk: await startPaperWalk(rig, { member, purpose, depth: "full" }, when) }));
   return (
@@ -67,7 +67,7 @@ function PaperStart({ rig, member, purpose, onBack }: PaperStartProps) {
           value={when}
           onChange={(event) => setWhen(event.target.value)}
         />
-        {trouble && <Trouble>{trouble}</Trouble>}
+        <SaveTrouble error={error} />
         <div className="acts-two">
           <Button variant="good" onClick={start}>
             {words.start}

@@ -13,7 +13,7 @@ import { useArrival, useScreenTitle } from "./screen-title";
 import { useSettled } from "./settling";
 import { StepList } from "./step-list";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { WalkHead } from "./walk-head";
 import { WalkTimer } from "./walk-timer";
 import { nextStep, type Step } from "./walk-plan";
@@ -43,7 +43,7 @@ export function ResumeScreen({ recorder, view, walk, steps, interruption }: Resu
   const next = nextStep(steps, marks, null);
   const heading = useRef<HTMLHeadingElement>(null);
   const settled = useSettled("resume");
-  const { take, trouble } = useTaking(settled);
+  const { take, error } = useTaking(settled);
   useScreenTitle(fieldWords.walk.title(walk.purpose, walk.rigName));
   useArrival(heading, "resume");
 
@@ -87,7 +87,7 @@ export function ResumeScreen({ recorder, view, walk, steps, interruption }: Resu
         </>
       )}
       <BottomBar height="tall" className="flex flex-col gap-2.5 px-3">
-        {trouble && <Trouble>{trouble}</Trouble>}
+        <SaveTrouble error={error} held={recorder.held} />
         {cabin && <p className="px-1 text-xl leading-snug font-extrabold">{words.car}</p>}
         <div className="acts-two">
           {cabin ? (

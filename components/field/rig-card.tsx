@@ -17,7 +17,7 @@ import { RigPicture } from "./rig-picture";
 import { RigStarts } from "./rig-starts";
 import { lastWalkOf, openWalksOf, purposesFor, usualDepth } from "./rig-state";
 import { Stale } from "./stale";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { WingLink } from "./wing-link";
 
 const words = fieldWords.rigs;
@@ -34,7 +34,7 @@ type RigCardProps = {
 export function RigCard({ rig, member, walks, alone }: RigCardProps) {
   const title = useId();
   const starting = useRef(false);
-  const [failed, setFailed] = useState(false);
+  const [failed, setFailed] = useState<unknown>(null);
   const nowMs = useNowMs();
   const [chosen, setChosen] = useState<Depth | null>(null);
   const depth = chosen ?? usualDepth(rig, walks, nowMs);
@@ -48,8 +48,8 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
     starting.current = true;
     try {
       goTo({ walk: await startWalk(rig, { member: member.id, purpose, depth }) });
-    } catch {
-      setFailed(true);
+    } catch (error) {
+      setFailed(error);
     }
     starting.current = false;
   };
@@ -71,7 +71,7 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           </div>
         </div>
         <div className="-mx-1 flex flex-col gap-2.5">
-          {failed && <Trouble>{words.notStarted}</Trouble>}
+          <SaveTrouble error={failed} />
           {open.map((walk) => (
             <GoOn key={walk.id} walk={walk} />
           ))}

@@ -1,4 +1,5 @@
 import { useEffect, useState } from "react";
+import { UpdateOffer } from "@/components/settings/update-offer";
 import { EmptyState } from "@/components/ui/empty-state";
 import { Skeleton } from "@/components/ui/skeleton";
 import { LocalNote, LocalRigsFoot } from "@/components/starter/local-note";
@@ -23,6 +24,7 @@ export function RigsScreen({ sync }: { sync: SyncView }) {
   return (
     <FieldFrame>
       <WingTop member={sync.bundle?.member} />
+      <UpdateOffer walks={sync.walks} />
       <Rigs sync={sync} />
     </FieldFrame>
   );

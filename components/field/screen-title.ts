@@ -1,5 +1,6 @@
 import { useEffect, type RefObject } from "react";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { hasMoved } from "./address";
 
 /** Names the document after the screen that shows. */
 export function useScreenTitle(screen: string): void {
@@ -20,4 +21,11 @@ export function useArrival(heading: RefObject<HTMLElement | null>, appearance: s
     if (anyScreenBefore) heading.current?.focus({ preventScroll: true });
     anyScreenBefore = true;
   }, [heading, appearance]);
+}
+
+/** The same for a screen that is prerendered, and so is mounted before the address is known: only after a move. */
+export function useReturn(heading: RefObject<HTMLElement | null>): void {
+  useEffect(() => {
+    if (hasMoved()) heading.current?.focus({ preventScroll: true });
+  }, [heading]);
 }

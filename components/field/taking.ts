@@ -1,35 +1,32 @@
 import { useState } from "react";
-import { MovedOn } from "@/lib/client/walk-shelf";
-import { fieldWords } from "@/lib/domain/messages/field";
+import { feel } from "@/lib/client/feel";
 import { isSecondTap } from "./settling";
 
 /** Something that is saved by one tap: at most one at a time, none by a second tap, and a refusal is said. */
 export interface Taking {
   take: (work: () => Promise<unknown>) => void;
-  trouble: string | null;
+  /** What the store said when it did not keep something; null where there is nothing to say. */
+  error: unknown;
 }
 
 /** Runs what a button saves, one thing at a time. */
 export function useTaking(settled: () => boolean = () => !isSecondTap()): Taking {
   const [busy, setBusy] = useState(false);
-  const [trouble, setTrouble] = useState<string | null>(null);
+  const [error, setError] = useState<unknown>(null);
   return {
     take(work) {
       if (busy || !settled()) return;
       setBusy(true);
       work()
         .then(
-          () => setTrouble(null),
-          (error) => setTrouble(troubleOf(error)),
+          () => setError(null),
+          (thrown: unknown) => {
+            feel("trouble");
+            setError(thrown);
+          },
         )
         .finally(() => setBusy(false));
     },
-    trouble,
+    error,
   };
-}
-
-/** What to say when the phone did not keep something. */
-export function troubleOf(error: unknown): string {
-  const { movedOn, notSaved } = fieldWords.walk;
-  return error instanceof MovedOn ? movedOn : notSaved;
 }

@@ -17,7 +17,7 @@ import { useArrival, useScreenTitle } from "./screen-title";
 import { Stale } from "./stale";
 import { StepList } from "./step-list";
 import { useTaking } from "./taking";
-import { Trouble } from "./trouble";
+import { SaveTrouble } from "./save-trouble";
 import { VerdictBand } from "./verdict-band";
 import { WalkHead } from "./walk-head";
 import { stepsOf, tallyOf } from "./walk-plan";
@@ -35,7 +35,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
   const { holds, unmarked, unseen, lookedAt, total } = tally;
   const rig = sync.bundle?.rigs.find(({ id }) => id === walk.rig);
   const heading = useRef<HTMLHeadingElement>(null);
-  const { take, trouble } = useTaking();
+  const { take, error } = useTaking();
   const walkAgain = () =>
     take(async () => {
       if (!rig) return;
@@ -92,9 +92,9 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
           height="low"
           className="flex flex-wrap items-center gap-x-4 gap-y-3 px-4 md:mt-0 md:self-start"
         >
-          {trouble && (
+          {error !== null && (
             <div className="basis-full">
-              <Trouble>{trouble}</Trouble>
+              <SaveTrouble error={error} />
             </div>
           )}
           <div className="min-w-0 flex-[1_1_13rem]">

@@ -17,6 +17,7 @@ import { PlanScreen } from "./plan-screen";
 import { ResumeScreen } from "./resume-screen";
 import { useStoredWalk } from "./stored-walk";
 import { VerdictScreen } from "./verdict-screen";
+import { useWakeLock } from "./wake-lock";
 import { MissingWalk, ReadingWalk, StoreRefused } from "./walk-notes";
 import { placeIn, stepsOf } from "./walk-plan";
 
@@ -63,7 +64,8 @@ function LiveWalk({ recorder, walk, sync, at }: LiveWalkProps) {
   const view = useSyncExternalStore(recorder.subscribe, recorder.view);
   const steps = stepsOf(view.document, view.walk);
   const props = { recorder, view, walk, steps };
-  useReturn(recorder);
+  useLeaving(recorder);
+  useWakeLock(view.walk.seal === null);
   const place = placeIn(view, steps, at);
   switch (place.kind) {
     case "closed":
@@ -98,7 +100,7 @@ function CheckOfKind(props: CheckScreenProps) {
 }
 
 /** A page that comes back into sight after long is a walk that was left. */
-function useReturn(recorder: Recorder): void {
+function useLeaving(recorder: Recorder): void {
   useEffect(() => {
     let hiddenAtMs: number | null = null;
     const follow = () => {

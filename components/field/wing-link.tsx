@@ -1,13 +1,7 @@
 import type { MouseEvent, ReactNode } from "react";
-import { goTo, hrefOf } from "./address";
+import { goTo, hrefOf, type Address } from "./address";
 
-type WingLinkProps = {
-  walk?: string;
-  at?: string;
-  paper?: string;
-  className?: string;
-  children: ReactNode;
-};
+type WingLinkProps = Partial<Address> & { className?: string; children: ReactNode };
 
 /** A link inside the wing: its screen changes without a request; opened in a new tab it is an ordinary address. */
 export function WingLink({ className, children, ...address }: WingLinkProps) {

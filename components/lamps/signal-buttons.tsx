@@ -12,7 +12,7 @@ type SignalButtonsProps = { check: Check; board: Board; first: boolean };
 export function SignalButtons({ check, board, first }: SignalButtonsProps) {
   return (
     <div className="flex flex-col gap-2.5">
-      <div className="acts-main flex flex-wrap gap-2.5">
+      <div className="by-hand flex flex-wrap gap-2.5">
         <Button
           variant="good"
           hint={fieldWords.walk.asDrawn}
@@ -29,7 +29,7 @@ export function SignalButtons({ check, board, first }: SignalButtonsProps) {
           {words.odd}
         </Button>
       </div>
-      <div className="flex flex-wrap gap-2.5">
+      <div className="by-hand flex flex-wrap gap-2.5">
         <Button variant="quiet" className={third} disabled={first} onClick={board.back}>
           {fieldWords.walk.backOne}
         </Button>

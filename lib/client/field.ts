@@ -1,8 +1,10 @@
 import type { BundleRig } from "../domain/field";
 import { browserClock, type Clock } from "./clock";
 import { deviceFor } from "./device";
+import { askToKeep } from "./persistence";
 import { Recorder, type Ground, type WalkPlan } from "./recorder";
 import { openStore } from "./store";
+import { browserOutside, StoreGuard } from "./store-guard";
 import { Sync } from "./sync";
 
 const DRAIN_LOCK = "hookfast-drain";
@@ -18,11 +20,15 @@ export interface HeldWalk {
 export class Field {
   readonly clock: Clock = browserClock(document);
   private readonly channel = new BroadcastChannel(CHANNEL);
+  readonly guard = new StoreGuard(
+    openStore(undefined, () => void this.emptied()),
+    browserOutside(),
+  );
   readonly sync: Sync;
 
   constructor() {
     this.sync = new Sync({
-      store: openStore(),
+      store: this.guard.store,
       nowMs: () => performance.now(),
       spread: Math.random(),
       label: navigator.userAgent.slice(0, 100),
@@ -40,18 +46,28 @@ export class Field {
     const stir = () => this.sync.stir();
     const shown = () => document.visibilityState === "visible" && stir();
     this.channel.onmessage = () => void this.sync.read();
+    const unguard = this.guard.follow(this.sync);
     window.addEventListener("online", stir);
     document.addEventListener("visibilitychange", shown);
     void this.sync.start();
     return () => {
+      unguard();
       window.removeEventListener("online", stir);
       document.removeEventListener("visibilitychange", shown);
       this.sync.stop();
     };
   }
 
+  /** The database was deleted under this page: says what is gone, and fetches the rigs anew. */
+  private async emptied(): Promise<void> {
+    await Promise.all([this.guard.check(), this.sync.read()]);
+    this.sync.stir();
+  }
+
   /** Opens a walk on a rig; resolves when its first entry is saved on this phone. */
   async open(rig: BundleRig, plan: WalkPlan): Promise<HeldWalk> {
+    // The first walk is the moment: before it there is nothing to lose, and some browsers ask the person.
+    if (this.sync.view().walks.length === 0) void askToKeep();
     const recorder = await Recorder.open(await this.ground(plan.member), rig, plan);
     return (await this.hold(recorder.view().walk.id, async () => recorder)) as HeldWalk;
   }

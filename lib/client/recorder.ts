@@ -9,6 +9,7 @@ import { uuidV7 } from "../domain/uuid";
 import { APP } from "../domain/version";
 import type { Clock } from "./clock";
 import { signSeal, type Device } from "./device";
+import type { HeldRecord } from "./record-export";
 import type { KeptWalk, WalkShelf } from "./walk-shelf";
 
 /** What a screen shows of the walk being recorded; a new object whenever something was saved. */
@@ -117,6 +118,12 @@ export class Recorder {
   }
 
   view = (): WalkView => this.current;
+
+  /** What this page holds of the walk: enough for its record file where the store cannot be read any more. */
+  held = (): HeldRecord => {
+    const { walk, document } = this.current;
+    return { walk, document, links: [...this.links], publicKey: this.ground.device.publicKey };
+  };
 
   subscribe = (listener: () => void): (() => void) => {
     this.listeners.add(listener);

@@ -7,12 +7,13 @@ const SHELF = "kept";
  * bytes are on the disk, which the browser's default does not wait for; a write that resolved is saved.
  * The connection is let go when another tab wants to upgrade, and taken up again when it was closed under us.
  * @param name of the database
+ * @param closed called when the connection was closed under us: the database was deleted, or the site data cleared
  */
-export function openStore(name = "hookfast"): UseStore {
+export function openStore(name = "hookfast", closed: () => void = () => {}): UseStore {
   let opening: Promise<IDBDatabase> | null = null;
 
   function connection(): Promise<IDBDatabase> {
-    opening ??= connect(name, () => (opening = null));
+    opening ??= connect(name, () => (opening = null), closed);
     return opening;
   }
 
@@ -53,7 +54,7 @@ export function openStore(name = "hookfast"): UseStore {
   };
 }
 
-function connect(name: string, gone: () => void): Promise<IDBDatabase> {
+function connect(name: string, gone: () => void, closed: () => void): Promise<IDBDatabase> {
   const request = indexedDB.open(name, 1);
   request.onupgradeneeded = () => request.result.createObjectStore(SHELF);
   return promisifyRequest(request).then(
@@ -61,8 +62,12 @@ function connect(name: string, gone: () => void): Promise<IDBDatabase> {
       db.onversionchange = () => {
         db.close();
         gone();
+        closed();
       };
-      db.onclose = gone;
+      db.onclose = () => {
+        gone();
+        closed();
+      };
       return db;
     },
     (error) => {

@@ -152,6 +152,8 @@ export class Sync {
   }
 
   private wantsBundle(): boolean {
+    // Fetched and yet not here: the store was emptied since.
+    if (this.current.bundle === null) return true;
     return this.bundleAt === null || this.ground.nowMs() - this.bundleAt > BUNDLE_AGE_MS;
   }
 

@@ -38,6 +38,11 @@ export class MovedOn extends Error {
   override name = "MovedOn";
 }
 
+/** The walk is not on this phone any more: the store was emptied under this page. */
+export class WalkGone extends MovedOn {
+  override name = "WalkGone";
+}
+
 const walkKey = (id: string) => ["walk", id];
 const entryKey = (id: string, seq: number) => ["entry", id, seq];
 const revisionKey = (digest: string) => ["revision", digest];
@@ -60,13 +65,14 @@ export class WalkShelf {
   /**
    * Appends one link. The head is read again inside the transaction and entries are only ever added.
    * @param change what else changes on the walk's row with it
-   * @throws MovedOn when the walk no longer ends where the link begins
+   * @throws MovedOn when the walk no longer ends where the link begins, WalkGone when it is not there
    */
   async append(link: Link, change: Partial<KeptWalk> = {}): Promise<KeptWalk> {
     const { walk: id, seq, prev } = link.entry;
     return this.store("readwrite", async (shelf) => {
       const walk: KeptWalk | undefined = await promisifyRequest(shelf.get(walkKey(id)));
-      if (!walk || walk.length !== seq || walk.head !== prev) throw new MovedOn();
+      if (!walk) throw new WalkGone();
+      if (walk.length !== seq || walk.head !== prev) throw new MovedOn();
       const after = { ...walk, ...change, length: seq + 1, head: link.digest };
       shelf.add(kept(link), entryKey(id, seq));
       await promisifyRequest(shelf.put(after, walkKey(id)));

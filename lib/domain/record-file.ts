@@ -11,13 +11,20 @@ export interface SealLine {
   receipt: Receipt;
 }
 
+/** As a phone writes it: without the receipt before there is one, without the key where it was lost. */
+export type PhoneSealLine = Omit<SealLine, "device" | "receipt"> & Partial<SealLine>;
+
 /**
  * A record file (`application/x-ndjson`): the revision, each entry's canonical text exactly as stored, and the seal.
  * @param revision canonical text of the revision document
  * @param entries canonical texts in order
  * @param seal null while the walk is open
  */
-export function recordFile(revision: string, entries: readonly string[], seal: SealLine | null): string {
+export function recordFile(
+  revision: string,
+  entries: readonly string[],
+  seal: SealLine | PhoneSealLine | null,
+): string {
   const lines = [`{"revision":${revision}}`, ...entries, ...(seal ? [canonicalText(seal)] : [])];
   return lines.map((line) => line + "\n").join("");
 }

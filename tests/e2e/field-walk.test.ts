@@ -142,7 +142,7 @@ test("a mark that the phone did not keep says so and stays", async ({ page, prod
     };
   });
   await tap(page, good);
-  await expect(page.getByRole("main").getByRole("alert")).toContainText("Not saved.");
+  await expect(page.getByRole("main").getByRole("alert")).toContainText("This phone’s storage is full");
   await expect(ask(page)).toHaveText(here);
   await tap(page, good);
   await expect(ask(page)).not.toHaveText(here);

@@ -81,6 +81,8 @@ test("keeps documents only as they are without a redirect", async ({ page, produ
 
 test("a new worker waits until the page asks it to take over", async ({ page, product }) => {
   await installWorker(page, product);
+  // A page outside of the field wing: one inside loads itself anew when a new worker takes over.
+  await page.goto("/offline");
   const before = readFileSync("public/sw.js");
   try {
     appendFileSync("public/sw.js", "// a later build\n");
