@@ -14,6 +14,16 @@ export function fix(words: Words): Check {
   return { kind: "look", effect: "fix", mayBeAbsent: false, ...words };
 }
 
+export const coachHeld = hold({
+  key: "coach-held",
+  part: "coach-held",
+  ask: "Coach braked, car chocked",
+  how: "The coach’s parking brake is set and its lamp is lit. A chock stands on each side of one car wheel. The ground is level.",
+  why: "Between the vehicles is where people are crushed. Nothing may move while someone stands there.",
+  mend: "Set the brake, chock the car, and come back only then.",
+  caution: "Nobody between the vehicles while either can move.",
+});
+
 export const receiverPins = hold({
   key: "receiver-pins",
   part: "receiver",
@@ -21,6 +31,19 @@ export const receiverPins = hold({
   how: "Two pins: one through the receiver, one through the drop receiver. Each goes all the way through, with its clip closed through its end.",
   why: "These pins hold everything behind the coach. A pin that walks out lets the whole bar slide out.",
   mend: "Push the pin through and close its clip. Replace a pin that is bent or worn.",
+  who: "You, with a pin and clip of the maker’s kind. Cracked welds: a licensed shop.",
+  touches: ["cables", "cord-and-lanyard"],
+});
+
+export const basePlate = hold({
+  key: "base-plate",
+  part: "base-plate",
+  ask: "Base plate: nothing loose, no crack",
+  how: "Take each tab by hand, push down and pull up. The car may rise on its springs; the plate itself does not move. Look at the paint around the fasteners.",
+  why: "Everything between the vehicles hangs on this plate, the safeguards too.",
+  mend: "Do not tighten it by feel. The plate’s own manual has the way, and a crack is not mended at a campsite.",
+  who: "A licensed shop, by the plate maker’s manual.",
+  touches: ["arm-left", "arm-right", "cables"],
 });
 
 /** One arm of the tow bar at the car's base plate. */
@@ -34,6 +57,8 @@ export function arm(side: "left" | "right"): Check {
     how: `Look at the ${side} arm where it meets the car. The pin is all the way down and the ring of the clip is snapped over its end.`,
     why: "A clip that is not over the pin shakes out on the road, and one arm alone does not hold a car in line.",
     mend: "Seat the pin to its full depth, then snap the ring over. Use the clip that belongs to this bar.",
+    who: "You, with the clip that belongs to this bar.",
+    touches: ["cables", "arms-locked"],
     caution: `The arm can drop on a hand when a pin comes out. ${HELD}`,
   });
 }
@@ -45,6 +70,7 @@ export const cables = hold({
   how: "Both cables run from frame to frame and cross under the bar. Every link is screwed shut, and nothing hangs near the ground.",
   why: "If the bar lets go, the cables are what keeps the car behind the coach. Crossed, they also hold the bar up.",
   mend: "Cross them under the bar and screw each link closed. A cable with broken strands is replaced, not taped.",
+  touches: ["cord-and-lanyard"],
 });
 
 export const cordAndLanyard = hold({
@@ -54,16 +80,67 @@ export const cordAndLanyard = hold({
   how: "The cord is latched at both ends. The lanyard is hooked to the coach's frame, not to the bar or a cable, and has slack for a full turn.",
   why: "A lanyard on the bar leaves with the bar and never pulls the breakaway switch.",
   mend: "Latch the plugs. Move the lanyard to its own point on the frame.",
+  touches: ["lamps"],
 });
 
 export const airLine = hold({
   key: "air-line",
-  part: "cord",
-  drawn: "place",
+  part: "air-line",
   ask: "Air line coupled, no hiss",
   how: "The coupling is home and does not come off with a tug. Listen at both ends with the coach's air up.",
   why: "Without air the car's brake does not work and the coach loses pressure.",
   mend: "Couple it again. If it still hisses, look at the seal and the line for a chafed place.",
+});
+
+export const steering = hold({
+  key: "steering-free",
+  part: "steering",
+  ask: "Steering wheel turns, does not lock",
+  how: "Turn the wheel by hand a little both ways. The column does not catch.",
+  why: "A locked column drags the front tires sideways until they come apart.",
+  mend: "Compare key and selector with the manual’s page again.",
+  touches: ["end-state", "wheels-roll"],
+});
+
+export const chocksOut = hold({
+  key: "chocks-out",
+  part: "parking-brake",
+  ask: "Car’s parking brake off, chocks out",
+  how: "The bar is attached. The lamp of the car’s parking brake is dark, and no chock is left at a wheel.",
+  why: "A brake that stays on burns within a few miles, and nobody in the coach feels it.",
+  mend: "Release it and look at the lamp again. Stow the chocks where they are counted.",
+  touches: ["wheels-roll"],
+});
+
+export const armsLocked = hold({
+  key: "arms-locked",
+  part: "arms-locked",
+  ask: "Both arms out and locked, tugged",
+  how: "After pulling forward a few feet: each arm is all the way out and its latch is home. Push and pull each one by hand.",
+  why: "An arm that is not locked slides in when the coach brakes.",
+  mend: "Pull forward again, straight and slowly, or follow the bar’s own manual. No hammer.",
+  caution: `Hands out of the latch while the coach can move. ${HELD}`,
+  touches: ["arm-left", "arm-right"],
+});
+
+export const manualApply = hold({
+  key: "manual-apply",
+  part: "manual-apply",
+  ask: "Brake answers the coach’s control",
+  how: "Use the control in the coach at walking pace: the car’s brake is felt, or someone beside the rig sees its pedal go down.",
+  why: "A unit that shows ready may still not reach the pedal.",
+  mend: "Run the unit’s set-up again, as its manual has it.",
+  caution: "Nobody between the vehicles while the coach moves.",
+  touches: ["brake-ready"],
+});
+
+export const jacksUp = hold({
+  key: "jacks-up",
+  part: "jacks",
+  ask: "Jacks up, air at travel height",
+  how: "All feet of the coach are drawn up, and its air suspension stands at travel height.",
+  why: "A low coach changes the angle of the bar, and a jack that is down tears off.",
+  mend: "Raise them and wait until the coach has come up.",
 });
 
 export const rolling = hold({
@@ -73,6 +150,7 @@ export const rolling = hold({
   how: "Pull forward a few feet, straight, and stop. Someone beside the rig sees all four car wheels turn and both arms lock out.",
   why: "A wheel that slides means a brake is on or a column is locked. Tires wear through within a few miles.",
   mend: "Stop. Go back to the cabin and compare with the manual's page again.",
+  touches: ["end-state", "steering-free", "chocks-out"],
   caution: "Nobody between the vehicles while the coach moves.",
 });
 
@@ -84,6 +162,8 @@ export const lamps = hold({
   how: "Stand behind the car. Go through the signals one at a time and look at both sides each time.",
   why: "The arrow on the dash does not show what the car's lamps do.",
   mend: "Seat the plugs first, then look at the ground. A dark lamp on one side only is often its bulb.",
+  who: "You for plugs and bulbs; a licensed shop for the wiring.",
+  touches: ["cord-and-lanyard"],
 });
 
 export const joints = hold({
@@ -104,6 +184,13 @@ export const tires = fix({
   how: "Look at the tread and both sidewalls of each tire. Cracks are easiest to see near the rim.",
   why: "Nobody in the coach feels a flat tire on the car.",
   mend: "Fill a low tire to the pressure on the car's door label. Cracked sidewalls: have the tire looked at.",
+  who: "You for air, with the tires cold; a licensed shop for a cracked one.",
+  measure: {
+    quantity: "pressure",
+    unit: "kPa",
+    ask: "The lowest of the four, by the gauge",
+    beside: "What it should be, cold, is on the car's door label. Never let air out of a warm tire.",
+  },
 });
 
 export const cordJacket = fix({

@@ -15,8 +15,7 @@ export const receiverPin = hold({
 
 export const ball = hold({
   key: "ball-coupler",
-  part: "receiver",
-  drawn: "place",
+  part: "ball",
   ask: "Coupler down on ball, latch pinned",
   how: "The coupler sits all the way down on the ball. Its latch is closed, with a pin or lock through it. The nut under the ball is in place.",
   why: "A coupler whose latch is not pinned can be levered off the ball in a deep dip.",
@@ -25,8 +24,7 @@ export const ball = hold({
 
 export const pintle = hold({
   key: "pintle-latch",
-  part: "receiver",
-  drawn: "place",
+  part: "pintle",
   ask: "Ring on the hook, latch pinned",
   how: "The ring lies in the hook. The latch is closed over it, with its pin through.",
   why: "An open latch lets the ring lift off the hook where the road dips.",
@@ -57,8 +55,7 @@ export const brakeBox = hold({
 
 export const brakeBuiltIn = hold({
   key: "brake-ready",
-  part: "brake",
-  drawn: "installed",
+  part: "monitor",
   ask: "Brake ready, pedal all the way up",
   how: "The monitor in the coach shows what the brake’s own manual says it should. The car’s pedal is all the way up.",
   why: brakeWhy,
@@ -113,8 +110,7 @@ export function endState(page: string, words: string): Check {
 
 export const lightBar = hold({
   key: "light-bar",
-  part: "lamps",
-  drawn: "place",
+  part: "light-bar",
   ask: "Light bar on, straps tight, plug home",
   how: "The bar sits where it can be seen from behind and does not move by hand. Its plug is home and the plate is not covered.",
   why: "A bar that slides off hangs by its wire, and the car is dark from behind.",

@@ -31,16 +31,10 @@ const units: Record<Quantity, Record<UnitSystem, Unit>> = {
 };
 
 /** A figure with its unit. */
-export interface Figure {
-  value: number;
-  unit: string;
-}
+export type Figure = { value: number; unit: string };
 
 /** A mark's `measured`: the value in its kept unit, and what was entered where that is another. */
-export interface Measured extends Figure {
-  quantity: Quantity;
-  entered?: Figure;
-}
+export type Measured = Figure & { quantity: Quantity; entered?: Figure };
 
 /** The unit that a person enters and reads a quantity in. */
 export function unitFor(quantity: Quantity, system: UnitSystem): string {

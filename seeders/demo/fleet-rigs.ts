@@ -14,8 +14,7 @@ const brakeBox = check.hold({
 
 const installedBrake = check.hold({
   key: "brake-ready",
-  part: "brake",
-  drawn: "installed",
+  part: "monitor",
   ask: "Controller lit, pedal fully up",
   how: "The controller in the coach shows that it is ready. The car's pedal is all the way up and its stop lamps are dark.",
   why: "The brake in the car takes its power through the cord. Dark here means no brake there.",
@@ -24,8 +23,7 @@ const installedBrake = check.hold({
 
 const lightBar = check.hold({
   key: "light-bar",
-  part: "lamps",
-  drawn: "place",
+  part: "light-bar",
   ask: "Light bar on, both straps tight",
   how: "The bar lies across the hatch with both straps tight and its plug home. The plate is not covered.",
   why: "A bar that slides off hangs by its wire, and the car is dark from behind.",
@@ -34,8 +32,7 @@ const lightBar = check.hold({
 
 const chargeLine = check.fix({
   key: "charge-line",
-  part: "cord",
-  drawn: "place",
+  part: "charge-line",
   ask: "Charge line plugged in",
   how: "On the newer cord there is a thin second plug beside the large one. It is in its socket.",
   why: "Without it the car's battery may be flat at the end of the day.",
@@ -109,7 +106,7 @@ function list(brake: Check, cabin: Check, tail: Check[]): Omit<PlainList, "sheet
 export const longCoachRig: RevisionDocument = plainDocument({
   sheet: longCoachSheet,
   ...list(installedBrake, endState("301", "Every step on it is done and its last line is proved."), [
-    check.lamps,
+    { ...check.lamps, lamps: { layout: "separate" } },
   ]),
 });
 

@@ -1,4 +1,4 @@
-import type { RevisionDocument } from "@/lib/domain/revision";
+import type { Check, RevisionDocument } from "@/lib/domain/revision";
 import * as check from "@/lib/domain/plain-checks";
 import { plainDocument } from "@/lib/domain/plain-list";
 import { feet, inches, milesPerHour, pounds } from "./quantities";
@@ -102,34 +102,44 @@ const endState = check.hold({
 
 const brakeReady = check.hold({
   key: "brake-ready",
+  kind: "brake-idle",
   part: "brake",
   ask: "Box ready, pedal all the way up",
-  how: "The box stands against the seat, its ready light is on, and the pedal is all the way up. The car's stop lamps are dark.",
+  how: "The box stands against the seat, its ready light is on, and the pedal is all the way up.",
   why: "A pedal that is held down a little drags the brakes until they smoke.",
   mend: "Run the box's set-up again. Slide the seat until the arm just meets the pedal.",
 });
 
 const fuseBack = check.hold({
   key: "fuse-back",
-  part: "cabin",
-  drawn: "place",
+  part: "fuse",
   ask: "Fuse 31 back in its place",
   how: "Look into the fuse box beside the steering column: place 31 is filled.",
   why: "The manual has it out only while towing. The car should not be driven without it.",
   mend: "Take the fuse from the clip on the sun visor and press it home.",
 });
 
+const cables = { ...check.cables, figures: { A: "5,000 lb each" } };
+const lamps: Check = { ...check.lamps, lamps: { layout: "combined" } };
+
 const hookUp = [
+  check.coachHeld,
   check.receiverPins,
+  check.basePlate,
   check.arm("left"),
   check.arm("right"),
-  check.cables,
+  cables,
   check.cordAndLanyard,
   endState,
+  check.steering,
   brakeReady,
+  check.chocksOut,
   check.rolling,
-  check.lamps,
+  check.armsLocked,
+  check.manualApply,
+  lamps,
   check.joints,
+  check.jacksUp,
   check.tires,
 ];
 const unhook = [check.carHeld, check.linesOff, check.barStowed, fuseBack];
@@ -139,13 +149,13 @@ export const householdRig: RevisionDocument = plainDocument({
   sheet,
   catalogue: "hand-written 1",
   checks: {
-    "coach-tail": [check.receiverPins, check.barStowed],
-    "car-nose": [check.arm("left"), check.arm("right")],
-    "cables-and-cord": [check.cables, check.cordAndLanyard, check.linesOff],
-    "car-cabin": [endState, brakeReady, check.carHeld, fuseBack],
-    pull: [check.rolling, check.wheelHeat],
-    "car-tail": [check.lamps],
-    "last-look": [check.joints, check.tires],
+    "coach-tail": [check.coachHeld, check.receiverPins, check.barStowed],
+    "car-nose": [check.basePlate, check.arm("left"), check.arm("right")],
+    "cables-and-cord": [cables, check.cordAndLanyard, check.linesOff],
+    "car-cabin": [endState, check.steering, brakeReady, check.chocksOut, check.carHeld, fuseBack],
+    pull: [check.rolling, check.armsLocked, check.manualApply, check.wheelHeat],
+    "car-tail": [lamps],
+    "last-look": [check.joints, check.jacksUp, check.tires],
   },
   walks: {
     "hook-up": hookUp,
@@ -153,10 +163,10 @@ export const householdRig: RevisionDocument = plainDocument({
       check.receiverPins,
       check.arm("left"),
       check.arm("right"),
-      check.cables,
+      cables,
       check.cordAndLanyard,
       check.wheelHeat,
-      check.lamps,
+      lamps,
       check.tires,
     ],
     unhook,

@@ -19,15 +19,15 @@ import { demoWalks } from "./walks";
  */
 export async function seedDemo(now: Date = new Date()): Promise<void> {
   await seedPeopleAndRigs(now);
+  await keepListsCurrent(now);
   const today = new Date(now.toISOString().slice(0, 10));
   for (const key of Object.keys(members) as DemoMemberKey[]) await seedWalks(key, today);
 }
 
 async function seedPeopleAndRigs(now: Date): Promise<void> {
-  const { Organisation, Member, Rig, Revision } = tables();
+  const { Organisation, Member, Rig } = tables();
   const passwordHash = await hashPassword(PASSWORD);
-  // Long before the first walk, so that the history makes sense.
-  const createdAt = new Date(now.getTime() - 60 * 24 * 3_600_000);
+  const createdAt = longBefore(now);
   await inTransaction(async (transaction) => {
     if (await Organisation.findByPk(organisations[0]!.id, { attributes: ["id"], raw: true, transaction }))
       return;
@@ -41,18 +41,35 @@ async function seedPeopleAndRigs(now: Date): Promise<void> {
       all.map(({ id, name, keeperId, builderId }) => ({ id, name, keeperId, builderId, createdAt })),
       { transaction },
     );
-    await Revision.bulkCreate(
-      all.map(({ id, revisionId, document }) => ({
-        id: revisionId,
-        rigId: id,
-        number: 1,
-        digest: Buffer.from(digestOf(document), "hex"),
-        document: Buffer.from(canonicalText(document)),
-        createdAt,
-      })),
-      { transaction },
-    );
   });
+}
+
+/** Issues a rig's list where it has none yet, or anew where a demo that stands already has an older one. */
+async function keepListsCurrent(now: Date): Promise<void> {
+  const { Revision } = tables();
+  for (const { id: rigId, revisionId, document } of Object.values(rigs)) {
+    const digest = Buffer.from(digestOf(document), "hex");
+    const latest = await Revision.findOne({
+      attributes: ["number", "digest"],
+      where: { rigId },
+      order: [["number", "DESC"]],
+      raw: true,
+    });
+    if (latest && digest.equals(latest.digest)) continue;
+    await Revision.create({
+      id: latest ? crypto.randomUUID() : revisionId,
+      rigId,
+      number: (latest?.number ?? 0) + 1,
+      digest,
+      document: Buffer.from(canonicalText(document)),
+      createdAt: latest ? now : longBefore(now),
+    });
+  }
+}
+
+/** Long before the first walk, so that the history makes sense. */
+function longBefore(now: Date): Date {
+  return new Date(now.getTime() - 60 * 24 * 3_600_000);
 }
 
 async function seedWalks(key: DemoMemberKey, today: Date): Promise<void> {

@@ -110,8 +110,7 @@ const sheet = {
 
 const shortCables = check.hold({
   key: "short-cables",
-  part: "cables",
-  drawn: "place",
+  part: "short-cables",
   ask: "Short pair on the removable arms",
   how: "Each removable arm of the base plate has its own short cable to the car's frame, link screwed shut.",
   why: "Without them, an arm that comes out of the plate takes the long cables along.",
@@ -129,8 +128,7 @@ const endState = check.hold({
 
 const brakeReady = check.hold({
   key: "brake-ready",
-  part: "brake",
-  drawn: "installed",
+  part: "brake-air",
   ask: "Air up, pedal all the way up",
   how: "The coach's air is up and the monitor lamp in the coach is on. The car's pedal is all the way up and its stop lamps are dark.",
   why: "A pedal that stays down a little drags the brakes all day.",

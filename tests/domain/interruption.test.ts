@@ -71,7 +71,12 @@ describe("what is asked again", () => {
         })),
       },
     } as RevisionDocument;
-    expect(againAfterMending(document, ["arm-left"], hookUp)).toEqual(["arm-left", "cables", "joints"]);
+    expect(againAfterMending(document, ["arm-left"], hookUp)).toEqual([
+      "arm-left",
+      "cables",
+      "joints",
+      "jacks-up",
+    ]);
     expect(againAfterMending(document, ["arm-left"], ["arm-left", "tires"])).toEqual(["arm-left"]);
   });
 });
