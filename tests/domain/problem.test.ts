@@ -14,6 +14,9 @@ test("every code has its status", () => {
     "404 not-found",
     "409 device-taken",
     "429 too-many-attempts",
+    "403 bad-link",
+    "415 wrong-media",
+    "422 wrong-content",
     "503 unavailable",
     "500 internal",
   ]);
