@@ -16,6 +16,7 @@ const unread: SyncView = {
   storeRefused: false,
   bundle: null,
   walks: [],
+  photos: [],
   signedOut: false,
   roleRefused: false,
   reached: null,

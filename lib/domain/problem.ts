@@ -12,7 +12,10 @@ export const problems = {
   "not-found": { status: 404, title: "There is nothing here." },
   "device-taken": { status: 409, title: "That device id belongs to another key or member." },
   "too-many-attempts": { status: 429, title: "Too many failed attempts. Wait, then try again." },
-  "bad-link": { status: 403, title: "This address for a photograph has run out or was changed. Ask for it again." },
+  "bad-link": {
+    status: 403,
+    title: "This address for a photograph has run out or was changed. Ask for it again.",
+  },
   "wrong-media": { status: 415, title: "A photograph is taken as JPEG, WebP or PNG." },
   "wrong-content": { status: 422, title: "What came is not the photograph that was recorded." },
   unavailable: { status: 503, title: "The database does not answer. Try again shortly." },
