@@ -18,7 +18,7 @@ export function FileButton({ label, camera = false, busy, onFile }: FileButtonPr
     if (file && !busy) onFile(file);
   };
   return (
-    <label className="relative flex min-w-0 flex-[1_1_12rem] cursor-pointer">
+    <label className="relative flex min-w-0 flex-[1_1_10rem] cursor-pointer">
       {/* Disabled it would lose the focus while it works; a file picked meanwhile is passed over instead. */}
       <input
         type="file"

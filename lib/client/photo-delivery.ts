@@ -8,15 +8,16 @@ import type { KeptWalk } from "./walk-shelf";
 const PATIENCE_MS = 120_000;
 
 /**
- * The photographs that may go: those of closed walks, once the server stores the entry that names them. A walk that is
- * still being made has the signal to itself.
+ * The photographs that may go: those of closed walks that the server stores whole, or as far as it will; until then the
+ * walk has the signal to itself. The entry that names a photograph has to be among what is stored.
  */
 export function deliverable(photos: readonly KeptPhoto[], walks: readonly KeptWalk[]): KeptPhoto[] {
-  const byId = new Map(walks.map((walk) => [walk.id, walk]));
-  return photos.filter(({ walk: id, seq, state }) => {
-    const walk = byId.get(id);
-    return state === "kept" && walk !== undefined && walk.seal !== null && seq < walk.acknowledged;
-  });
+  const over = walks.filter(
+    ({ seal, acknowledged, length, refused }) =>
+      seal !== null && (acknowledged === length || refused !== null),
+  );
+  const stored = new Map(over.map(({ id, acknowledged }) => [id, acknowledged]));
+  return photos.filter(({ walk, seq, state }) => state === "kept" && seq < (stored.get(walk) ?? 0));
 }
 
 /** How many photographs are in each state. */
