@@ -106,7 +106,8 @@ const kept = (over: Partial<KeptPhoto> = {}): KeptPhoto => ({
 });
 
 describe("which may go", () => {
-  const walk = (over: object) => ({ id: "w", seal: {}, acknowledged: 5, length: 5, ...over }) as KeptWalk;
+  const walk = (over: object) =>
+    ({ id: "w", seal: {}, acknowledged: 5, length: 5, refused: null, ...over }) as KeptWalk;
   test.each<[string, Partial<KeptPhoto>, object | null, boolean]>([
     ["of a closed walk that the server stores", {}, {}, true],
     ["the server stores only part of it so far", {}, { length: 6 }, false],
