@@ -55,9 +55,8 @@ test("a check's photographs stand with it, those of no check stand apart, each i
   const row = page.locator(`li#${key}`);
   const shown = row.getByRole("img", { name: `Photograph 1 of 2: ${ask}` });
   await expect(shown).toBeVisible();
-  await expect(row.getByRole("link")).toHaveAttribute("href", `/api/photos/${digest("a")}`);
-
   await expect(row.getByText(words.failed)).toBeVisible();
+  await expect(row.getByRole("link")).toHaveAttribute("href", `/api/photos/${digest("a")}`);
   const apart = page.locator("section", { has: page.getByRole("heading", { name: words.title }) }).last();
   await expect(apart.getByText(words.fetching)).toBeVisible();
   await expect(apart.getByText(words.missing)).toBeVisible();
