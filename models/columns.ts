@@ -20,6 +20,8 @@ export const digest = (extra: Extra = {}) => column("BINARY(32)", extra);
 export const instant = (extra: Extra = {}) => column(DataTypes.DATE(3), extra);
 
 export const count = (extra: Extra = {}) => column(DataTypes.INTEGER.UNSIGNED, extra);
+/** A whole number up to 2^53-1. */
+export const largeCount = () => column(DataTypes.BIGINT.UNSIGNED, {});
 export const words = (length: number, extra: Extra = {}) => column(DataTypes.STRING(length), extra);
 export const name = () => words(100);
 

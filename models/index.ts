@@ -4,12 +4,26 @@ import { Entry } from "./entry";
 import { Fork } from "./fork";
 import { Member } from "./member";
 import { Organisation } from "./organisation";
+import { PhotoEntry } from "./photo-entry";
+import { PhotoObject } from "./photo-object";
 import { Revision } from "./revision";
 import { Rig } from "./rig";
 import { Session } from "./session";
 import { Walk } from "./walk";
 
-const tables = { Organisation, Member, Session, Device, Rig, Revision, Walk, Entry, Fork };
+const tables = {
+  Organisation,
+  Member,
+  Session,
+  Device,
+  Rig,
+  Revision,
+  Walk,
+  Entry,
+  Fork,
+  PhotoEntry,
+  PhotoObject,
+};
 export type Tables = typeof tables;
 
 /**
@@ -32,5 +46,7 @@ export function bindModels(sequelize: Sequelize): Tables {
   Walk.belongsTo(Device, { as: "sealDevice", foreignKey: "sealDeviceId" });
   Entry.belongsTo(Walk, { as: "walk", foreignKey: "walkId" });
   Fork.belongsTo(Walk, { as: "walk", foreignKey: "walkId" });
+  PhotoEntry.belongsTo(Walk, { as: "walk", foreignKey: "walkId" });
+  PhotoObject.belongsTo(Organisation, { as: "organisation", foreignKey: "organisationId" });
   return tables;
 }

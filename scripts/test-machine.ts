@@ -19,6 +19,7 @@ export function testEnvironment(): NodeJS.ProcessEnv {
     "ORIGIN",
     "DATABASE_URL",
     "KEYS_DIR",
+    "PHOTOS_DIR",
     "DEMO",
     "NODE_ENV",
     "HOOKFAST_PARENT",

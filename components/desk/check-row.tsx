@@ -1,10 +1,14 @@
 import { clockText } from "@/lib/client/time-words";
 import { markWords, walkWords } from "@/lib/domain/messages/desk";
+import type { WalkPhoto } from "@/lib/domain/photo";
 import { segmentOf, type ReadCheck } from "@/lib/domain/walk-reading";
 import { MarkDetail } from "./mark-detail";
+import { PhotoGallery } from "./photo-gallery";
 
-/** One check read back: what was asked, the mark that counts, when, and the marks that stood before it. */
-export function CheckRow({ read: { check, asked, mark, earlier, segment } }: { read: ReadCheck }) {
+type CheckRowProps = { read: ReadCheck; photos?: readonly WalkPhoto[] };
+
+/** One check read back: what was asked, the mark that counts, when, its photographs, and the marks before it. */
+export function CheckRow({ read: { check, asked, mark, earlier, segment }, photos = [] }: CheckRowProps) {
   const time = "tabular text-right text-[0.9375rem] text-soft";
   return (
     <li
@@ -25,6 +29,11 @@ export function CheckRow({ read: { check, asked, mark, earlier, segment } }: { r
       </p>
       <p className={time}>{mark && clockText(mark.elapsedMs)}</p>
       {mark && <MarkDetail mark={mark} />}
+      {photos.length > 0 && (
+        <div className="col-start-2 -col-end-1">
+          <PhotoGallery photos={photos} of={check.ask} />
+        </div>
+      )}
       {earlier.length > 0 && (
         <ul className="col-start-2 -col-end-1 mt-1 text-sm text-soft">
           {earlier.map((was) => (

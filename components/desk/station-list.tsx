@@ -1,9 +1,15 @@
 import { walkWords } from "@/lib/domain/messages/desk";
+import type { WalkPhoto } from "@/lib/domain/photo";
 import type { ReadStation } from "@/lib/domain/walk-reading";
 import { CheckRow } from "./check-row";
 
+type StationListProps = {
+  stations: readonly ReadStation[];
+  photos: ReadonlyMap<string | null, readonly WalkPhoto[]>;
+};
+
 /** What was seen, station by station in walking order. */
-export function StationList({ stations }: { stations: readonly ReadStation[] }) {
+export function StationList({ stations, photos }: StationListProps) {
   return (
     <section className="@container">
       <h2 className="text-xl leading-tight font-extrabold">{walkWords.stations}</h2>
@@ -13,7 +19,7 @@ export function StationList({ stations }: { stations: readonly ReadStation[] }) 
           <h3 className="border-b-hair border-ink pb-1 text-base font-semibold text-soft">{station.title}</h3>
           <ul>
             {station.checks.map((check) => (
-              <CheckRow key={check.check.key} read={check} />
+              <CheckRow key={check.check.key} read={check} photos={photos.get(check.check.key)} />
             ))}
           </ul>
         </section>

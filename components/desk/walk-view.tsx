@@ -1,6 +1,7 @@
 import { clockText, durationText } from "@/lib/client/time-words";
 import type { WalkReading } from "@/lib/domain/history";
 import { deskWords, walkWords } from "@/lib/domain/messages/desk";
+import { photosByCheck } from "@/lib/domain/photo";
 import { clockRemark, readWalk } from "@/lib/domain/walk-reading";
 import { DeskHeading } from "./desk-heading";
 import { SealBlock } from "./seal-block";
@@ -8,6 +9,7 @@ import { StationList } from "./station-list";
 import { TimeBars } from "./time-bars";
 import { TitleBlock } from "./title-block";
 import { ToHistory } from "./to-history";
+import { WalkPhotos } from "./walk-photos";
 import { WalkRemarks } from "./walk-remarks";
 import { WalkVerdict } from "./walk-verdict";
 
@@ -15,6 +17,8 @@ import { WalkVerdict } from "./walk-verdict";
 export function WalkView({ reading }: { reading: WalkReading }) {
   const entries = reading.entries.map(({ entry }) => entry);
   const read = readWalk(reading.document, entries);
+  const shown = new Set(read.stations.flatMap(({ checks }) => checks.map(({ check }) => check.key)));
+  const photos = photosByCheck(reading.photos, shown);
   const title = walkWords.title(reading.walk.purpose, reading.names.rig);
   return (
     <>
@@ -24,8 +28,9 @@ export function WalkView({ reading }: { reading: WalkReading }) {
       <WalkVerdict reading={reading} read={read} took={durationText(reading.elapsedMs)} />
       <div className="mt-8 grid gap-x-10 gap-y-10 grid-cols-1 @4xl:grid-cols-[minmax(0,1fr)_23rem]">
         <div className="min-w-0">
-          <StationList stations={read.stations} />
+          <StationList stations={read.stations} photos={photos} />
           <WalkRemarks remarks={read.remarks} />
+          <WalkPhotos photos={photos.get(null) ?? []} />
         </div>
         <div className="flex min-w-0 flex-col gap-8">
           <TimeBars stations={read.stations} total={clockText(reading.elapsedMs)} />

@@ -19,6 +19,7 @@ const unread: SyncView = {
   bundle: null,
   local: null,
   walks: [],
+  photos: [],
   signedOut: false,
   roleRefused: false,
   reached: null,

@@ -1,3 +1,4 @@
+import type { Recorder } from "@/lib/client/recorder";
 import type { Check } from "@/lib/domain/revision";
 import { BecauseQuestion } from "./because-question";
 import type { Callouts } from "./callouts";
@@ -5,16 +6,16 @@ import { FaultDetails } from "./fault-details";
 import type { Marking } from "./marking";
 import { MeasureQuestion } from "./measure-question";
 
-type CheckQuestionProps = { check: Check; callouts: Callouts; marking: Marking };
+type CheckQuestionProps = { recorder: Recorder; check: Check; callouts: Callouts; marking: Marking };
 
 /** What is asked in place of the buttons, while something is. */
-export function CheckQuestion({ check, callouts, marking }: CheckQuestionProps) {
+export function CheckQuestion({ recorder, check, callouts, marking }: CheckQuestionProps) {
   switch (marking.asking) {
     case "why":
     case "what":
       return <BecauseQuestion marking={marking} />;
     case "details":
-      return <FaultDetails check={check} callouts={callouts} marking={marking} />;
+      return <FaultDetails recorder={recorder} check={check} callouts={callouts} marking={marking} />;
     case "measure":
       return check.measure ? <MeasureQuestion measure={check.measure} marking={marking} /> : null;
     case null:

@@ -24,7 +24,7 @@ export function CheckScreen(props: CheckScreenProps) {
       says={<CheckWords check={check} mark={mark} marking={marking} />}
       acts={
         asking ? (
-          <CheckQuestion check={check} callouts={callouts} marking={marking} />
+          <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />
         ) : (
           <MarkButtons check={check} first={place === 1} marking={marking} />
         )

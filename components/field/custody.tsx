@@ -1,7 +1,9 @@
 import type { KeptWalk } from "@/lib/client/walk-shelf";
 import { fieldWords } from "@/lib/domain/messages/field";
 import { recentText } from "@/lib/client/time-words";
+import { photoCounts } from "@/lib/client/photo-delivery";
 import { localWords } from "@/lib/domain/messages/account";
+import { photoWords } from "@/lib/domain/messages/photo";
 import { useSyncView } from "./browser-field";
 import { SIGN_IN, SIGN_UP } from "./no-rigs";
 import { useNowMs } from "./now";
@@ -29,10 +31,17 @@ export function Custody({ walk, signedOut }: CustodyProps) {
 
 function Onward({ walk, signedOut }: CustodyProps) {
   const nowMs = useNowMs();
-  const madeWithoutAccount = useSyncView().local?.member.id === walk.member;
+  const { local, photos } = useSyncView();
+  const madeWithoutAccount = local?.member.id === walk.member;
   if (walk.receipt) {
     const when = recentText(walk.receipt.receivedAt, nowMs);
-    return <p className="leading-tight font-extrabold">{words.received(when)}</p>;
+    const { kept } = photoCounts(photos.filter((photo) => photo.walk === walk.id));
+    return (
+      <>
+        <p className="leading-tight font-extrabold">{words.received(when)}</p>
+        {kept > 0 && <p className="text-base text-soft">{photoWords.waiting(kept)}</p>}
+      </>
+    );
   }
   if (walk.refused) {
     return (

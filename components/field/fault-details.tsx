@@ -1,9 +1,11 @@
 import { useState, type FormEvent } from "react";
 import { Button } from "@/components/ui/button";
 import { TextField } from "@/components/ui/text-field";
+import type { Recorder } from "@/lib/client/recorder";
 import type { CalloutLetter } from "@/lib/domain/messages/drawings";
 import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
+import { CheckPhotos } from "./check-photos";
 import type { Callouts } from "./callouts";
 import type { Marking } from "./marking";
 import { Question } from "./question";
@@ -11,10 +13,10 @@ import { plainText } from "./walk-plan";
 
 const words = walkingWords.details;
 
-type FaultDetailsProps = { check: Check; callouts: Callouts; marking: Marking };
+type FaultDetailsProps = { recorder: Recorder; check: Check; callouts: Callouts; marking: Marking };
 
 /** After a fault is saved: what is wrong, by touch or in words. None of it is needed to go on. */
-export function FaultDetails({ check, callouts, marking }: FaultDetailsProps) {
+export function FaultDetails({ recorder, check, callouts, marking }: FaultDetailsProps) {
   const called = callouts.all.length > 0;
   const [text, setText] = useState(callouts.own);
   const keep = (event: FormEvent) => {
@@ -50,6 +52,7 @@ export function FaultDetails({ check, callouts, marking }: FaultDetailsProps) {
         />
         {plainText(text) !== callouts.own && <Button type="submit">{words.keep}</Button>}
       </form>
+      <CheckPhotos recorder={recorder} check={check.key} />
       <div className="acts-two">
         <Button variant="quiet" onClick={() => marking.mark("good", { because: "mis-tap" })}>
           {words.misTap}

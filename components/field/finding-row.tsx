@@ -1,15 +1,19 @@
 import { PartDrawing } from "@/components/drawings/part-drawing";
 import type { MarkBody } from "@/lib/domain/entry";
+import { signals } from "@/lib/domain/entry";
+import { isAsDrawn, type Seen } from "@/lib/domain/lamp-board";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { lampBoardWords } from "@/lib/domain/messages/lamps";
 import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
+import { KeptPhotos } from "./check-photos";
 
 const words = walkingWords.held;
 
-type FindingRowProps = { check: Check; absent?: boolean; mark: MarkBody | undefined };
+type FindingRowProps = { walk: string; check: Check; absent?: boolean; mark: MarkBody | undefined };
 
 /** A fault with its part, what was seen, how it is put right and who may do that. */
-export function FindingRow({ check, absent = false, mark }: FindingRowProps) {
+export function FindingRow({ walk, check, absent = false, mark }: FindingRowProps) {
   return (
     <li className="grid grid-cols-[min(5.5rem,25vw)_minmax(0,1fr)] gap-x-3.5 border-b-hair border-rule px-4 py-3.5 md:grid-cols-[8rem_minmax(0,1fr)]">
       <div aria-hidden="true">
@@ -18,6 +22,14 @@ export function FindingRow({ check, absent = false, mark }: FindingRowProps) {
       <div>
         <h4 className="text-xl leading-tight font-extrabold">{check.ask}</h4>
         {mark?.note && <p className="mt-1 font-semibold">{words.seen(mark.note)}</p>}
+        {oddSignals(check, mark?.seen ?? {}).map((line) => (
+          <p key={line} className="mt-1 font-semibold">
+            {line}
+          </p>
+        ))}
+        <div className="mt-2 empty:hidden">
+          <KeptPhotos walk={walk} check={check.key} />
+        </div>
         <p className="mt-1 text-[1.0625rem] text-soft">
           {absent ? fieldWords.result.markedAbsent : check.mend}
         </p>
@@ -29,4 +41,13 @@ export function FindingRow({ check, absent = false, mark }: FindingRowProps) {
       </div>
     </li>
   );
+}
+
+/** What the lamps did where that was not as drawn. */
+function oddSignals(check: Check, seen: Seen): string[] {
+  return signals.flatMap((signal) => {
+    const pair = seen[signal];
+    if (!pair || isAsDrawn(check, signal, pair)) return [];
+    return [lampBoardWords.seen(signal, pair.left, pair.right)];
+  });
 }

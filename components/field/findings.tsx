@@ -6,21 +6,29 @@ import type { Tally } from "./walk-plan";
 
 const words = fieldWords.result;
 
+type FindingsProps = { walk: string; tally: Tally; marks: Replay["marks"] };
+
 /** What holds the rig and what is to be fixed soon, each with what was seen and what mends it. */
-export function Findings({ tally, marks }: { tally: Tally; marks: Replay["marks"] }) {
+export function Findings({ walk, tally, marks }: FindingsProps) {
   return (
     <>
       {tally.holds.length > 0 && (
         <Rows title={words.holds} quiet>
           {tally.holds.map(({ check, absent }) => (
-            <FindingRow key={check.key} check={check} absent={absent} mark={marks.get(check.key)} />
+            <FindingRow
+              key={check.key}
+              walk={walk}
+              check={check}
+              absent={absent}
+              mark={marks.get(check.key)}
+            />
           ))}
         </Rows>
       )}
       {tally.fixes.length > 0 && (
         <Rows title={words.fixes}>
           {tally.fixes.map((check) => (
-            <FindingRow key={check.key} check={check} mark={marks.get(check.key)} />
+            <FindingRow key={check.key} walk={walk} check={check} mark={marks.get(check.key)} />
           ))}
         </Rows>
       )}

@@ -52,7 +52,7 @@ export function HeldScreen({ recorder, view, walk, steps }: HeldScreenProps) {
       <p className="border-b-hair border-rule px-4 py-3.5 text-xl leading-[1.3] font-semibold">
         {walkingWords.secureFirst}
       </p>
-      <Findings tally={tally} marks={marks} />
+      <Findings walk={walk.id} tally={tally} marks={marks} />
       <p className="px-4 py-4 text-[0.9375rem] text-soft">{fieldWords.result.deference}</p>
       <BottomBar height="tall" className="flex flex-col gap-2.5 px-3">
         <SaveTrouble error={error} held={recorder.held} />

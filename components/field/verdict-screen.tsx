@@ -58,7 +58,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
               {words.secure}
             </p>
           )}
-          <Findings tally={tally} marks={marks} />
+          <Findings walk={walk.id} tally={tally} marks={marks} />
           {unmarked.length + unseen.length > 0 && (
             <section>
               <h3 className="px-4 pt-4 pb-1.5 font-extrabold">{words.notSeen}</h3>

@@ -32,7 +32,7 @@ export function BrakeIdleScreen(props: CheckScreenProps) {
       says={<CheckWords check={check} mark={mark} marking={marking} />}
       acts={
         asking ? (
-          <CheckQuestion check={check} callouts={callouts} marking={marking} />
+          <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />
         ) : whole ? (
           <MarkButtons check={check} first={place === 1} marking={marking} />
         ) : (

@@ -31,7 +31,8 @@ export function LampScreen(props: CheckScreenProps) {
   const asking = marking.asking !== null;
 
   const acts = () => {
-    if (asking) return <CheckQuestion check={check} callouts={callouts} marking={marking} />;
+    if (asking)
+      return <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />;
     if (board.view === "odd") {
       return (
         <OddLamp

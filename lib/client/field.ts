@@ -7,7 +7,7 @@ import { openStore } from "./store";
 import { browserOutside, StoreGuard } from "./store-guard";
 import { Sync } from "./sync";
 
-const DRAIN_LOCK = "hookfast-drain";
+const DRAIN_LOCKS = { walks: "hookfast-drain", photos: "hookfast-drain-photos" } as const;
 const CHANNEL = "hookfast";
 
 /** A walk that this tab, and no other, records until it lets go. */
@@ -32,8 +32,8 @@ export class Field {
       nowMs: () => performance.now(),
       spread: Math.random(),
       label: navigator.userAgent.slice(0, 100),
-      alone: (work) =>
-        navigator.locks.request(DRAIN_LOCK, { ifAvailable: true }, async (lock) => {
+      alone: (work, what) =>
+        navigator.locks.request(DRAIN_LOCKS[what], { ifAvailable: true }, async (lock) => {
           if (lock) await work();
           return lock !== null;
         }),

@@ -1,4 +1,5 @@
 import { clockJump, nextLink, stamp, type Stamp } from "../domain/chain";
+import { bytesDigest } from "../domain/digest";
 import type { Depth, Entry, Link, MarkBody, Purpose } from "../domain/entry";
 import type { BundleRig } from "../domain/field";
 import { interruptionOf, type Interruption } from "../domain/interruption";
@@ -9,8 +10,9 @@ import { uuidV7 } from "../domain/uuid";
 import { APP } from "../domain/version";
 import type { Clock } from "./clock";
 import { signSeal, type Device } from "./device";
+import { keepPhoto, type PhotoBytes } from "./photo-shelf";
 import type { HeldRecord } from "./record-export";
-import type { KeptWalk, WalkShelf } from "./walk-shelf";
+import type { Beside, KeptWalk, WalkShelf } from "./walk-shelf";
 
 /** What a screen shows of the walk being recorded; a new object whenever something was saved. */
 export interface WalkView {
@@ -157,6 +159,20 @@ export class Recorder {
     return this.inLine(() => this.append("note", { text }));
   }
 
+  /**
+   * Keeps a photograph, of a check or of the walk as a whole. Resolves when it is saved on this phone with its entry.
+   * A walk that was closed meanwhile takes no more.
+   */
+  photo(check: string | undefined, photo: PhotoBytes): Promise<void> {
+    return this.inLine(async () => {
+      const { bytes, mime } = photo;
+      if (this.current.walk.seal) throw new Error("the walk is closed");
+      const sha256 = bytesDigest(new Uint8Array(bytes));
+      const body = { ...(check !== undefined && { check }), sha256, bytes: bytes.byteLength, mime };
+      await this.append("photo", body, (shelf, link) => keepPhoto(shelf, link, photo));
+    });
+  }
+
   /** Walking time stops until the walk is resumed. */
   pause(): Promise<void> {
     return this.inLine(async () => {
@@ -191,9 +207,9 @@ export class Recorder {
     });
   }
 
-  private async append(type: string, body: Entry["body"]): Promise<void> {
+  private async append(type: string, body: Entry["body"], beside?: Beside): Promise<void> {
     await this.noteJump();
-    await this.save(this.link(type, body), {});
+    await this.save(this.link(type, body), {}, beside);
   }
 
   /** A clock that was set since the last entry is recorded before anything else. */
@@ -206,8 +222,8 @@ export class Recorder {
     return nextLink(this.current.walk.id, this.links.at(-1)!, type, body, this.stamp());
   }
 
-  private async save(link: Link, change: Partial<KeptWalk>): Promise<void> {
-    const walk = await this.ground.shelf.append(link, change);
+  private async save(link: Link, change: Partial<KeptWalk>, beside?: Beside): Promise<void> {
+    const walk = await this.ground.shelf.append(link, change, beside);
     this.links.push(link);
     this.show({ walk, replay: this.replayed(this.current.document) });
   }

@@ -7,6 +7,9 @@ import { deviceFor, registrationOf, setRegistered } from "./device";
 import { drainOnce, isUnsent } from "./drain";
 import { nextTry } from "./drain-timing";
 import { keptLocal, localBundle } from "./local-rigs";
+import { deliverable } from "./photo-delivery";
+import { PhotoSending } from "./photo-sending";
+import { PhotoShelf, type KeptPhoto } from "./photo-shelf";
 import { WalkShelf, type KeptWalk } from "./walk-shelf";
 
 /** What the field wing shows of the phone's store and of its dealings with the server. */
@@ -21,6 +24,8 @@ export interface SyncView {
   local: Bundle | null;
   /** The walks on this phone of the bundle's member and of those made without an account, newest first. */
   walks: KeptWalk[];
+  /** The photographs that these walks name, oldest first, each with its own state. */
+  photos: KeptPhoto[];
   /** The server said that nobody is signed in; recording goes on. */
   signedOut: boolean;
   /** The server said that the role of whoever is signed in makes no walks. */
@@ -37,8 +42,8 @@ export interface SyncGround {
   spread: number;
   label: string;
   fetch?: Fetch;
-  /** Runs the work unless another tab is at it. Resolves to whether it ran. */
-  alone: (work: () => Promise<void>) => Promise<boolean>;
+  /** Runs the work unless another tab is at the same. Resolves to whether it ran. */
+  alone: (work: () => Promise<void>, what: "walks" | "photos") => Promise<boolean>;
   /** Called after every attempt, so that other tabs read the store again. */
   tell?: () => void;
 }
@@ -48,6 +53,8 @@ const BUNDLE_AGE_MS = 5 * 60_000;
 /** Keeps the phone's walks and bundle in step with the server: one attempt at a time, at moments nextTry decides. */
 export class Sync {
   readonly shelf: WalkShelf;
+  readonly photos: PhotoShelf;
+  private readonly sending: PhotoSending;
   private listeners = new Set<() => void>();
   private current: SyncView = {
     ready: false,
@@ -55,6 +62,7 @@ export class Sync {
     bundle: null,
     local: null,
     walks: [],
+    photos: [],
     signedOut: false,
     roleRefused: false,
     reached: null,
@@ -70,6 +78,14 @@ export class Sync {
 
   constructor(private readonly ground: SyncGround) {
     this.shelf = new WalkShelf(ground.store);
+    this.photos = new PhotoShelf(ground.store);
+    const { nowMs, spread, fetch } = ground;
+    this.sending = new PhotoSending({
+      ...{ shelf: this.photos, nowMs, spread, fetch },
+      alone: (work) => ground.alone(work, "photos"),
+      changed: () => this.changed(),
+      doubted: () => (this.bundleAt = null),
+    });
   }
 
   view = (): SyncView => this.current;
@@ -86,21 +102,20 @@ export class Sync {
   }
 
   stop(): void {
-    if (this.timer) clearTimeout(this.timer);
-    this.timer = null;
+    this.sending.stop();
+    this.unplan();
   }
 
   /** Something new is saved on this phone. */
   async saved(): Promise<void> {
     this.savedAt = this.ground.nowMs();
-    await this.read();
-    this.ground.tell?.();
-    this.plan();
+    await this.changed();
   }
 
   /** The network, or a sign-in, may be back. */
   stir(): void {
     this.stirredAt = this.ground.nowMs();
+    this.sending.stir();
     this.plan();
   }
 
@@ -113,7 +128,9 @@ export class Sync {
       const bundle = (await keptBundle(store)) ?? local;
       const members = [bundle?.member.id, local?.member.id];
       const walks = (await this.shelf.walks()).filter((walk) => members.includes(walk.member));
-      this.show({ ready: true, storeRefused: false, bundle, local, walks });
+      const ids = new Set(walks.map(({ id }) => id));
+      const photos = (await this.photos.all()).filter(({ walk }) => ids.has(walk));
+      this.show({ ready: true, storeRefused: false, bundle, local, walks, photos });
     } catch {
       this.show({ storeRefused: true });
     }
@@ -124,13 +141,28 @@ export class Sync {
     for (const listener of this.listeners) listener();
   }
 
+  /** The store changed under this tab's hands: everyone reads it again, and what is left to do is planned anew. */
+  private async changed(): Promise<void> {
+    await this.read();
+    this.ground.tell?.();
+    this.plan();
+  }
+
+  private unplan(): void {
+    if (this.timer) clearTimeout(this.timer);
+    this.timer = null;
+  }
+
   private plan(): void {
-    this.stop();
+    // Nobody signed in, or someone who makes no walks: either way only a sign-in helps.
+    const signedOut = this.current.signedOut || this.current.roleRefused;
+    // Until the server has said who is signed in, a photograph could be offered in someone else's name.
+    const sure = this.bundleAt !== null && !signedOut;
+    this.sending.plan(sure ? deliverable(this.current.photos, this.current.walks) : []);
+    this.unplan();
     if (this.trying) return;
     const { nowMs, spread } = this.ground;
     const { savedAt, stirredAt, triedAt, failures, notBefore } = this;
-    // Nobody signed in, or someone who makes no walks: either way only a sign-in helps.
-    const signedOut = this.current.signedOut || this.current.roleRefused;
     const pending = isLocalOnly(this.current) ? this.stirred() : this.hasSomething();
     const at = nextTry({ pending, signedOut, savedAt, stirredAt, triedAt, failures, notBefore, spread });
     if (at !== null) this.timer = setTimeout(() => void this.attempt(), Math.max(0, at - nowMs()));
@@ -173,13 +205,11 @@ export class Sync {
         roleRefused: code === "role-refused",
         reached: outcome.kind !== "unreached",
       });
-    });
+    }, "walks");
     if (!ran) this.failures += 1;
     this.triedAt = this.ground.nowMs();
     this.trying = false;
-    await this.read();
-    this.ground.tell?.();
-    this.plan();
+    await this.changed();
   }
 
   /** The bundle if it is due, the device if it is new, then envelopes until nothing more can go. */

@@ -33,6 +33,9 @@ export interface KeptWalk {
   refused: RefusalCode | null;
 }
 
+/** Writes to the shelf within the transaction that writes the link. */
+export type Beside = (shelf: IDBObjectStore, link: Link) => void;
+
 /** Someone else wrote to this walk since it was read: another tab holds it. */
 export class MovedOn extends Error {
   override name = "MovedOn";
@@ -65,9 +68,10 @@ export class WalkShelf {
   /**
    * Appends one link. The head is read again inside the transaction and entries are only ever added.
    * @param change what else changes on the walk's row with it
+   * @param beside writes what belongs to the link, all or nothing with it
    * @throws MovedOn when the walk no longer ends where the link begins, WalkGone when it is not there
    */
-  async append(link: Link, change: Partial<KeptWalk> = {}): Promise<KeptWalk> {
+  async append(link: Link, change: Partial<KeptWalk> = {}, beside?: Beside): Promise<KeptWalk> {
     const { walk: id, seq, prev } = link.entry;
     return this.store("readwrite", async (shelf) => {
       const walk: KeptWalk | undefined = await promisifyRequest(shelf.get(walkKey(id)));
@@ -75,6 +79,7 @@ export class WalkShelf {
       if (walk.length !== seq || walk.head !== prev) throw new MovedOn();
       const after = { ...walk, ...change, length: seq + 1, head: link.digest };
       shelf.add(kept(link), entryKey(id, seq));
+      beside?.(shelf, link);
       await promisifyRequest(shelf.put(after, walkKey(id)));
       return after;
     });

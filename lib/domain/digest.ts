@@ -7,6 +7,11 @@ export function sha256Hex(text: string): string {
   return bytesToHex(sha256(utf8ToBytes(text)));
 }
 
+/** Lower-case hex SHA-256 of bytes. */
+export function bytesDigest(bytes: Uint8Array): string {
+  return bytesToHex(sha256(bytes));
+}
+
 /** Lower-case hex SHA-256 of the RFC 8785 canonical bytes of a JSON value. */
 export function digestOf(value: unknown): string {
   return sha256Hex(canonicalText(value));

@@ -1,5 +1,6 @@
 import * as z from "zod/mini";
 import { depths, entryShape, purposes, verdicts } from "./entry";
+import { walkPhotoShape } from "./photo";
 import { receiptShape } from "./receipt";
 import { revisionShape } from "./revision";
 import { countShape, digestShape, instantShape, uuidShape } from "./shapes";
@@ -48,6 +49,8 @@ export const walkReadingShape = z.object({
   elapsedMs: countShape,
   document: revisionShape,
   entries: z.array(z.object({ digest: digestShape, receivedAt: instantShape, entry: entryShape })),
+  /** The photographs that the entries name, in their order. */
+  photos: z.array(walkPhotoShape),
   /** The verdict that the phone closed with, where it differs from the server's own replay. */
   closedAs: z.nullable(z.enum(verdicts)),
   seal: z.nullable(

@@ -14,6 +14,12 @@ export const problems = {
   "address-taken": { status: 409, title: "There is an account with that address already." },
   "id-taken": { status: 409, title: "An id in this request belongs to something that exists already." },
   "too-many-attempts": { status: 429, title: "Too many failed attempts. Wait, then try again." },
+  "bad-link": {
+    status: 403,
+    title: "This address for a photograph has run out or was changed. Ask for it again.",
+  },
+  "wrong-media": { status: 415, title: "A photograph is taken as JPEG, WebP or PNG." },
+  "wrong-content": { status: 422, title: "What came is not the photograph that was recorded." },
   unavailable: { status: 503, title: "The database does not answer. Try again shortly." },
   internal: { status: 500, title: "Something went wrong on the server." },
 } as const;

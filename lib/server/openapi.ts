@@ -1,6 +1,7 @@
 import "server-only";
 import * as z from "zod/mini";
 import { problems, problemShape, type ProblemCode } from "@/lib/domain/problem";
+import { digestShape } from "@/lib/domain/shapes";
 import { problemCodes, type AnswerKind, type Contract } from "./contract";
 import { settings } from "./settings";
 
@@ -46,6 +47,13 @@ function operation(route: Contract): Json {
         content: { "application/json": { schema: jsonSchema(route.body.shape, "input") } },
       },
     }),
+    ...(route.upload && {
+      requestBody: {
+        required: true,
+        description: `At most ${route.upload.limit} bytes.`,
+        content: Object.fromEntries(route.upload.media.map((media) => [media, {}])),
+      },
+    }),
     responses: { ...answers(route), ...problemAnswers(problemCodes(route)) },
   };
 }
@@ -55,7 +63,7 @@ function pathParameters({ path }: Contract): Json[] {
     name,
     in: "path",
     required: true,
-    schema: { type: "string", format: "uuid" },
+    schema: name === "id" ? { type: "string", format: "uuid" } : jsonSchema(digestShape, "input"),
   }));
 }
 
@@ -85,7 +93,10 @@ function answers(route: Contract): Json {
 function content(kind: NonNullable<AnswerKind>): Json {
   return "json" in kind
     ? { "application/json": { schema: jsonSchema(kind.json, "output") } }
-    : { [kind.media]: { schema: { type: "string" } } };
+    : "media" in kind
+      ? { [kind.media]: { schema: { type: "string" } } }
+      : // OpenAPI 3.1 leaves the schema of plain bytes out.
+        { [kind.bytes]: {} };
 }
 
 function problemAnswers(codes: ProblemCode[]): Json {

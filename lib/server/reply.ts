@@ -13,24 +13,29 @@ type Content<K extends AnswerKind> = K extends { json: infer S extends z.ZodMini
   ? { json: z.output<S> }
   : K extends { media: string }
     ? { text: string }
-    : object;
+    : K extends { bytes: string }
+      ? { bytes: Uint8Array<ArrayBuffer>; media: string }
+      : object;
 
 /** What a handler may answer by its contract. */
 export type Reply<C extends Contract> = {
   [S in keyof C["answers"] & number]: { status: S } & Content<C["answers"][S]> & Extras;
 }[keyof C["answers"] & number];
 
+type Bodies = { json: unknown; text: string; bytes: Uint8Array<ArrayBuffer>; media: string };
+
 /** No browser may take an answer for anything but what it is declared as. */
 const asDeclared = { "x-content-type-options": "nosniff" };
 
 /** The response for a reply. */
 export function replyResponse(route: Contract, reply: { status: number } & Extras): Response {
-  const { json, text } = reply as { json?: unknown; text?: string };
+  const { json, text, bytes, media } = reply as Partial<Bodies>;
   const kind = route.answers[reply.status] ?? null;
   const headers = new Headers({ "cache-control": cacheControl(route), ...asDeclared, ...reply.headers });
-  if (kind) headers.set("content-type", "media" in kind ? kind.media : "application/json");
+  if (kind)
+    headers.set("content-type", "json" in kind ? "application/json" : "media" in kind ? kind.media : media!);
   for (const cookie of reply.cookies ?? []) headers.append("set-cookie", cookie);
-  const body = kind === null ? null : "media" in kind ? text : JSON.stringify(json);
+  const body = kind === null ? null : "json" in kind ? JSON.stringify(json) : "media" in kind ? text : bytes;
   return new Response(body, { status: reply.status, headers });
 }
 

@@ -22,11 +22,16 @@ export interface Call<C extends Contract> {
   member: C extends { public: true } ? null : Member;
   /** The path's `{id}`, a UUID; empty where the path has none. */
   id: string;
+  /** The path's `{sha256}`, a digest; empty where the path has none. */
+  sha256: string;
   query: Parsed<C["query"]>;
   body: C extends { body: { shape: infer S } } ? Parsed<S> : undefined;
   /** The body as it was received, untouched by any schema: what digests are taken of. */
   raw: unknown;
 }
+
+/** What may stand in a path's places. */
+const places = { id: UUID, sha256: /^[0-9a-f]{64}$/ };
 
 interface RouteContext {
   params: Promise<unknown>;
@@ -70,9 +75,16 @@ async function checked(
   if (query instanceof Problem) return query;
   const body = await parsedBody(route, request);
   if (body instanceof Problem) return body;
-  const { id = "" } = (params ?? {}) as { id?: string };
-  if (route.path.includes("{id}") && !UUID.test(id)) return new Problem("not-found");
-  return { request, session, member: session?.member ?? null, id, query, ...body };
+  const place = placesIn(route, params);
+  if (place instanceof Problem) return place;
+  return { request, session, member: session?.member ?? null, ...place, query, ...body };
+}
+
+function placesIn({ path }: Contract, params: unknown): Record<keyof typeof places, string> | Problem {
+  const { id = "", sha256 = "" } = (params ?? {}) as Partial<Record<keyof typeof places, string>>;
+  if (path.includes("{id}") && !places.id.test(id)) return new Problem("not-found");
+  if (path.includes("{sha256}") && !places.sha256.test(sha256)) return new Problem("not-found");
+  return { id, sha256 };
 }
 
 function parsedQuery({ query }: Contract, request: Request): unknown {

@@ -1,5 +1,12 @@
 import "server-only";
-import { createPrivateKey, generateKeyPairSync, randomUUID, sign, type KeyObject } from "node:crypto";
+import {
+  createPrivateKey,
+  generateKeyPairSync,
+  hkdfSync,
+  randomUUID,
+  sign,
+  type KeyObject,
+} from "node:crypto";
 import { mkdirSync, readdirSync, readFileSync, renameSync, writeFileSync } from "node:fs";
 import { join } from "node:path";
 import { receiptMessage, type Receipt, type ServerKey } from "@/lib/domain/receipt";
@@ -37,6 +44,15 @@ export function signReceipt(
   const unsigned: Omit<Receipt, "signature"> = { v: 1, ...walk, kid: newest.kid, alg: "Ed25519" };
   const signature = sign(null, Buffer.from(receiptMessage(unsigned)), privateKey(newest));
   return { ...unsigned, signature: signature.toString("base64url") };
+}
+
+/**
+ * A secret for one purpose, derived from the newest server key: the same in every process that shares the keys, and
+ * another when a newer key comes.
+ */
+export function secretFor(purpose: string): Buffer {
+  const [newest] = keyFiles();
+  return Buffer.from(hkdfSync("sha256", Buffer.from(newest.d, "base64url"), "", `hookfast-${purpose}`, 32));
 }
 
 // Read anew each time: another process beside this one may have made a key, and its receipts need it served.

@@ -17,6 +17,7 @@ const environment = z.object({
   DATABASE_URL: unlessEmpty(z.string().startsWith("mariadb://", "a mariadb:// URL").optional()),
   DATA_DIR: unlessEmpty(z.string().default(".data")),
   KEYS_DIR: unlessEmpty(z.string().optional()),
+  PHOTOS_DIR: unlessEmpty(z.string().optional()),
   DEMO: unlessEmpty(z.enum(["0", "1"], "0 or 1").optional()),
   NEXT_DIST_DIR: unlessEmpty(z.string().default(".next")),
 });
@@ -32,6 +33,8 @@ export type Settings = {
   DATA_DIR: string;
   /** Where the keys that sign receipts live, outside the database. */
   KEYS_DIR: string;
+  /** Where the bytes of photographs live. */
+  PHOTOS_DIR: string;
   DEMO: boolean;
   NEXT_DIST_DIR: string;
   cookie: { name: string; secure: boolean };
@@ -44,7 +47,7 @@ export function readSettings(env: Record<string, string | undefined>): Settings 
     const [issue] = read.error.issues;
     throw new Error(`${issue?.path.join(".")} has to be ${issue?.message}. See .env.example.`);
   }
-  const { DATABASE_URL, ORIGIN, KEYS_DIR, DEMO, ...rest } = read.data;
+  const { DATABASE_URL, ORIGIN, KEYS_DIR, PHOTOS_DIR, DEMO, ...rest } = read.data;
   const origin = readOrigin(ORIGIN ?? `http://127.0.0.1:${rest.PORT}`);
   const secure = origin.startsWith("https:");
   return {
@@ -56,6 +59,7 @@ export function readSettings(env: Record<string, string | undefined>): Settings 
       return DATABASE_URL;
     },
     KEYS_DIR: KEYS_DIR ?? path.join(rest.DATA_DIR, "keys"),
+    PHOTOS_DIR: PHOTOS_DIR ?? path.join(rest.DATA_DIR, "photos"),
     DEMO: DEMO === "1",
     // A browser takes a __Host- cookie over https only.
     cookie: { name: secure ? "__Host-hookfast" : "hookfast", secure },

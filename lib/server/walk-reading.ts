@@ -11,6 +11,7 @@ import type { PublicKey } from "@/lib/domain/signature";
 import type { Revision } from "@/models/revision";
 import type { Walk } from "@/models/walk";
 import { tables } from "./database";
+import { photosOf } from "./photos/reading";
 import { walkRow } from "./walk-row";
 import { maySeeWalk } from "./walk-visibility";
 
@@ -49,6 +50,7 @@ export async function walkReading(member: Member, id: string): Promise<WalkReadi
       receivedAt: receivedAt.toISOString(),
       entry: JSON.parse(bytes.toString("utf8")) as Entry,
     })),
+    photos: await photosOf(walk),
     closedAs: walk.closedAs,
     seal: sealOf(walk),
   };

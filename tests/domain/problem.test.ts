@@ -16,6 +16,9 @@ test("every code has its status", () => {
     "409 address-taken",
     "409 id-taken",
     "429 too-many-attempts",
+    "403 bad-link",
+    "415 wrong-media",
+    "422 wrong-content",
     "503 unavailable",
     "500 internal",
   ]);

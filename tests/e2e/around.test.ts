@@ -2,6 +2,7 @@ import { appendFileSync, readFileSync, writeFileSync } from "node:fs";
 import AxeBuilder from "@axe-core/playwright";
 import type { BrowserContext, Page } from "@playwright/test";
 import { expect, test } from "../support/product";
+import { callOff } from "../support/walking";
 import type { Product } from "../support/product-process";
 
 const DRIVER = "driver@demo.example";
@@ -409,8 +410,7 @@ test("a new version is not offered while a walk is open in any tab; after it, an
     await expect(offer(rigs)).toHaveCount(0);
     await mark(page);
 
-    await page.getByRole("button", { name: "Close…" }).click();
-    await page.getByRole("button", { name: /^Close and sign/ }).click();
+    await callOff(page);
     await expect(page.getByRole("heading", { name: "Unfinished" })).toBeVisible();
     await expect(offer(rigs)).toBeVisible();
     await page.getByRole("link", { name: "Back to rigs" }).click();

@@ -1,18 +1,13 @@
 import AxeBuilder from "@axe-core/playwright";
 import type { Page } from "@playwright/test";
 import { expect, test } from "../support/product";
+import { good, startHookUp, tap, walkOn } from "../support/walking";
 
 // Nobody is signed in, and the wing asks.
 test.use({ allowedErrors: [/status of 401/] });
 
 const PASSWORD = "oak bend in the rain";
-const SETTLED_MS = 700;
 const start = "Start without an account";
-
-async function tap(page: Page, name: RegExp): Promise<void> {
-  await page.waitForTimeout(SETTLED_MS);
-  await page.getByRole("button", { name }).first().click();
-}
 
 /** The wing opened once, with the worker on the phone. */
 async function freshPhone(page: Page): Promise<void> {
@@ -31,17 +26,14 @@ async function makeRig(page: Page, answers: readonly RegExp[] = usual): Promise<
 
 /** Walks to the end, the first check at fault, and signs. */
 async function walkAndSign(page: Page): Promise<void> {
-  await page.getByRole("button", { name: /^Hook-up/ }).click();
-  const ask = page.getByRole("heading", { level: 2 });
-  const close = page.getByRole("button", { name: /^Close and sign/ });
-  for (let answer = /^Fault/; ; answer = /^Good/) {
-    await expect(page.getByRole("button", { name: /^Good/ })).toBeVisible();
-    const asked = await ask.innerText();
-    await tap(page, answer);
-    await expect(ask).not.toHaveText(asked);
-    if (await close.isVisible()) break;
-  }
-  await close.click();
+  await startHookUp(page);
+  let first = "";
+  await walkOn(page, (asked) => {
+    first ||= asked;
+    return asked === first ? /^Fault/ : good;
+  });
+  await tap(page, /^Call it off/);
+  await tap(page, /^called away/);
 }
 
 async function fill(page: Page, email: string, password = PASSWORD): Promise<void> {

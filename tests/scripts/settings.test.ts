@@ -9,6 +9,7 @@ describe("readSettings", () => {
       ORIGIN: "http://127.0.0.1:3000",
       DATA_DIR: ".data",
       KEYS_DIR: ".data/keys",
+      PHOTOS_DIR: ".data/photos",
       DEMO: false,
       NEXT_DIST_DIR: ".next",
       cookie: { name: "hookfast", secure: false },

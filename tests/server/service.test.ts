@@ -123,7 +123,7 @@ describe("GET /api/openapi.json", () => {
       required: ["type", "title", "status", "code"],
     });
     for (const [route, operations] of Object.entries(paths)) {
-      expect(route).toMatch(/^\/api\/[a-z.{}/-]+$/);
+      expect(route).toMatch(/^\/api\/[a-z0-9.{}/-]+$/);
       for (const operation of Object.values(operations)) {
         expect(operation.summary).not.toBe("");
         const statuses = Object.keys(operation.responses);
@@ -213,7 +213,7 @@ describe("every route but the public ones", () => {
     const root = path.resolve(import.meta.dirname, "../../app/api");
     const member = await givenMember({ role: "manager" });
     for (const { method, path: route, public: open } of contracts) {
-      const file = path.join(root, route.slice("/api/".length).replace("{id}", "[id]"), "route.ts");
+      const file = path.join(root, route.slice("/api/".length).replace(/\{(\w+)\}/, "[$1]"), "route.ts");
       const handlers = (await import(file)) as Record<string, (request: Request) => Promise<Response>>;
       const bare = await handlers[method]!(request(method, route, null, method === "POST" ? "" : undefined));
       expect([route, bare.status === 401]).toEqual([route, !open]);

@@ -31,6 +31,8 @@ export class Product {
       ORIGIN: this.origin,
       DATABASE_URL: this.databaseUrl,
       KEYS_DIR: path.join(process.env.DATA_DIR ?? ".data/test", "e2e", databaseName, "keys"),
+      // Else a demo's photographs would be there already, from the run before.
+      PHOTOS_DIR: path.join(process.env.DATA_DIR ?? ".data/test", "e2e", databaseName, "photos"),
       DEMO: "1",
     };
   }

@@ -58,22 +58,49 @@ export async function markFault(page: Page): Promise<string> {
   return asked;
 }
 
+/** The ends of a walk, and what is answered on the way to them. */
+const ends = /^(Close and sign|Fixed, look again)/;
+const answers = /^(Good|Nobody has|They light|Dark$|Go on without|Go on$|Close and sign|Fixed, look again)/;
+
+/** What is asked now: the check or signal, and the question under it. */
+function asking(page: Page): Promise<string> {
+  return page.evaluate(() =>
+    [...document.querySelectorAll("h2, section[aria-labelledby] > p:first-child")]
+      .map((each) => each.textContent)
+      .join(" / "),
+  );
+}
+
 /**
- * Answers what is left of a walk, in turn, until nothing is asked any more: checks by `answer`, the question about the
- * car with nobody.
+ * Answers what is left of a walk, in turn, until nothing is asked any more: checks by `answer`, everything else with
+ * the first answer that says all is well.
+ * @param until stops where such a button shows
  */
-export async function walkOn(page: Page, answer: (ask: string) => RegExp = () => good): Promise<void> {
-  const onward = page.getByRole("button", { name: /^(Good|Nobody has|Close and sign|Fixed, look again)/ });
+export async function walkOn(
+  page: Page,
+  answer: (ask: string) => RegExp = () => good,
+  until: RegExp = ends,
+): Promise<void> {
+  const button = page.getByRole("button", { name: answers });
   for (;;) {
-    await onward.first().waitFor();
-    if (await page.getByRole("button", { name: /^(Close and sign|Fixed, look again)/ }).isVisible()) return;
-    const asked = await ask(page).innerText();
-    const aboutCar = await page.getByRole("button", { name: nobody }).isVisible();
-    const name = aboutCar ? nobody : answer(asked);
-    await tap(page, name);
-    if (name.source.startsWith("^Fault")) await tap(page, /^Go on$/);
-    await moved(page, asked);
+    await button.first().waitFor();
+    if (await page.getByRole("button", { name: until }).isVisible()) return;
+    const before = await asking(page);
+    const name = await button.first().innerText();
+    await tap(page, good.test(name) ? answer(await ask(page).innerText()) : firstWords(name));
+    await expect.poll(() => asking(page)).not.toBe(before);
   }
+}
+
+function firstWords(name: string): RegExp {
+  return new RegExp(`^${name.split("\n")[0]}`);
+}
+
+/** Calls the open walk off as it stands: closed and signed. */
+export async function callOff(page: Page): Promise<void> {
+  await tap(page, /^Stop…/);
+  await tap(page, /^Call it off/);
+  await tap(page, /^called away/);
 }
 
 /** The entries of the walk that shows, as the phone's store has them. */

@@ -1,6 +1,7 @@
 import type { Contract } from "../contract";
 import { registerDevice } from "./devices";
 import { readBundle, sendEntries } from "./field";
+import { askForPhoto, readPhoto, sendPhoto } from "./photos";
 import { readHealth, readKeys, readOpenApi } from "./service";
 import { signIn, signOut, whoAmI } from "./session";
 import { signUp } from "./sign-up";
@@ -15,6 +16,9 @@ export const contracts: readonly Contract[] = [
   registerDevice,
   readBundle,
   sendEntries,
+  askForPhoto,
+  sendPhoto,
+  readPhoto,
   listWalks,
   readWalk,
   readRecord,

@@ -24,7 +24,7 @@ export async function appendEntries(
   ground: Ground,
   links: readonly Link[],
 ): Promise<void> {
-  const { Walk, Entry } = tables();
+  const { Walk, Entry, PhotoEntry } = tables();
   const { entry: last, digest } = links.at(-1)!;
   const walkId = last.walk;
   const earlier = stored ? await storedEntries(walkId, transaction) : [];
@@ -73,6 +73,15 @@ export async function appendEntries(
   }
   const rows = links.map((link) => ({ walkId, ...bytesOf(link), receivedAt: now }));
   await Entry.bulkCreate(rows, { transaction });
+  await PhotoEntry.bulkCreate(links.flatMap(photoOf), { transaction });
+}
+
+/** What is looked up of a photograph that an entry names, beside the entry itself. */
+function photoOf({ entry }: Link) {
+  const photo = bodyOf(entry, "photo");
+  if (!photo) return [];
+  const { check = null, sha256, bytes, mime } = photo;
+  return [{ walkId: entry.walk, seq: entry.seq, check, sha256: Buffer.from(sha256, "hex"), bytes, mime }];
 }
 
 /** Keeps a second content for a stored sequence number apart. The same one again changes nothing. */
