@@ -11,7 +11,7 @@ type Step = { context: QueryInterface };
 type Migration = { up(step: Step): Promise<unknown>; down(step: Step): Promise<unknown> };
 
 /**
- * Brings the database that DATABASE_URL names up to date and, when asked, seeds the demo into an empty one. Two
+ * Brings the database that DATABASE_URL names up to date and, when asked, seeds the demo into an empty one or keeps it current. Two
  * starts may do this at once: the second waits and finds everything done.
  */
 export async function prepareDatabase(wanted: { demo: boolean }): Promise<{ hasDemo: boolean }> {
@@ -19,8 +19,10 @@ export async function prepareDatabase(wanted: { demo: boolean }): Promise<{ hasD
   const { settings } = await import("@/lib/server/settings");
   return await whileLocked(settings.DATABASE_URL, async () => {
     await migrate(database());
-    if (wanted.demo && (await isEmpty(database()))) {
-      console.log("Seeding the demo.");
+    const empty = await isEmpty(database());
+    if (wanted.demo && empty) console.log("Seeding the demo.");
+    // One that stands already is completed and gets what its lists have gained.
+    if (wanted.demo && (empty || (await holdsDemo(database())))) {
       await (await import("@/seeders/demo")).seedDemo();
     }
     return { hasDemo: await holdsDemo(database()) };

@@ -151,7 +151,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
   await readyPhone(page, product);
   await startHookUp(page);
   await tap(page, good);
-  await moved(page, first);
+  await expect(page.getByText(/^2 of \d+$/)).toBeVisible();
   const held = await markFault(page);
   await walkOn(page);
   await expect(page.getByRole("heading", { name: "Do not tow" })).toBeVisible();

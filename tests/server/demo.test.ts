@@ -135,4 +135,19 @@ describe("seeding again", () => {
     await seedDemo(now);
     expect(await Walk.count()).toBe(before);
   });
+
+  test("issues a list anew where the demo's is an older one, and only there", async () => {
+    const { Revision } = tables();
+    const before = await Revision.count();
+    const rigId = rigs.household.id;
+    await Revision.update({ digest: Buffer.alloc(32, 7) }, { where: { rigId } });
+    await seedDemo(now);
+    await seedDemo(now);
+    const all = await Revision.findAll({ where: { rigId }, order: [["number", "ASC"]], raw: true });
+    expect(all.map(({ number, digest }) => [number, digest.toString("hex")])).toEqual([
+      [1, "07".repeat(32)],
+      [2, digestOf(rigs.household.document)],
+    ]);
+    expect(await Revision.count()).toBe(before + 1);
+  });
 });
