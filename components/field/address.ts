@@ -6,12 +6,16 @@ export interface Address {
   at: string | null;
   /** The rig whose paper cards show. */
   paper: string | null;
+  /** What this phone prompts someone through, recording nothing. */
+  prompt: string | null;
 }
 
 /** Where a walk is stopped or closed. */
 export const CLOSING = "close";
 /** Where a walk is called off, with the reason. */
 export const CALL_OFF = "call-off";
+/** The lamp test's prompter. */
+export const LAMPS = "lamps";
 /** The stations of a walk. */
 export const PLAN = "plan";
 
@@ -27,11 +31,12 @@ function subscribe(listener: () => void): () => void {
 }
 
 /** The wing's own path for an address: one document, ids in the query string. */
-export function hrefOf({ walk, at, paper }: Partial<Address>): string {
+export function hrefOf({ walk, at, paper, prompt }: Partial<Address>): string {
   const query = new URLSearchParams({
     ...(walk && { walk }),
     ...(walk && at && { at }),
     ...(!walk && paper && { paper }),
+    ...(!walk && !paper && prompt && { prompt }),
   }).toString();
   return query ? `/field?${query}` : "/field";
 }
@@ -43,6 +48,7 @@ export function addressOf(search: string): Address {
     walk: query.get("walk") || null,
     at: query.get("at") || null,
     paper: query.get("paper") || null,
+    prompt: query.get("prompt") || null,
   };
 }
 

@@ -1,7 +1,8 @@
 "use client";
 
 import { useEffect } from "react";
-import { addressOf, useSearch } from "./address";
+import { PromptScreen } from "@/components/lamps/prompt-screen";
+import { addressOf, LAMPS, useSearch } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
@@ -12,7 +13,7 @@ import { WalkScreen } from "./walk-screen";
 /** The field wing: everything that works with no network, on one static page. */
 export function FieldWing() {
   const sync = useSyncView();
-  const { walk, at, paper } = addressOf(useSearch());
+  const { walk, at, paper, prompt } = addressOf(useSearch());
 
   useEffect(() => {
     void registerWorker();
@@ -23,5 +24,6 @@ export function FieldWing() {
 
   if (walk) return <WalkScreen key={walk} sync={sync} walk={walk} at={at} />;
   if (paper) return <PaperScreen sync={sync} rig={paper} />;
+  if (prompt === LAMPS) return <PromptScreen />;
   return <RigsScreen sync={sync} />;
 }
