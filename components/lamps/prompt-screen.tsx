@@ -5,6 +5,7 @@ import { WingLink } from "@/components/field/wing-link";
 import { signals } from "@/lib/domain/entry";
 import { usualHoldMs, type HoldMs, type Signal } from "@/lib/domain/lamp-script";
 import { lampScriptWords } from "@/lib/domain/messages/lamp-script";
+import { ArmSignals } from "./arm-signals";
 import { ScriptBar } from "./script-bar";
 import { useAwake } from "./use-awake";
 import { useScript } from "./use-script";
@@ -34,6 +35,11 @@ export function PromptScreen() {
       <div className="px-4 pt-4 md:w-full md:max-w-3xl">
         <ScriptBar state={state} onStart={start} onStop={stop} hold={hold} onHold={setHold} />
       </div>
+      {!running && (
+        <div className="pt-8">
+          <ArmSignals />
+        </div>
+      )}
     </FieldFrame>
   );
 }

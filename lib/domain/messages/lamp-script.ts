@@ -109,6 +109,7 @@ export const lampScriptWords = {
   },
 
   arms: {
+    summary: "The arms for each signal",
     agreed:
       "Agree on these first. They are how some owners do it, and common practice, not a rule: any arms will do as " +
       "long as both of you mean the same.",
