@@ -26,20 +26,20 @@ export function ArmSignalDrawing({ signal }: { signal: Signal }) {
     <Frame title={words.title(name)} description={words.description(arms, words.lit[lit])} height={300}>
       {(hatch) => (
         <>
+          <Body />
           <Car hatch={hatch} />
           <Lamp lit={lit !== "right"} />
           <g transform={mirrored}>
             <Lamp lit={lit !== "left"} />
           </g>
-          <Body />
           <ArmOf arm={left} />
           <g transform={mirrored}>
             <ArmOf arm={right} />
           </g>
-          <text x="34" y="284" textAnchor="middle" className="dr-mono">
+          <text x="34" y="284" textAnchor="middle" className="dr-label">
             {words.left}
           </text>
-          <text x="356" y="284" textAnchor="middle" className="dr-mono">
+          <text x="356" y="284" textAnchor="middle" className="dr-label">
             {words.right}
           </text>
         </>

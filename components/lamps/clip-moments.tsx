@@ -62,7 +62,7 @@ export function ClipMoments({ url, onUnreadable, onOther, onDone }: ClipMomentsP
         autoPlay
         preload="auto"
         aria-label={words.video}
-        className="max-h-[45vh] w-full bg-asphalt object-contain md:max-h-[70vh]"
+        className="sticky top-0 z-10 max-h-[40vh] w-full bg-asphalt object-contain md:max-h-[70vh]"
         onError={onUnreadable}
         onPlay={() => setPlaying(true)}
         onPause={() => setPlaying(false)}
@@ -74,7 +74,7 @@ export function ClipMoments({ url, onUnreadable, onOther, onDone }: ClipMomentsP
             <h2 role="status" className="px-1 text-2xl leading-tight font-extrabold">
               {words.ask(lampScriptWords.signal[signal].seen)}
             </h2>
-            <p className="tabular flex justify-between px-1 text-[1.0625rem] text-soft">
+            <p className="tabular flex flex-wrap justify-between gap-x-4 px-1 text-[1.0625rem] text-soft">
               <span>{words.at(clipTime(seconds))}</span>
               <span>{words.place(found.length + 1, signals.length)}</span>
             </p>

@@ -15,7 +15,7 @@ export function HoldChoice({ hold, onHold }: HoldChoiceProps) {
       {holdChoicesMs.map((each) => (
         <label
           key={each}
-          className="flex min-h-field flex-1 items-center justify-center border-2 border-edge px-2 text-center text-xl leading-tight font-semibold not-last:-mr-0.5 first-of-type:rounded-l-[3px] last-of-type:rounded-r-[3px] has-checked:border-ink has-checked:bg-ink has-checked:text-paper has-focus-visible:relative has-focus-visible:outline-4 has-focus-visible:outline-offset-2 has-focus-visible:outline-now"
+          className="flex min-h-field flex-1 items-center justify-center border-2 border-edge px-1 text-center text-xl whitespace-nowrap leading-tight font-semibold not-last:-mr-0.5 first-of-type:rounded-l-[3px] last-of-type:rounded-r-[3px] has-checked:border-ink has-checked:bg-ink has-checked:text-paper has-focus-visible:relative has-focus-visible:outline-4 has-focus-visible:outline-offset-2 has-focus-visible:outline-now"
         >
           <input
             type="radio"

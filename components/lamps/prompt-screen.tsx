@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useEffect, useState } from "react";
 import { FieldFrame } from "@/components/field/field-frame";
 import { useScreenTitle } from "@/components/field/screen-title";
 import { WingLink } from "@/components/field/wing-link";
@@ -19,15 +19,15 @@ export function PromptScreen() {
   const running = state.phase === "waiting" || state.phase === "signal";
   useScreenTitle(words.title);
   useAwake(running);
+  // The word is at the top, the button that was tapped at the bottom.
+  useEffect(() => window.scrollTo(0, 0), [running]);
   return (
     <FieldFrame>
-      <header className="flex flex-wrap items-center justify-between gap-x-4 pt-2 pr-1 pl-4">
-        <h1 className="text-[1.375rem] leading-[1.1] font-extrabold">{words.title}</h1>
-        <WingLink className="flex min-h-field items-center px-3 underline">{words.back}</WingLink>
-      </header>
+      {running ? <h1 className="sr-only">{words.title}</h1> : <Top />}
       {state.phase === "idle" && <Beforehand />}
       {state.phase === "done" && <Done />}
-      <div role="status" className="flex flex-1 flex-col justify-center">
+      <div role="status" className={`flex flex-1 flex-col justify-center ${running ? "pt-4" : ""}`}>
+        {state.phase === "waiting" && <First signal={signals[0]} />}
         {state.phase === "signal" && (
           <HugeSignal signal={state.signal} place={state.place} total={state.total} />
         )}
@@ -41,6 +41,15 @@ export function PromptScreen() {
         </div>
       )}
     </FieldFrame>
+  );
+}
+
+function Top() {
+  return (
+    <header className="flex flex-wrap items-center justify-between gap-x-4 pt-2 pr-1 pl-4">
+      <h1 className="text-[1.375rem] leading-[1.1] font-extrabold">{words.title}</h1>
+      <WingLink className="flex min-h-field items-center px-3 underline">{words.back}</WingLink>
+    </header>
   );
 }
 
@@ -63,8 +72,18 @@ function Done() {
   );
 }
 
+function First({ signal }: { signal: Signal }) {
+  const { name, press } = lampScriptWords.signal[signal];
+  return (
+    <div className="px-4">
+      <p className="text-[2.25rem] leading-[1.05] font-extrabold">{words.first(name)}</p>
+      <p className="pt-3 text-[1.75rem] leading-tight">{press}</p>
+    </div>
+  );
+}
+
 // As wide as the longest line allows and as high as the rest of the screen leaves: no text size makes it larger.
-const sizes = { 4: "text-[min(40vw,42vh)]", 5: "text-[min(33vw,34vh)]", 7: "text-[min(22vw,40vh)]" };
+const sizes = { 4: "text-[min(43vw,42vh)]", 5: "text-[min(37vw,36vh)]", 7: "text-[min(23.5vw,36vh)]" };
 
 function HugeSignal({ signal, place, total }: { signal: Signal; place: number; total: number }) {
   const { huge, press } = lampScriptWords.signal[signal];
@@ -74,7 +93,7 @@ function HugeSignal({ signal, place, total }: { signal: Signal; place: number; t
     <div className="px-4">
       <p className="tabular text-[1.0625rem] text-soft">{lampScriptWords.bar.place(place, total)}</p>
       <p
-        className={`${huge.length > 1 ? "text-[min(33vw,24vh)]" : sizes[size]} leading-[0.95] font-extrabold`}
+        className={`${huge.length > 1 ? "text-[min(37vw,23vh)]" : sizes[size]} leading-[0.95] font-extrabold`}
       >
         {huge.map((line) => (
           <span key={line} className="block">

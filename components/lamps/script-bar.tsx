@@ -58,7 +58,7 @@ function Waiting({ startMs, startsInMs }: { startMs: number; startsInMs: number 
         role="timer"
         aria-label={words.clock}
         aria-live="off"
-        className="tabular text-[min(4rem,19vw)] leading-none font-semibold"
+        className="tabular text-[min(4rem,16vw)] leading-none whitespace-nowrap font-semibold"
       >
         {secondsTimeText(startMs - startsInMs)}
       </p>

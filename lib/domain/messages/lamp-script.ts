@@ -103,6 +103,7 @@ export const lampScriptWords = {
     lead: "For the driver’s phone. It says what to press and records nothing; the phone behind the car records.",
     agree: "First hold the two phones side by side: same time, same seconds to hold. Then tap on both.",
     secured: "The coach is held by its parking brake. Nobody between the vehicles while either can move.",
+    first: (name: string) => `First: ${lower(name)}`,
     done: "All seven. Again?",
     doneHint: "Only the other phone knows what was seen.",
     back: "Back to the rigs",
