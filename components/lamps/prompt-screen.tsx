@@ -20,7 +20,9 @@ export function PromptScreen() {
   useScreenTitle(words.title);
   useAwake(running);
   // The word is at the top, the button that was tapped at the bottom.
-  useEffect(() => window.scrollTo(0, 0), [running]);
+  useEffect(() => {
+    window.scrollTo(0, 0);
+  }, [running]);
   return (
     <FieldFrame>
       {running ? <h1 className="sr-only">{words.title}</h1> : <Top />}

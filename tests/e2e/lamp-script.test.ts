@@ -15,6 +15,7 @@ async function phone(context: BrowserContext, stoodAt: string): Promise<Page> {
   await page.clock.install({ time: new Date("2026-11-30T10:30:00-07:00") });
   await page.goto("/field?prompt=lamps");
   await expect(start(page)).toBeVisible();
+  await page.evaluate(async () => void (await navigator.serviceWorker.ready));
   await context.setOffline(true);
   await page.clock.pauseAt(new Date(`2026-11-30T${stoodAt}-07:00`));
   return page;
