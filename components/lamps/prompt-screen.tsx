@@ -84,19 +84,27 @@ function First({ signal }: { signal: Signal }) {
   );
 }
 
-// As wide as the longest line allows and as high as the rest of the screen leaves: no text size makes it larger.
-const sizes = { 4: "text-[min(43vw,42vh)]", 5: "text-[min(37vw,36vh)]", 7: "text-[min(23.5vw,36vh)]" };
+// As wide as its longest line allows, in the font's own widths, and as high as the rest of the screen leaves: text size
+// does not come into it, so the margin is no matter of text size either.
+const sizes = {
+  short: "text-[min(42vw,42vh)]",
+  right: "text-[min(35.5vw,36vh)]",
+  hazards: "text-[min(23vw,36vh)]",
+  two: "text-[min(40vw,23vh)]",
+};
+
+function sizeOf([first, second]: readonly [string, string?]): keyof typeof sizes {
+  if (second) return "two";
+  if (first.length > 5) return "hazards";
+  return first.length > 4 ? "right" : "short";
+}
 
 function HugeSignal({ signal, place, total }: { signal: Signal; place: number; total: number }) {
   const { huge, press } = lampScriptWords.signal[signal];
-  const longest = Math.max(...huge.map((line) => line.length));
-  const size = longest <= 4 ? 4 : longest <= 5 ? 5 : 7;
   return (
-    <div className="px-4">
+    <div className="px-[4vw]">
       <p className="tabular text-[1.0625rem] text-soft">{lampScriptWords.bar.place(place, total)}</p>
-      <p
-        className={`${huge.length > 1 ? "text-[min(37vw,23vh)]" : sizes[size]} leading-[0.95] font-extrabold`}
-      >
+      <p className={`${sizes[sizeOf(huge)]} leading-[0.95] font-extrabold whitespace-nowrap`}>
         {huge.map((line) => (
           <span key={line} className="block">
             {line}

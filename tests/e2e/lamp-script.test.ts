@@ -9,6 +9,10 @@ const told = (page: Page) => page.getByRole("status");
 const clock = (page: Page) => page.getByRole("timer", { name: "Time now" });
 const secondsLeft = (page: Page) => page.getByRole("timer").getByText(/^\d+ s left$/);
 
+/** The huge word never breaks; one that is too large makes the page scroll sideways. */
+const widerThanScreen = (page: Page) =>
+  page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth);
+
 /** A phone that shows the prompter, without any network from here on, its clock standing still. */
 async function phone(context: BrowserContext, stoodAt: string): Promise<Page> {
   const page = await context.newPage();
@@ -31,7 +35,7 @@ test.describe("the lamp prompter", () => {
   }) => {
     const other = await browser.newContext({
       baseURL: product.origin,
-      viewport: { width: 390, height: 844 },
+      viewport: { width: 320, height: 640 },
       timezoneId: "America/Denver",
     });
     const unexpected = guardConsole(other, (text) => product.allows(text));
@@ -57,6 +61,7 @@ test.describe("the lamp prompter", () => {
       for (const page of both) {
         await expect(told(page)).toContainText(huge.join(""));
         await expect(told(page)).toContainText(press);
+        expect(await widerThanScreen(page), `${signal} fits the screen`).toBe(false);
         await expect(page.getByText(`signal ${at + 1} of 7`)).toBeVisible();
         await expect(secondsLeft(page)).toHaveText("4 s left");
         const after = next
