@@ -5,6 +5,7 @@ type WingLinkProps = {
   walk?: string;
   at?: string;
   paper?: string;
+  prompt?: string;
   className?: string;
   children: ReactNode;
 };

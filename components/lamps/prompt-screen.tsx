@@ -78,8 +78,8 @@ function First({ signal }: { signal: Signal }) {
   const { name, press } = lampScriptWords.signal[signal];
   return (
     <div className="px-4">
-      <p className="text-[2.25rem] leading-[1.05] font-extrabold">{words.first(name)}</p>
-      <p className="pt-3 text-[1.75rem] leading-tight">{press}</p>
+      <p className="text-2xl leading-tight font-extrabold">{words.first(name)}</p>
+      <p className="pt-1">{press}</p>
     </div>
   );
 }
@@ -102,7 +102,7 @@ function sizeOf([first, second]: readonly [string, string?]): keyof typeof sizes
 function HugeSignal({ signal, place, total }: { signal: Signal; place: number; total: number }) {
   const { huge, press } = lampScriptWords.signal[signal];
   return (
-    <div className="px-[4vw]">
+    <div className="px-[min(4vw,1rem)]">
       <p className="tabular text-[1.0625rem] text-soft">{lampScriptWords.bar.place(place, total)}</p>
       <p className={`${sizes[sizeOf(huge)]} leading-[0.95] font-extrabold whitespace-nowrap`}>
         {huge.map((line) => (
