@@ -82,6 +82,8 @@ function contentPolicy(pathname: string): string {
     ["script-src 'self'", ...inline].join(" "),
     inDevelopment ? "style-src 'self' 'unsafe-inline'" : "style-src 'self'",
     "img-src 'self' data: blob:",
+    // A filmed clip plays from the phone it was filmed with.
+    "media-src 'self' blob:",
     "font-src 'self'",
     inDevelopment ? "connect-src 'self' ws:" : "connect-src 'self'",
     "worker-src 'self'",

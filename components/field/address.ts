@@ -12,6 +12,8 @@ export type Address = Record<(typeof parts)[number], string | null>;
 export const CLOSING = "close";
 /** Where a walk is called off, with the reason. */
 export const CALL_OFF = "call-off";
+/** The lamp test's prompter. */
+export const LAMPS = "lamps";
 /** The stations of a walk. */
 export const PLAN = "plan";
 /** Without a walk: where a rig is made on this phone. */

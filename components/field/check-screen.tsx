@@ -19,7 +19,9 @@ export function CheckScreen(props: CheckScreenProps) {
       {...props}
       marking={marking}
       picture={
-        <CheckPicture check={check} marked={callouts.chosen} onTouch={callouts.touch} asking={asking} />
+        marking.asking !== "measure" && (
+          <CheckPicture check={check} marked={callouts.chosen} onTouch={callouts.touch} asking={asking} />
+        )
       }
       says={<CheckWords check={check} mark={mark} marking={marking} />}
       acts={

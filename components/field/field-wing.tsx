@@ -1,11 +1,12 @@
 "use client";
 
 import { useEffect } from "react";
+import { PromptScreen } from "@/components/lamps/prompt-screen";
 import { SettingsScreen } from "@/components/settings/settings-screen";
 import { StoreNotices } from "@/components/settings/store-notices";
 import { NewRig } from "@/components/starter/new-rig";
 import type { SyncView } from "@/lib/client/sync";
-import { addressOf, NEW_RIG, useSearch, type Address } from "./address";
+import { addressOf, LAMPS, NEW_RIG, useSearch, type Address } from "./address";
 import { letGo, theField, useSyncView } from "./browser-field";
 import { registerWorker } from "./register-worker";
 import { followTaps } from "./settling";
@@ -36,9 +37,10 @@ export function FieldWing() {
 
 /** The one screen that an address says. */
 function Screen({ sync, address }: { sync: SyncView; address: Address }) {
-  const { walk, at, paper, settings } = address;
+  const { walk, at, paper, prompt, settings } = address;
   if (walk) return <WalkScreen key={walk} sync={sync} walk={walk} at={at} />;
   if (paper) return <PaperScreen sync={sync} rig={paper} />;
+  if (prompt === LAMPS) return <PromptScreen />;
   if (settings) return <SettingsScreen sync={sync} />;
   if (at === NEW_RIG) return <NewRig />;
   return <RigsScreen sync={sync} />;

@@ -1,11 +1,13 @@
 import { useEffect, useState } from "react";
 import { UpdateOffer } from "@/components/settings/update-offer";
+import { buttonClass } from "@/components/ui/button";
 import { EmptyState } from "@/components/ui/empty-state";
 import { Skeleton } from "@/components/ui/skeleton";
 import { LocalNote, LocalRigsFoot } from "@/components/starter/local-note";
 import { LocalRigs } from "@/components/starter/local-rigs";
 import { isLocalOnly, type SyncView } from "@/lib/client/sync";
 import { fieldWords } from "@/lib/domain/messages/field";
+import { LAMPS } from "./address";
 import { FieldFrame } from "./field-frame";
 import { KeptWalks } from "./kept-walks";
 import { NoRigs } from "./no-rigs";
@@ -13,6 +15,7 @@ import { RigCard } from "./rig-card";
 import { useScreenTitle } from "./screen-title";
 import { SyncNotes } from "./sync-notes";
 import { StoreRefused } from "./walk-notes";
+import { WingLink } from "./wing-link";
 import { WingTop } from "./wing-top";
 
 const words = fieldWords.rigs;
@@ -26,6 +29,9 @@ export function RigsScreen({ sync }: { sync: SyncView }) {
       <WingTop member={sync.bundle?.member} />
       <UpdateOffer walks={sync.walks} />
       <Rigs sync={sync} />
+      <WingLink prompt={LAMPS} className={`${buttonClass("quiet")} mx-3 mt-5 md:max-w-md`}>
+        {words.prompter}
+      </WingLink>
     </FieldFrame>
   );
 }

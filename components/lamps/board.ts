@@ -6,7 +6,7 @@ import { boardOutcome, expectedOf, type LampPair, type Seen } from "@/lib/domain
 import type { Check } from "@/lib/domain/revision";
 
 /** What shows at the board: a signal as it should be, one that is odd, or something beside the signals. */
-export type BoardView = "signal" | "odd" | "whole" | "how" | "clip";
+export type BoardView = "signal" | "odd" | "whole" | "how";
 
 /** A lamp board in use. Every signal is saved as it is answered, in the check's mark. */
 export interface Board {
@@ -22,19 +22,27 @@ export interface Board {
   odd: (pair: LampPair) => void;
   unseen: () => void;
   back: () => void;
-  /** Goes to a signal, as a script does. */
-  goTo: (signal: Signal) => void;
+  /** Whether this signal has its answer; a script goes on from it by itself. */
+  answered: boolean;
 }
 
 /**
  * Runs a board over its seven signals.
  * @param seen what the check's mark has so far
  * @param note kept with the mark: where the signals were seen, if not on the spot
+ * @param following the signal that a script is at, which it and no answer leaves
  */
-export function useBoard(check: Check, marking: Marking, seen: Seen, note: string | undefined): Board {
+export function useBoard(
+  check: Check,
+  marking: Marking,
+  seen: Seen,
+  note: string | undefined,
+  following: Signal | null,
+): Board {
   const [passed, setPassed] = useState<readonly Signal[]>([]);
   const answered = (signal: Signal) => seen[signal] !== undefined || passed.includes(signal);
-  const [at, setAt] = useState<Signal>(() => signals.find((signal) => !answered(signal)) ?? signals[0]);
+  const [chosen, setAt] = useState<Signal>(() => signals.find((signal) => !answered(signal)) ?? signals[0]);
+  const at = following ?? chosen;
   const [view, setView] = useState<BoardView>("signal");
   const settled = useSettled(`${at} ${view}`);
   const place = signals.indexOf(at) + 1;
@@ -45,7 +53,7 @@ export function useBoard(check: Check, marking: Marking, seen: Seen, note: strin
     const more = { ...(Object.keys(after).length > 0 && { seen: after }), ...(note && { note }) };
     if (!ahead) return void marking.mark(boardOutcome(check, after), more);
     if (changed) void marking.keep(boardOutcome(check, after), more);
-    setAt(ahead);
+    if (!following) setAt(ahead);
     setView("signal");
   };
   const answer = (pair: LampPair) => {
@@ -80,9 +88,6 @@ export function useBoard(check: Check, marking: Marking, seen: Seen, note: strin
       else if (place > 1 && settled()) setAt(signals[place - 2]!);
       else marking.back();
     },
-    goTo(signal) {
-      setAt(signal);
-      setView("signal");
-    },
+    answered: answered(at),
   };
 }

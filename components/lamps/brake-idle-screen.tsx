@@ -56,7 +56,6 @@ function IdleQuestion({ marking, first, onWhole }: IdleQuestionProps) {
     lit: [
       { label: words.lit.yes, value: { lit: "yes" as const }, good: true },
       { label: words.lit.no, value: { lit: "no" as const }, good: false },
-      { label: words.lit.unknown, value: { lit: "unknown" as const }, good: false },
     ],
     dark: twoOf(words.dark, "dark"),
     pedal: twoOf(words.pedal, "pedalUp"),
@@ -77,10 +76,15 @@ function IdleQuestion({ marking, first, onWhole }: IdleQuestionProps) {
           </Button>
         ))}
       </div>
-      <div className="acts-two">
+      <div className="acts-three">
         <Button variant="quiet" disabled={first && ask === "lit"} onClick={back}>
           {fieldWords.walk.backOne}
         </Button>
+        {ask === "lit" && (
+          <Button variant="quiet" onClick={() => say({ lit: "unknown" })}>
+            {words.lit.unknown}
+          </Button>
+        )}
         <Button variant="quiet" onClick={onWhole}>
           {words.whole}
         </Button>

@@ -5,16 +5,20 @@ import { CheckQuestion } from "@/components/field/check-question";
 import { MarkButtons } from "@/components/field/mark-buttons";
 import { useMarking } from "@/components/field/marking";
 import { Question } from "@/components/field/question";
-import { LampsDrawing } from "@/components/drawings/lamps";
 import { Button } from "@/components/ui/button";
-import type { Signal } from "@/lib/domain/entry";
+import { signals, type Signal } from "@/lib/domain/entry";
 import { expectedOf, type LampPair } from "@/lib/domain/lamp-board";
+import { clipNote } from "@/lib/domain/messages/lamp-script";
 import { lampBoardWords as words } from "@/lib/domain/messages/lamps";
-import { signals } from "@/lib/domain/entry";
 import { useBoard } from "./board";
+import { ClipMarker } from "./clip-marker";
+import { LampPicture } from "./lamp-picture";
 import { OddLamp } from "./odd-lamp";
+import { ScriptBar } from "./script-bar";
 import { SignalButtons } from "./signal-buttons";
 import { SignalWords } from "./signal-words";
+import { useWay } from "./way";
+import { WayQuestion } from "./way-question";
 
 /** The lamp board: one signal after the other, each lamp as it should answer, good as drawn or odd. */
 export function LampScreen(props: CheckScreenProps) {
@@ -23,38 +27,78 @@ export function LampScreen(props: CheckScreenProps) {
   const mark = view.replay.marks.get(check.key);
   const marking = useMarking(recorder, steps, step);
   const callouts = useCallouts(check, marking, mark?.note);
-  const board = useBoard(check, marking, mark?.seen ?? {}, mark?.note);
+  const way = useWay();
+  const note = (way.clip && clipNote(way.clip.moments)) ?? mark?.note;
+  const board = useBoard(check, marking, mark?.seen ?? {}, note, way.following);
   const { signal } = board;
   const expected = expectedOf(check, signal);
   const [odd, setOdd] = useState<{ signal: Signal; pair: LampPair } | null>(null);
   const pair = board.view === "odd" && odd?.signal === signal ? odd.pair : expected;
   const asking = marking.asking !== null;
+  const filming = way.way === "clip" && !way.clip && !asking;
+  const first = place === 1 && board.place === 1;
 
   const acts = () => {
     if (asking)
       return <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />;
-    if (board.view === "odd") {
-      return (
-        <OddLamp
-          expected={expected}
-          pair={pair}
-          onPair={(next) => setOdd({ signal, pair: next })}
-          onSave={() => board.odd(pair)}
-          onBack={board.back}
-        />
-      );
+    if (filming) return <ClipMarker onDone={way.setClip} onBack={() => way.choose("plain")} />;
+    switch (board.view) {
+      case "how":
+        return (
+          <WayQuestion
+            onWay={(next) => {
+              way.choose(next);
+              board.back();
+            }}
+          />
+        );
+      case "odd":
+        return (
+          <OddLamp
+            expected={expected}
+            pair={pair}
+            onPair={(next) => setOdd({ signal, pair: next })}
+            onSave={() => board.odd(pair)}
+            onBack={board.back}
+          />
+        );
+      case "whole":
+        return (
+          <Question id="whole" title={words.wholeTitle}>
+            <MarkButtons check={check} first={first} marking={marking} />
+            <Button variant="quiet" onClick={board.back}>
+              {words.wholeBack}
+            </Button>
+          </Question>
+        );
+      case "signal":
+        return (
+          <div className="flex flex-col gap-2.5">
+            {way.way === "clock" && (
+              <>
+                {way.script.state.phase === "idle" && <p className="px-1 text-base">{words.clockHow}</p>}
+                <ScriptBar
+                  state={way.script.state}
+                  onStart={way.script.start}
+                  onStop={way.script.stop}
+                  hold={way.hold}
+                  onHold={way.setHold}
+                />
+              </>
+            )}
+            <SignalButtons
+              check={check}
+              board={board}
+              first={first}
+              onOdd={() => {
+                // Saying what is odd takes longer than a signal is held.
+                way.script.stop();
+                board.show("odd");
+              }}
+            />
+          </div>
+        );
     }
-    if (board.view === "whole") {
-      return (
-        <Question id="whole" title={words.wholeTitle}>
-          <MarkButtons check={check} first={place === 1} marking={marking} />
-          <Button variant="quiet" onClick={board.back}>
-            {words.wholeBack}
-          </Button>
-        </Question>
-      );
-    }
-    return <SignalButtons check={check} board={board} first={place === 1 && board.place === 1} />;
   };
 
   return (
@@ -64,13 +108,21 @@ export function LampScreen(props: CheckScreenProps) {
       count={words.place(board.place, signals.length)}
       announce={words.announce(signal, expected.left, expected.right)}
       picture={
-        <div className="relative min-h-44 flex-1">
-          <div className="absolute inset-0 flex justify-center *:h-full *:w-auto *:max-w-full">
-            <LampsDrawing {...pair} separate={check.lamps?.layout === "separate" ? signal : undefined} />
-          </div>
-        </div>
+        !filming && (
+          <LampPicture
+            pair={pair}
+            signal={signal}
+            separate={check.lamps?.layout === "separate"}
+            arms={way.way === "arms" && board.view === "signal"}
+            clip={way.clip}
+          />
+        )
       }
-      says={<SignalWords check={check} board={board} quiet={asking} />}
+      says={
+        !filming && (
+          <SignalWords check={check} board={board} quiet={asking} running={way.following !== null} />
+        )
+      }
       acts={acts()}
     />
   );

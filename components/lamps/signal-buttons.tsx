@@ -6,10 +6,10 @@ import type { Board } from "./board";
 
 const third = "min-w-23 flex-1";
 
-type SignalButtonsProps = { check: Check; board: Board; first: boolean };
+type SignalButtonsProps = { check: Check; board: Board; first: boolean; onOdd: () => void };
 
 /** The answers to one signal. */
-export function SignalButtons({ check, board, first }: SignalButtonsProps) {
+export function SignalButtons({ check, board, first, onOdd }: SignalButtonsProps) {
   return (
     <div className="flex flex-col gap-2.5">
       <div className="by-hand flex flex-wrap gap-2.5">
@@ -24,7 +24,7 @@ export function SignalButtons({ check, board, first }: SignalButtonsProps) {
         <Button
           variant={check.effect === "hold" ? "fault-hold" : "fault-fix"}
           className="min-w-25 flex-1"
-          onClick={() => board.show("odd")}
+          onClick={onOdd}
         >
           {words.odd}
         </Button>
@@ -40,6 +40,11 @@ export function SignalButtons({ check, board, first }: SignalButtonsProps) {
           {words.again}
         </Button>
       </div>
+      {board.place === 1 && (
+        <Button variant="quiet" onClick={() => board.show("how")}>
+          {words.how}
+        </Button>
+      )}
     </div>
   );
 }

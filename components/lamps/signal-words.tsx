@@ -8,10 +8,12 @@ type SignalWordsProps = {
   board: Board;
   /** A question stands below, and has the focus. */
   quiet: boolean;
+  /** A script goes from signal to signal. */
+  running: boolean;
 };
 
 /** The signal in a big word, what the driver does for it, and what comes next. */
-export function SignalWords({ check, board, quiet }: SignalWordsProps) {
+export function SignalWords({ check, board, quiet, running }: SignalWordsProps) {
   const heading = useRef<HTMLHeadingElement>(null);
   const { signal, next, view } = board;
   useEffect(() => {
@@ -29,7 +31,9 @@ export function SignalWords({ check, board, quiet }: SignalWordsProps) {
       {!quiet && (
         <>
           <p className="pt-1 text-soft md:text-xl">{words.driver[signal]}</p>
-          <p className="pt-1 text-base text-soft">{words.next(next)}</p>
+          <p className="pt-1 text-base text-soft">
+            {running && board.answered ? words.answered : words.next(next)}
+          </p>
           {check.lamps?.layout === "separate" && <p className="pt-1 text-base text-soft">{words.separate}</p>}
         </>
       )}

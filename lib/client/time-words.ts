@@ -58,3 +58,8 @@ export function inFours(text: string): string[] {
 export function clockTimeText(ms: number): string {
   return format(ms, "HH:mm");
 }
+
+/** The time of day to the second, for two clocks that are compared. */
+export function secondsTimeText(ms: number): string {
+  return format(ms, "HH:mm:ss");
+}

@@ -9,6 +9,7 @@ test.describe("headers", () => {
       const policy = headers["content-security-policy"] ?? "";
       for (const part of [
         "default-src 'self'",
+        "media-src 'self' blob:",
         "object-src 'none'",
         "base-uri 'none'",
         "frame-ancestors 'none'",

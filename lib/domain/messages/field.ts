@@ -52,6 +52,7 @@ export const fieldWords = {
     reading: "Reading what is kept on this phone",
     who: (name: string, organisation: string) => `${name}, ${organisation}`,
     desk: "Desk",
+    prompter: "Lamp prompter for the driver’s phone",
     signIn: "Sign in",
     never: "No walk yet",
     last: (kind: Purpose, when: string) => `${lower(purpose[kind])}, ${when}`,
@@ -64,7 +65,6 @@ export const fieldWords = {
     another: "Or start another walk",
     openFinding: (since: string, ask: string) => `Do not tow: open finding since ${since}. ${ask}`,
     openFix: (since: string, ask: string) => `Fix soon: open finding since ${since}. ${ask}`,
-    notStarted: "The walk was not started: this phone did not save it. Try again.",
   },
 
   none: {
@@ -128,7 +128,6 @@ export const fieldWords = {
     announce: (saved: Outcome | null, station: string, place: number, total: number) =>
       `${saved ? `${outcome[saved]}, saved. ` : ""}${station}, ${place} of ${total}.`,
     caution: "Caution",
-    notSaved: "Not saved. This phone did not keep the mark. Tap again; if it stays so, free some space.",
     movedOn: "Not saved. Another tab wrote to this walk. Reload this page and go on from there.",
     strip: (parts: { total: number; lookedAt: number; holds: number; fixes: number }) =>
       [
@@ -165,7 +164,6 @@ export const fieldWords = {
     callOff: "Call it off…",
     lastCheck: "Back to the last check",
     leave: "Back to rigs, the walk stays open",
-    notSaved: "Not closed. This phone did not save it. Try again; if it stays so, free some space.",
   },
 
   result: {

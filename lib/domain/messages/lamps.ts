@@ -40,6 +40,16 @@ export const lampBoardWords = {
   odd: "Odd",
   again: "Whole check…",
   how: "With two, or alone…",
+  howTitle: "How are the signals given?",
+  ways: {
+    clock: "A second phone prompts the driver",
+    arms: "By arm signals",
+    clip: "Alone, from a filmed clip",
+    plain: "By calling out",
+  },
+  clockHow:
+    "On the driver’s phone, at the foot of Rigs: “Lamp prompter”. Both phones start at the same half minute.",
+  answered: "Answered. The next signal comes by itself.",
   separate: "Two lamps a side: turn above, stop and tail below.",
   oddTitle: "Which lamp is not as drawn?",
   oddWhat: (which: Lamp) => `${lamp[which]}: what does it do?`,
