@@ -55,7 +55,7 @@ function Row({ step: { check, station, place }, first }: { step: Step; first: bo
         <span aria-hidden="true" className="w-16 shrink-0 print:w-12">
           <PartDrawing part={check.part} side={check.side} drawn={check.drawn} size="small" />
         </span>
-        <span className="min-w-0 flex-[1_1_14rem]">
+        <span className="min-w-0 flex-[1_1_min(100%,14rem)]">
           <span className="block font-semibold">
             {check.ask} <span className="font-normal">({words[check.effect]})</span>
           </span>
@@ -64,7 +64,7 @@ function Row({ step: { check, station, place }, first }: { step: Step; first: bo
             {words.noted}
           </span>
         </span>
-        <span className="grid shrink-0 grid-cols-4 gap-x-2 text-center text-sm leading-tight print:text-[7pt]">
+        <span className="flex max-w-full flex-wrap gap-x-2 gap-y-1 text-center text-sm leading-tight print:text-[7pt]">
           {outcomes.map((outcome) => (
             <span key={outcome} className="flex w-14 flex-col items-center gap-1 print:w-11">
               <span className="size-8 border-2 border-ink print:size-6" />
@@ -79,7 +79,7 @@ function Row({ step: { check, station, place }, first }: { step: Step; first: bo
 
 function Line({ label }: { label: string }) {
   return (
-    <span className="flex min-w-56 flex-1 items-end gap-2">
+    <span className="flex min-w-[min(100%,14rem)] flex-1 items-end gap-2">
       {label} <span className="flex-1 border-b-2 border-ink" />
     </span>
   );

@@ -14,8 +14,7 @@ import { useBoard } from "./board";
 import { ClipMarker } from "./clip-marker";
 import { LampPicture } from "./lamp-picture";
 import { OddLamp } from "./odd-lamp";
-import { ScriptBar } from "./script-bar";
-import { SignalButtons } from "./signal-buttons";
+import { SignalActs } from "./signal-acts";
 import { SignalWords } from "./signal-words";
 import { useWay } from "./way";
 import { WayQuestion } from "./way-question";
@@ -73,30 +72,17 @@ export function LampScreen(props: CheckScreenProps) {
         );
       case "signal":
         return (
-          <div className="flex flex-col gap-2.5">
-            {way.way === "clock" && (
-              <>
-                {way.script.state.phase === "idle" && <p className="px-1 text-base">{words.clockHow}</p>}
-                <ScriptBar
-                  state={way.script.state}
-                  onStart={way.script.start}
-                  onStop={way.script.stop}
-                  hold={way.hold}
-                  onHold={way.setHold}
-                />
-              </>
-            )}
-            <SignalButtons
-              check={check}
-              board={board}
-              first={first}
-              onOdd={() => {
-                // Saying what is odd takes longer than a signal is held.
-                way.script.stop();
-                board.show("odd");
-              }}
-            />
-          </div>
+          <SignalActs
+            check={check}
+            board={board}
+            first={first}
+            way={way}
+            onOdd={() => {
+              // Saying what is odd takes longer than a signal is held.
+              way.script.stop();
+              board.show("odd");
+            }}
+          />
         );
     }
   };

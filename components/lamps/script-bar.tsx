@@ -28,6 +28,11 @@ export function ScriptBar({ state, onStart, onStop, hold, onHold }: ScriptBarPro
       </div>
     );
   }
+  const stop = (
+    <Button variant="quiet" className="px-5" onClick={onStop}>
+      {words.stop}
+    </Button>
+  );
   return (
     <div className="flex flex-col gap-3">
       {state.phase === "waiting" ? (
@@ -35,14 +40,15 @@ export function ScriptBar({ state, onStart, onStop, hold, onHold }: ScriptBarPro
       ) : (
         <>
           <CountdownBar leftMs={state.leftMs} holdMs={state.holdMs} />
-          <p className="text-xl text-soft">
-            {state.next ? words.next(lampScriptWords.signal[state.next].name) : words.last}
-          </p>
+          <div className="flex flex-wrap items-center justify-between gap-x-4">
+            <p className="text-xl text-soft">
+              {state.next ? words.next(lampScriptWords.signal[state.next].name) : words.last}
+            </p>
+            {stop}
+          </div>
         </>
       )}
-      <Button variant="quiet" onClick={onStop}>
-        {words.stop}
-      </Button>
+      {state.phase === "waiting" && stop}
     </div>
   );
 }

@@ -40,11 +40,6 @@ export function SignalButtons({ check, board, first, onOdd }: SignalButtonsProps
           {words.again}
         </Button>
       </div>
-      {board.place === 1 && (
-        <Button variant="quiet" onClick={() => board.show("how")}>
-          {words.how}
-        </Button>
-      )}
     </div>
   );
 }

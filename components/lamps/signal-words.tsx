@@ -31,9 +31,9 @@ export function SignalWords({ check, board, quiet, running }: SignalWordsProps) 
       {!quiet && (
         <>
           <p className="pt-1 text-soft md:text-xl">{words.driver[signal]}</p>
-          <p className="pt-1 text-base text-soft">
-            {running && board.answered ? words.answered : words.next(next)}
-          </p>
+          {(!running || board.answered) && (
+            <p className="pt-1 text-base text-soft">{running ? words.answered : words.next(next)}</p>
+          )}
           {check.lamps?.layout === "separate" && <p className="pt-1 text-base text-soft">{words.separate}</p>}
         </>
       )}

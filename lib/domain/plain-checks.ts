@@ -38,7 +38,7 @@ export const receiverPins = hold({
 export const basePlate = hold({
   key: "base-plate",
   part: "base-plate",
-  ask: "Base plate: nothing loose, no crack",
+  ask: "Base plate: none loose, no crack",
   how: "Take each tab by hand, push down and pull up. The car may rise on its springs; the plate itself does not move. Look at the paint around the fasteners.",
   why: "Everything between the vehicles hangs on this plate, the safeguards too.",
   mend: "Do not tighten it by feel. The plate’s own manual has the way, and a crack is not mended at a campsite.",
@@ -95,7 +95,7 @@ export const airLine = hold({
 export const steering = hold({
   key: "steering-free",
   part: "steering",
-  ask: "Steering wheel turns, does not lock",
+  ask: "Steering wheel turns both ways",
   how: "Turn the wheel by hand a little both ways. The column does not catch.",
   why: "A locked column drags the front tires sideways until they come apart.",
   mend: "Compare key and selector with the manual’s page again.",
@@ -105,7 +105,7 @@ export const steering = hold({
 export const chocksOut = hold({
   key: "chocks-out",
   part: "parking-brake",
-  ask: "Car’s parking brake off, chocks out",
+  ask: "Parking brake off, chocks out",
   how: "The bar is attached. The lamp of the car’s parking brake is dark, and no chock is left at a wheel.",
   why: "A brake that stays on burns within a few miles, and nobody in the coach feels it.",
   mend: "Release it and look at the lamp again. Stow the chocks where they are counted.",

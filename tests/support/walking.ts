@@ -82,9 +82,10 @@ export async function walkOn(
   until: RegExp = ends,
 ): Promise<void> {
   const button = page.getByRole("button", { name: answers });
+  const end = page.getByRole("button", { name: until });
   for (;;) {
-    await button.first().waitFor();
-    if (await page.getByRole("button", { name: until }).isVisible()) return;
+    await button.or(end).first().waitFor();
+    if (await end.first().isVisible()) return;
     const before = await asking(page);
     const name = await button.first().innerText();
     await tap(page, good.test(name) ? answer(await ask(page).innerText()) : firstWords(name));
