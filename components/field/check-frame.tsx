@@ -55,7 +55,9 @@ export function CheckFrame({ recorder, view, walk, steps, step, marking, ...part
       acts={
         <>
           <p role="status" className="sr-only">
-            {words.announce(marking.saved, station.title, place, steps.length)} {parts.announce}
+            {[words.announce(marking.saved, station.title, place, steps.length), parts.announce]
+              .filter(Boolean)
+              .join(" ")}
           </p>
           <SaveTrouble error={marking.error} held={recorder.held} />
           {parts.acts}

@@ -23,6 +23,7 @@ const words = walkingWords.resume;
 
 /** So short that the person may well not have been away at all. */
 const MOMENT_MS = 2 * 60_000;
+const SAYABLE_MS = 2_000;
 
 type ResumeScreenProps = {
   recorder: Recorder;
@@ -39,7 +40,7 @@ export function ResumeScreen({ recorder, view, walk, steps, interruption }: Resu
   const again = againAfterBreak(view.document, keys, false);
   const cabin = cabinMarks(view.document, keys).length > 0;
   const { kind, awayMs } = interruption;
-  const away = awayMs === null ? null : durationText(awayMs);
+  const away = awayMs === null || awayMs < SAYABLE_MS ? null : durationText(awayMs);
   const next = nextStep(steps, marks, null);
   const heading = useRef<HTMLHeadingElement>(null);
   const settled = useSettled("resume");

@@ -93,11 +93,35 @@ function marksByCheck(entries: readonly Entry[]): Map<string, Marks> {
     if (mark) {
       const { seq, at, elapsedMs } = entry;
       const standing = { ...mark, seq, at, elapsedMs, tookMs: Math.max(0, elapsedMs - beforeMs) };
-      marks.set(mark.check, { standing, earlier: past(marks.get(mark.check)) });
+      const before = marks.get(mark.check);
+      if (before?.standing && goesOn(before.standing, mark)) {
+        const tookMs = before.standing.tookMs + standing.tookMs;
+        marks.set(mark.check, { standing: { ...standing, tookMs }, earlier: before.earlier });
+      } else {
+        marks.set(mark.check, { standing, earlier: past(before) });
+      }
     }
     beforeMs = entry.elapsedMs;
   }
   return marks;
+}
+
+/**
+ * Whether a mark only goes on from the one before: more was said of the same outcome, or one more signal was seen on a
+ * lamp board. Such a mark takes the other's place; a changed mind stands beside it.
+ */
+function goesOn(before: MarkBody, after: MarkBody): boolean {
+  const signals = Object.entries(before.seen ?? {});
+  const keepsSeen = signals.every(
+    ([signal, pair]) =>
+      JSON.stringify(after.seen?.[signal as keyof typeof after.seen]) === JSON.stringify(pair),
+  );
+  if (before.outcome === "unseen" && signals.length > 0) return keepsSeen;
+  const saysMore =
+    after.note !== before.note ||
+    (after.measured !== undefined && before.measured === undefined) ||
+    Object.keys(after.seen ?? {}).length > signals.length;
+  return before.outcome === after.outcome && keepsSeen && saysMore;
 }
 
 function past(marks: Marks | undefined): ReadMark[] {

@@ -151,6 +151,41 @@ describe("marks and what stood before them", () => {
     expect([read.segment, read.tookMs]).toEqual(["good", 30_000]);
   });
 
+  test.each<[string, Step[], number, number]>([
+    [
+      "the same with what is wrong",
+      [mark("pin", "fault", 4_000), mark("pin", "fault", 9_000, { note: "clip" })],
+      0,
+      9_000,
+    ],
+    [
+      "a lamp board, signal by signal",
+      [
+        mark("pin", "unseen", 2_000, { seen: { tail: { left: "steady" } } }),
+        mark("pin", "good", 5_000, { seen: { tail: { left: "steady" }, stop: { left: "steady" } } }),
+      ],
+      0,
+      5_000,
+    ],
+    [
+      "a lamp that was said to do something else",
+      [
+        mark("pin", "fault", 2_000, { seen: { tail: { left: "dark" } } }),
+        mark("pin", "good", 5_000, { seen: { tail: { left: "steady" } } }),
+      ],
+      1,
+      5_000,
+    ],
+    ["could not see, then good", [mark("pin", "unseen", 2_000), mark("pin", "good", 5_000)], 1, 5_000],
+    ["the same again, nothing added", [mark("pin", "good", 2_000), mark("pin", "good", 5_000)], 1, 5_000],
+  ])(
+    "a mark that only goes on takes the other's place, a changed mind does not: %s",
+    (_, steps, earlier, tookMs) => {
+      const { checks } = readWalk(document, walk(steps)).stations[0]!;
+      expect(checks[0]).toMatchObject({ tookMs, earlier: { length: earlier } });
+    },
+  );
+
   test("a resume voids a mark: none stands, the voided one is kept", () => {
     const read = pin(walk([mark("pin", "good", 4_000), ["resume", { again: ["pin", "cables"] }, 5_000]]));
     expect([read.mark, read.segment, read.earlier.length]).toEqual([null, "todo", 1]);

@@ -2,7 +2,7 @@ import { appendFileSync, readFileSync, writeFileSync } from "node:fs";
 import AxeBuilder from "@axe-core/playwright";
 import type { BrowserContext, Page } from "@playwright/test";
 import { expect, test } from "../support/product";
-import { callOff } from "../support/walking";
+import { callOff, tap } from "../support/walking";
 import type { Product } from "../support/product-process";
 
 const DRIVER = "driver@demo.example";
@@ -448,6 +448,7 @@ test("a tab with a walk keeps its page and goes on when the worker changes under
     await mark(page);
     expect(await stained(page)).toBe(true);
     await page.reload();
+    await tap(page, /^Only the phone was away/);
     await expect(page.getByText(/^4 of \d+$/)).toBeVisible();
   });
 });
