@@ -71,7 +71,8 @@ test("a second phone prompts the driver in step with the board", async ({ page, 
   await tap(page, /^A second phone/);
   for (const each of [page, prompter]) await each.clock.install();
   // Ten seconds past a minute: both wait for the same half minute.
-  for (const each of [page, prompter]) await each.clock.pauseAt(new Date("2026-12-01T10:00:10Z"));
+  const minuteMs = (Math.ceil(Date.now() / 60_000) + 1) * 60_000;
+  for (const each of [page, prompter]) await each.clock.pauseAt(minuteMs + 10_000);
   const start = async (each: Page) => {
     await each.clock.runFor(700);
     await each.getByRole("button", { name: /^Start together/ }).click();
@@ -85,7 +86,7 @@ test("a second phone prompts the driver in step with the board", async ({ page, 
   ] as const) {
     for (const each of [page, prompter]) {
       const nowMs = await each.evaluate(() => Date.now());
-      await each.clock.runFor(new Date("2026-12-01T10:00:00Z").getTime() + at - nowMs);
+      await each.clock.runFor(minuteMs + at - nowMs);
     }
     await expect(ask(page)).toHaveText(shown);
     await expect(prompter.getByText(shown.split(" ")[0]!).first()).toBeVisible();

@@ -104,7 +104,7 @@ test("signed in to an account instead: the rig stays on this phone, beside the a
   await local.getByRole("button", { name: /^Hook-up/ }).click();
   await tap(page, /^Fault/);
   await page.reload();
-  await expect(page.getByText(/^2 of \d+$/)).toBeVisible();
+  await expect(page.getByText(/^It waits at 2 of \d+/)).toBeVisible();
 });
 
 test("the answers can be gone back over, and what the manual says is asked for in words", async ({
@@ -191,7 +191,11 @@ test("large text on a small screen: nothing is wider than it, and every target i
     await page.evaluate(() => document.documentElement.style.setProperty("font-size", "200%"));
     const { over, low } = await page.evaluate(() => ({
       over: document.documentElement.scrollWidth - innerWidth,
-      low: [...document.querySelectorAll("main button, main a, main input, main textarea")]
+      low: [
+        ...document.querySelectorAll(
+          "main button, main a, main label:has(input), main input:not([type=radio]), main textarea",
+        ),
+      ]
         .filter((each) => each.getBoundingClientRect().height < 72)
         .map((each) => each.textContent),
     }));
