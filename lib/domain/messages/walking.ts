@@ -111,7 +111,6 @@ export const walkingWords = {
     whenHint: "As written on the card. Leave it empty if it is not.",
     start: "Enter the marks",
     untimed: "from paper",
-    untimedNote: "from paper, untimed",
     noteOf: (when: string) => `Walked on paper, ${when}.`,
     noteUnknown: "Walked on paper, when was not written.",
     cardTitle: (kind: Purpose, rig: string) => `${purpose[kind]}: ${rig}`,
