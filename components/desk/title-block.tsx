@@ -22,7 +22,7 @@ export function TitleBlock({ reading }: { reading: WalkReading }) {
         <Instant at={walk.receivedAt} />
       </Box>
       <Box label={walkWords.time}>
-        <span className="tabular text-[0.9375em]">{clockText(elapsedMs)}</span>
+        <span className="tabular text-[0.9375em]">{paper ? walkWords.untimed : clockText(elapsedMs)}</span>
       </Box>
       <Box label={walkWords.depth}>
         {paper ? `${depthWords[depth]}, ${walkWords.paper}` : depthWords[depth]}

@@ -1,4 +1,5 @@
 import { clockText, durationText } from "@/lib/client/time-words";
+import { bodyOf } from "@/lib/domain/entry";
 import type { WalkReading } from "@/lib/domain/history";
 import { deskWords, walkWords } from "@/lib/domain/messages/desk";
 import { photosByCheck } from "@/lib/domain/photo";
@@ -19,13 +20,19 @@ export function WalkView({ reading }: { reading: WalkReading }) {
   const read = readWalk(reading.document, entries);
   const shown = new Set(read.stations.flatMap(({ checks }) => checks.map(({ check }) => check.key)));
   const photos = photosByCheck(reading.photos, shown);
+  // A card that was filled in by hand keeps no time.
+  const paper = entries[0] && bodyOf(entries[0], "open")?.source === "paper";
   const title = walkWords.title(reading.walk.purpose, reading.names.rig);
   return (
     <>
       <title>{`${title} · ${deskWords.brand}`}</title>
       <DeskHeading over={<ToHistory />} title={title} />
       <TitleBlock reading={reading} />
-      <WalkVerdict reading={reading} read={read} took={durationText(reading.elapsedMs)} />
+      <WalkVerdict
+        reading={reading}
+        read={read}
+        took={paper ? walkWords.untimed : durationText(reading.elapsedMs)}
+      />
       <div className="mt-8 grid gap-x-10 gap-y-10 grid-cols-1 @4xl:grid-cols-[minmax(0,1fr)_23rem]">
         <div className="min-w-0">
           <StationList stations={read.stations} photos={photos} />
@@ -33,7 +40,7 @@ export function WalkView({ reading }: { reading: WalkReading }) {
           <WalkPhotos photos={photos.get(null) ?? []} />
         </div>
         <div className="flex min-w-0 flex-col gap-8">
-          <TimeBars stations={read.stations} total={clockText(reading.elapsedMs)} />
+          {!paper && <TimeBars stations={read.stations} total={clockText(reading.elapsedMs)} />}
           <SealBlock reading={reading} clock={clockRemark(reading.entries)} />
         </div>
       </div>

@@ -138,6 +138,7 @@ export const walkWords = {
   time: "Walking time",
   rigSheet: "Rig sheet",
   paper: "Copied from a paper list",
+  untimed: "untimed",
   closedAs: (verdict: Verdict) =>
     `Closed on the phone as “${verdictWords[verdict]}”. The server’s replay of the same entries differs and is what you see.`,
   stillOpen: (entries: number) => `Still open, ${plural(entries, "entry", "entries")} so far`,

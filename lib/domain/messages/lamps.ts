@@ -92,12 +92,11 @@ export const brakeIdleWords = {
     yes: "Both idle",
     no: "Not both",
   },
-  back: "Back one",
   whole: "Whole check…",
   notes: {
     lamps: "Idle shown by the stop lamps: lit with the pedal pressed, dark with it up.",
     looks:
-      "Not shown by lamps: they did not light with the pedal pressed. Pedal fully up, unit and monitor idle. Feel the wheels at the first stop.",
+      "Not shown by lamps: they were not seen to light with the pedal pressed. Pedal fully up, unit and monitor idle. Feel the wheels at the first stop.",
     lit: "Stop lamps lit with the pedal up.",
     pedal: "Pedal not all the way up.",
     idle: "Unit and monitor not both idle.",
