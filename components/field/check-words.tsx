@@ -11,11 +11,15 @@ import { segmentOf } from "@/lib/domain/walk-reading";
 type CheckWordsProps = {
   check: Check;
   mark: MarkBody | undefined;
+  /** The fault that was marked before and is not answered yet. */
+  before?: MarkBody;
+  /** The marks stand on a card and are only copied. */
+  copying?: boolean;
   marking: Marking;
 };
 
 /** What a check asks, how to look, what can happen, and the mark that it has already. */
-export function CheckWords({ check, mark, marking }: CheckWordsProps) {
+export function CheckWords({ check, mark, before, copying = false, marking }: CheckWordsProps) {
   // While a question stands below, the focus is there.
   const asking = marking.asking !== null;
   const ask = useRef<HTMLHeadingElement>(null);
@@ -31,13 +35,20 @@ export function CheckWords({ check, mark, marking }: CheckWordsProps) {
       >
         {check.ask}
       </h2>
-      {!asking && <p className="px-4 pt-1 text-soft md:text-xl">{check.how}</p>}
+      {!asking && (
+        <p className="px-4 pt-1 text-soft md:text-xl">{copying ? walkingWords.paper.copy : check.how}</p>
+      )}
+      {!mark && before && !asking && (
+        <p className="px-4 pt-2 font-semibold">
+          {before.note ? walkingWords.details.before(before.note) : walkingWords.details.beforeBare}
+        </p>
+      )}
       {mark && !asking && (
         <div className="flex flex-wrap items-center gap-x-3 px-4 pt-2">
           <span aria-hidden="true" className="tape flex h-6.5 w-4">
             <span className={`tape-seg tape-${segmentOf(check, mark.outcome)}`} />
           </span>
-          <p className="min-w-0 flex-1 font-semibold">
+          <p className="min-w-0 flex-[1_1_12rem] font-semibold">
             {fieldWords.walk.marked(mark.outcome)}
             {mark.note && <span className="block text-base font-normal text-soft">{mark.note}</span>}
             {mark.measured && <Reading {...(mark.measured.entered ?? mark.measured)} />}
@@ -55,7 +66,7 @@ export function CheckWords({ check, mark, marking }: CheckWordsProps) {
       {check.why && !asking && (
         <p className="mx-4 mt-5 hidden border-t-hair border-rule pt-4 text-soft md:block">{check.why}</p>
       )}
-      {check.caution && !asking && (
+      {check.caution && !asking && !copying && (
         <div className="pt-3">
           <Notice>{check.caution}</Notice>
         </div>

@@ -81,7 +81,12 @@ export function ClosingScreen({ recorder, view, walk, steps }: ClosingScreenProp
             {words.goOn}
           </Button>
         ) : (
-          <Button variant="good" hint={words.final} className="col-span-full text-[1.75rem]" onClick={close}>
+          <Button
+            variant="good"
+            hint={words.final(verdict)}
+            className="col-span-full text-[1.75rem]"
+            onClick={close}
+          >
             {words.closeAndSign}
           </Button>
         )}

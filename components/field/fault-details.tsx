@@ -1,4 +1,4 @@
-import { useState, type FormEvent } from "react";
+import { useEffect, useEffectEvent, useState } from "react";
 import { Button } from "@/components/ui/button";
 import { TextField } from "@/components/ui/text-field";
 import type { Recorder } from "@/lib/client/recorder";
@@ -13,18 +13,31 @@ import { plainText } from "./walk-plan";
 
 const words = walkingWords.details;
 
-type FaultDetailsProps = { recorder: Recorder; check: Check; callouts: Callouts; marking: Marking };
+/** How long the typing rests before the words are kept. */
+const PAUSE_MS = 700;
+
+type FaultDetailsProps = {
+  recorder: Recorder;
+  check: Check;
+  callouts: Callouts;
+  marking: Marking;
+  onMended?: () => void;
+};
 
 /** After a fault is saved: what is wrong, by touch or in words. None of it is needed to go on. */
-export function FaultDetails({ recorder, check, callouts, marking }: FaultDetailsProps) {
+export function FaultDetails({ recorder, check, callouts, marking, onMended }: FaultDetailsProps) {
   const called = callouts.all.length > 0;
   const [text, setText] = useState(callouts.own);
-  const keep = (event: FormEvent) => {
-    event.preventDefault();
-    void callouts.say(plainText(text));
-  };
+  const said = plainText(text);
+  const { own, say } = callouts;
+  const keep = useEffectEvent(() => void say(said));
+  useEffect(() => {
+    if (said === own) return;
+    const timer = setTimeout(keep, PAUSE_MS);
+    return () => clearTimeout(timer);
+  }, [said, own]);
   const goOn = async () => {
-    if (plainText(text) !== callouts.own) await callouts.say(plainText(text));
+    if (said !== own) await say(said);
     marking.skip();
   };
   return (
@@ -40,7 +53,7 @@ export function FaultDetails({ recorder, check, callouts, marking }: FaultDetail
       <Button variant="good" onClick={goOn}>
         {words.goOn}
       </Button>
-      <form onSubmit={keep} className="flex flex-col gap-2.5 pt-2">
+      <div className="pt-2">
         <TextField
           size="field"
           label={words.own}
@@ -50,15 +63,14 @@ export function FaultDetails({ recorder, check, callouts, marking }: FaultDetail
           enterKeyHint="done"
           onChange={(event) => setText(event.target.value)}
         />
-        {plainText(text) !== callouts.own && <Button type="submit">{words.keep}</Button>}
-      </form>
+      </div>
       <CheckPhotos recorder={recorder} check={check.key} />
       <div className="acts-two">
         <Button variant="quiet" onClick={() => marking.mark("good", { because: "mis-tap" })}>
           {words.misTap}
         </Button>
         {check.effect === "hold" && (
-          <Button variant="quiet" onClick={() => marking.ask("what")}>
+          <Button variant="quiet" onClick={onMended ?? (() => marking.ask("what"))}>
             {words.mended}
           </Button>
         )}

@@ -1,9 +1,7 @@
+import { oddLines } from "@/components/lamps/odd-lines";
 import { PartDrawing } from "@/components/drawings/part-drawing";
 import type { MarkBody } from "@/lib/domain/entry";
-import { signals } from "@/lib/domain/entry";
-import { isAsDrawn, type Seen } from "@/lib/domain/lamp-board";
 import { fieldWords } from "@/lib/domain/messages/field";
-import { lampBoardWords } from "@/lib/domain/messages/lamps";
 import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
 import { KeptPhotos } from "./check-photos";
@@ -21,8 +19,8 @@ export function FindingRow({ walk, check, absent = false, mark }: FindingRowProp
       </div>
       <div>
         <h4 className="text-xl leading-tight font-extrabold">{check.ask}</h4>
-        {mark?.note && <p className="mt-1 font-semibold">{words.seen(mark.note)}</p>}
-        {oddSignals(check, mark?.seen ?? {}).map((line) => (
+        {mark?.note && <p className="mt-1 font-semibold">{mark.note}</p>}
+        {oddLines(check, mark?.seen ?? {}).map((line) => (
           <p key={line} className="mt-1 font-semibold">
             {line}
           </p>
@@ -41,13 +39,4 @@ export function FindingRow({ walk, check, absent = false, mark }: FindingRowProp
       </div>
     </li>
   );
-}
-
-/** What the lamps did where that was not as drawn. */
-function oddSignals(check: Check, seen: Seen): string[] {
-  return signals.flatMap((signal) => {
-    const pair = seen[signal];
-    if (!pair || isAsDrawn(check, signal, pair)) return [];
-    return [lampBoardWords.seen(signal, pair.left, pair.right)];
-  });
 }

@@ -2,6 +2,7 @@ import { useLayoutEffect, useRef, useState } from "react";
 import { feel } from "@/lib/client/feel";
 import type { Recorder } from "@/lib/client/recorder";
 import type { MarkBody, Outcome } from "@/lib/domain/entry";
+import { touchedByMending } from "@/lib/domain/interruption";
 import { CLOSING, moveTo } from "./address";
 import { useSettled } from "./settling";
 import { needsReason, nextStep, stepBefore, type Step } from "./walk-plan";
@@ -58,7 +59,7 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
   const takes = () => settled() && !saving.current;
 
   /** @returns whether the phone kept it */
-  const save = async (outcome: Outcome, more: Partial<MarkBody>): Promise<boolean> => {
+  const save = async (outcome: Outcome, more: Partial<MarkBody>, whole = true): Promise<boolean> => {
     saving.current = true;
     try {
       await recorder.mark(key, outcome, more);
@@ -69,9 +70,14 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
       return false;
     }
     setTrouble(null);
-    setSaved(outcome);
-    feel(outcome !== "fault" ? "saved" : check.effect === "hold" ? "hold" : "fault");
+    setSaved(whole ? outcome : null);
+    feel(!whole || outcome !== "fault" ? "saved" : check.effect === "hold" ? "hold" : "fault");
     return true;
+  };
+  /** What was mended here may have changed what was looked at before. */
+  const askTouched = async () => {
+    const again = touchedByMending(recorder.view().document, key, [...state().marks.keys()]);
+    if (again.length > 0) await recorder.resume(again).catch(() => {});
   };
   const stay = (next: Question) => {
     saving.current = false;
@@ -90,21 +96,22 @@ export function useMarking(recorder: Recorder, steps: readonly Step[], step: Ste
       if (then) moveTo({ walk, at: key });
       if (!(await save(outcome, { ...(more.because && pending.current), ...more }))) return;
       if (then) return stay(then);
+      if (more.because?.startsWith("fixed")) await askTouched();
       show(nextStep(steps, state().marks, key));
     },
     async keep(outcome, more) {
       if (saving.current) return;
       moveTo({ walk, at: key });
-      await save(outcome, more);
+      await save(outcome, more, false);
       saving.current = false;
     },
     async amend(more) {
       const mark = state().marks.get(key);
-      if (!mark || saving.current) return;
+      if (!mark) return;
       const { outcome, measured, seen, because, note } = mark;
       const kept = { measured, seen, because, note };
       const known = Object.entries({ ...kept, ...more }).filter(([, value]) => value !== undefined);
-      await save(outcome, Object.fromEntries(known));
+      await save(outcome, Object.fromEntries(known), false);
       saving.current = false;
     },
     back() {

@@ -61,10 +61,15 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           <h2 id={title} className="text-[1.75rem] leading-[1.1] font-extrabold tracking-[-0.01em]">
             {rig.name}
           </h2>
-          <LastVerdict last={last} />
-          <div className="-mx-4">
-            <Stale last={last} kept={last?.kept ?? null} />
-          </div>
+          {/* While a walk is open, what an earlier one came to would speak against it. */}
+          {open.length === 0 && (
+            <>
+              <LastVerdict last={last} />
+              <div className="-mx-4">
+                <Stale last={last} kept={last?.kept ?? null} />
+              </div>
+            </>
+          )}
           <OpenFindings rig={rig} />
           <div className={`mt-auto max-w-md pt-4 @2xl:block ${alone ? "" : "hidden"}`}>
             <RigPicture />

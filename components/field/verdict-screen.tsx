@@ -11,6 +11,7 @@ import { BottomBar } from "./bottom-bar";
 import { startWalk } from "./browser-field";
 import { Custody } from "./custody";
 import { Findings } from "./findings";
+import { Mended } from "./mended";
 import { OpenFindings } from "./open-findings";
 import { lastOfWalk } from "./rig-state";
 import { useArrival, useScreenTitle } from "./screen-title";
@@ -59,6 +60,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
             </p>
           )}
           <Findings walk={walk.id} tally={tally} marks={marks} />
+          <Mended document={view.document} marks={marks} />
           {unmarked.length + unseen.length > 0 && (
             <section>
               <h3 className="px-4 pt-4 pb-1.5 font-extrabold">{words.notSeen}</h3>
@@ -85,6 +87,7 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
               walk.source === "paper" ? null : elapsedMs,
             )}
           </p>
+          {verdict === "unfinished" && <p className="px-4 pb-4 font-semibold">{words.unfinished}</p>}
           <Stale last={lastOfWalk(walk)} kept={walk} />
           <p className="px-4 pb-4 text-[0.9375rem] text-soft">{words.deference}</p>
         </div>

@@ -106,7 +106,7 @@ export function tallyOf(document: RevisionDocument, steps: readonly Step[], mark
 }
 
 /** Whether calling this check good needs a reason: it was last seen to be why the rig must not be towed. */
-export function needsReason(check: Check, faulted: ReadonlySet<string>): boolean {
+export function needsReason(check: Check, faulted: { has(key: string): boolean }): boolean {
   return check.effect === "hold" && faulted.has(check.key);
 }
 

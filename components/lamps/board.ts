@@ -2,7 +2,7 @@ import { useState } from "react";
 import type { Marking } from "@/components/field/marking";
 import { useSettled } from "@/components/field/settling";
 import { signals, type Signal } from "@/lib/domain/entry";
-import { boardOutcome, expectedOf, type LampPair, type Seen } from "@/lib/domain/lamp-board";
+import { boardOutcome, expectedOf, isAsDrawn, type LampPair, type Seen } from "@/lib/domain/lamp-board";
 import type { Check } from "@/lib/domain/revision";
 
 /** What shows at the board: a signal as it should be, one that is odd, or something beside the signals. */
@@ -22,6 +22,8 @@ export interface Board {
   odd: (pair: LampPair) => void;
   unseen: () => void;
   back: () => void;
+  /** Looks again at what was odd, after it was mended. */
+  retest: () => void;
   /** Whether this signal has its answer; a script goes on from it by itself. */
   answered: boolean;
 }
@@ -40,7 +42,9 @@ export function useBoard(
   following: Signal | null,
 ): Board {
   const [passed, setPassed] = useState<readonly Signal[]>([]);
-  const answered = (signal: Signal) => seen[signal] !== undefined || passed.includes(signal);
+  const [again, setAgain] = useState<readonly Signal[]>([]);
+  const answered = (signal: Signal) =>
+    (seen[signal] !== undefined && !again.includes(signal)) || passed.includes(signal);
   const [chosen, setAt] = useState<Signal>(() => signals.find((signal) => !answered(signal)) ?? signals[0]);
   const at = following ?? chosen;
   const [view, setView] = useState<BoardView>("signal");
@@ -48,7 +52,11 @@ export function useBoard(
   const place = signals.indexOf(at) + 1;
 
   const onward = (done: readonly Signal[], after: Seen, changed: boolean) => {
-    const open = signals.filter((signal) => after[signal] === undefined && !done.includes(signal));
+    const left = again.filter((signal) => signal !== at);
+    const open = signals.filter(
+      (signal) => (after[signal] === undefined || left.includes(signal)) && !done.includes(signal),
+    );
+    setAgain(left);
     const ahead = open.find((signal) => signals.indexOf(signal) >= place) ?? open[0];
     const more = { ...(Object.keys(after).length > 0 && { seen: after }), ...(note && { note }) };
     if (!ahead) return void marking.mark(boardOutcome(check, after), more);
@@ -87,6 +95,14 @@ export function useBoard(
       if (view !== "signal") setView("signal");
       else if (place > 1 && settled()) setAt(signals[place - 2]!);
       else marking.back();
+    },
+    retest() {
+      const odd = signals.filter((signal) => seen[signal] && !isAsDrawn(check, signal, seen[signal]));
+      marking.ask(null);
+      setPassed([]);
+      setAgain(odd);
+      setAt(odd[0] ?? signals[0]);
+      setView("signal");
     },
     answered: answered(at),
   };

@@ -29,7 +29,15 @@ export function BrakeIdleScreen(props: CheckScreenProps) {
       picture={
         <CheckPicture check={check} marked={callouts.chosen} onTouch={callouts.touch} asking={asking} />
       }
-      says={<CheckWords check={check} mark={mark} marking={marking} />}
+      says={
+        <CheckWords
+          check={check}
+          mark={mark}
+          before={view.replay.faulted.get(check.key)}
+          copying={view.walk.source === "paper"}
+          marking={marking}
+        />
+      }
       acts={
         asking ? (
           <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />

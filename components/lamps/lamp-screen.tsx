@@ -39,7 +39,15 @@ export function LampScreen(props: CheckScreenProps) {
 
   const acts = () => {
     if (asking)
-      return <CheckQuestion recorder={recorder} check={check} callouts={callouts} marking={marking} />;
+      return (
+        <CheckQuestion
+          recorder={recorder}
+          check={check}
+          callouts={callouts}
+          marking={marking}
+          onMended={board.retest}
+        />
+      );
     if (filming) return <ClipMarker onDone={way.setClip} onBack={() => way.choose("plain")} />;
     switch (board.view) {
       case "how":
@@ -106,7 +114,13 @@ export function LampScreen(props: CheckScreenProps) {
       }
       says={
         !filming && (
-          <SignalWords check={check} board={board} quiet={asking} running={way.following !== null} />
+          <SignalWords
+            check={check}
+            board={board}
+            seen={mark?.seen ?? {}}
+            quiet={asking}
+            running={way.following !== null}
+          />
         )
       }
       acts={acts()}

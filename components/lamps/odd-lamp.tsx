@@ -25,7 +25,7 @@ export function OddLamp({ expected, pair, onPair, onSave, onBack }: OddLampProps
           {lampStates.map((state) => (
             <Button
               key={state}
-              aria-pressed={pair[which] === state}
+              aria-pressed={pair[which] === state && pair[which] !== expected[which]}
               className="aria-pressed:border-ink aria-pressed:bg-ink aria-pressed:text-paper"
               onClick={() => {
                 onPair({ ...pair, [which]: state });
@@ -47,8 +47,13 @@ export function OddLamp({ expected, pair, onPair, onSave, onBack }: OddLampProps
     <Question id="odd" title={words.oddTitle} appearance="which">
       <div className="acts-two">
         {lamps.map((lamp) => (
-          <Button key={lamp} className="min-h-primary" onClick={() => setWhich(lamp)}>
-            {words.oddLamp(lamp, pair[lamp])}
+          <Button
+            key={lamp}
+            className="min-h-primary"
+            hint={words.oddState(pair[lamp], pair[lamp] === expected[lamp])}
+            onClick={() => setWhich(lamp)}
+          >
+            {words.lamp[lamp]}
           </Button>
         ))}
       </div>
@@ -58,7 +63,11 @@ export function OddLamp({ expected, pair, onPair, onSave, onBack }: OddLampProps
         </p>
       )}
       <div className="acts-two">
-        <Button variant="good" onClick={() => (changed ? onSave() : setEmpty(true))}>
+        <Button
+          variant={changed ? "good" : "quiet"}
+          className="min-h-primary"
+          onClick={() => (changed ? onSave() : setEmpty(true))}
+        >
           {words.oddSave}
         </Button>
         <Button variant="quiet" onClick={onBack}>

@@ -1,5 +1,5 @@
 import type { Depth, Entry, Purpose } from "./entry";
-import { checksOf, keysAtStation, walkChecks, type RevisionDocument } from "./revision";
+import { checksOf, keysAtStation, walkChecks, type Check, type RevisionDocument } from "./revision";
 
 /** How long a walk may lie still with the phone away before it counts as left. Our own rule: no figure is published. */
 export const LEFT_MS = 10 * 60_000;
@@ -53,8 +53,8 @@ export function againAfterBreak(
 }
 
 /**
- * The checks to ask again after a fault was mended: the check itself, what mending it can change, and the holds of the
- * last look. What cannot have changed keeps its mark.
+ * The checks to ask again after a fault was mended: the check itself, what mending it can change, what was undone to
+ * secure the car for it, and the holds of the last look. What cannot have changed keeps its mark.
  * @param mended keys of the checks that were mended
  * @param marked keys with a counting mark
  */
@@ -65,9 +65,32 @@ export function againAfterMending(
 ): string[] {
   const checks = checksOf(document);
   const touched = mended.flatMap((key) => checks.get(key)?.touches ?? []);
+  // Whoever mends between the vehicles sets the brake and the chocks first, as the screen says: both come off again.
+  const secured = [...checks.values()].filter(provesRelease).map(({ key }) => key);
   const lastLook = keysAtStation(document, "last-look").filter((key) => checks.get(key)?.effect === "hold");
-  const again = [...mended, ...touched, ...lastLook].filter((key) => marked.includes(key));
+  const again = [...mended, ...touched, ...secured, ...lastLook].filter((key) => marked.includes(key));
   return inListOrder(document, again);
+}
+
+/**
+ * The checks to ask again when a fault was mended on the spot, in the middle of a walk: what mending it can change.
+ * @param marked keys with a counting mark
+ */
+export function touchedByMending(
+  document: RevisionDocument,
+  mended: string,
+  marked: readonly string[],
+): string[] {
+  const touched = checksOf(document).get(mended)?.touches ?? [];
+  return inListOrder(
+    document,
+    touched.filter((key) => key !== mended && marked.includes(key)),
+  );
+}
+
+/** A check that shows the car free to roll: its brake off and chocks out, or its wheels turning. */
+function provesRelease({ part, drawn }: Pick<Check, "part" | "drawn">): boolean {
+  return part === "parking-brake" || (part === "wheels" && drawn !== "standing");
 }
 
 /** The marked checks that are made in the car's cabin. */

@@ -18,8 +18,11 @@ export interface Replay {
   counts: { marks: number; faults: number };
   /** Active walking time at the last entry, in milliseconds. */
   elapsedMs: number;
-  /** Checks last seen at fault, whatever was voided or not seen since: calling a hold among them good needs a reason. */
-  faulted: ReadonlySet<string>;
+  /**
+   * Checks last seen at fault, with that mark, whatever was voided or not seen since: calling a hold among them good
+   * needs a reason.
+   */
+  faulted: ReadonlyMap<string, MarkBody>;
   /** Someone said that nobody has been in the car since the cabin was marked, and nothing but the last look came since. */
   carUntouched: boolean;
   photos: readonly PhotoBody[];
@@ -35,7 +38,7 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
   let open: OpenBody | null = null;
   let closed = false;
   let elapsedMs = 0;
-  const faulted = new Set<string>();
+  const faulted = new Map<string, MarkBody>();
   const photos: PhotoBody[] = [];
   const lastLook = new Set(keysAtStation(document, "last-look"));
   let carUntouched = false;
@@ -52,7 +55,7 @@ export function replay(document: RevisionDocument, entries: Iterable<Entry>): Re
     if (!mark || !checks.has(mark.check)) continue;
     marks.delete(mark.check);
     marks.set(mark.check, { ...mark, at: entry.at, elapsedMs });
-    if (mark.outcome === "fault") faulted.add(mark.check);
+    if (mark.outcome === "fault") faulted.set(mark.check, mark);
     if (mark.outcome === "good" || mark.outcome === "absent") faulted.delete(mark.check);
     // The answer is about this moment: it holds while the last look goes on, not over further work on the rig.
     if (!lastLook.has(mark.check)) carUntouched = false;

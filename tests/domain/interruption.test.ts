@@ -6,6 +6,7 @@ import {
   asksAboutCar,
   interruptionOf,
   LEFT_MS,
+  touchedByMending,
   type Interruption,
 } from "@/lib/domain/interruption";
 import type { RevisionDocument } from "@/lib/domain/revision";
@@ -71,12 +72,17 @@ describe("what is asked again", () => {
         })),
       },
     } as RevisionDocument;
+    // Chocks and wheels, because the car was secured for the mending.
     expect(againAfterMending(document, ["arm-left"], hookUp)).toEqual([
       "arm-left",
       "cables",
+      "chocks-out",
+      "wheels-roll",
       "joints",
       "jacks-up",
     ]);
+    expect(touchedByMending(document, "arm-left", hookUp)).toEqual(["cables"]);
+    expect(touchedByMending(document, "arm-left", ["arm-left"])).toEqual([]);
     expect(againAfterMending(document, ["arm-left"], ["arm-left", "tires"])).toEqual(["arm-left"]);
   });
 });

@@ -106,10 +106,10 @@ test("a hold at fault becomes good only with a reason", async ({ page, product }
   await expect(page.getByText("Why is it good now?")).toBeVisible();
   await expect(ask(page)).toHaveText(held);
   await tap(page, /^It was fixed/);
-  await page.getByLabel("In a few words").fill("");
+  await page.getByLabel("Or in a few words").fill("");
   await tap(page, /^Save as good/);
   await expect(page.getByText("Say in a few words what was done.")).toBeVisible();
-  await page.getByLabel("In a few words").fill("new clip");
+  await page.getByLabel("Or in a few words").fill("new clip");
   await tap(page, /^Save as good/);
   await expect(ask(page)).not.toHaveText(held);
   await tap(page, /^Back one/);

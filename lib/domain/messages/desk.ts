@@ -88,7 +88,7 @@ export const deskWords = {
 export const troubleWords = {
   unreachedTitle: "Hookfast cannot be reached from here",
   unreached:
-    "The desk reads from the server, and the server does not answer. Walks are recorded in the field wing all the same and stay on the phone until they are received.",
+    "The desk reads from the server, and the server does not answer. Walks are recorded on the phone all the same and stay on the phone until they are received.",
   refusedTitle: "The server turned this down",
   brokenTitle: "The server could not answer",
   staleTitle: "Not up to date",
@@ -120,7 +120,7 @@ export const historyWords = {
   allShown: (count: number) => `${plural(count, "walk")} shown. There are no older ones.`,
   emptyTitle: "No walks yet",
   emptyWalker:
-    "A walk appears here when the server has received it. Open the field wing on your phone, walk a rig, and come back into coverage.",
+    "A walk appears here when the server has received it. Open Hookfast on your phone, walk a rig, and come back into coverage.",
   emptyReader: "A walk appears here when a driver has made it and the server has received it.",
   toField: "Walk a rig",
   nameless: "name not known",

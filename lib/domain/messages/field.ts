@@ -143,7 +143,7 @@ export const fieldWords = {
     fixed: "It was fixed",
     what: "What was done?",
     quick: ["put in place", "part replaced", "closed or locked"],
-    own: "In a few words",
+    own: "Or in a few words",
     save: "Save as good",
     empty: "Say in a few words what was done.",
     cancel: "Leave it as fault",
@@ -157,7 +157,8 @@ export const fieldWords = {
     unseen: "Couldn’t see",
     asItStands: (kind: Verdict) => `As it stands: ${verdict[kind]}`,
     closeAndSign: "Close and sign",
-    final: "nothing can be added after",
+    final: (kind: Verdict) =>
+      kind === "unfinished" ? "unfinished; nothing can be added after" : "nothing can be added after",
     goOn: "Go on with the walk",
     pause: "Pause",
     pauseHint: "time stands still",
@@ -174,6 +175,8 @@ export const fieldWords = {
     holds: "What holds it",
     fixes: "Fix soon",
     notSeen: "Not seen",
+    mended: "Marked fault on this walk, good at its end",
+    unfinished: "Not every check was seen. Look at what is missing before towing.",
     markedAbsent:
       "Marked as not on this rig, but its list asks for it. Look again, or have the rig sheet corrected.",
     leftOut: "Not marked",

@@ -56,7 +56,7 @@ export const lampBoardWords = {
   oddSave: "Save as odd",
   oddNone: "Touch the lamp that is odd.",
   oddBack: "Back",
-  oddLamp: (which: Lamp, kind: LampState) => `${lamp[which]}: ${lower(state[kind])}`,
+  oddState: (kind: LampState, asDrawn: boolean) => (asDrawn ? "as drawn" : `marked: ${lower(state[kind])}`),
   wholeTitle: "The whole check at once",
   wholeBack: "Back to the signals",
   announce: (at: Signal, left: LampState, right: LampState) =>

@@ -5,7 +5,7 @@ import { roleWords } from "./desk";
 
 export const signInWords = {
   title: "Sign in",
-  lead: "The field wing goes on recording without this. Signing in lets it send walks, and opens the desk.",
+  lead: "Recording goes on without this. Signing in sends your walks, and opens the desk.",
   email: "Email address",
   password: "Password",
   show: "Show password",

@@ -15,12 +15,14 @@ export const walkingWords = {
     hold: "Do not tow until this is mended.",
     mended: "Mended on the spot",
     own: "In a few words",
-    ownHint: "Not needed. What you touch above is kept at once.",
-    keep: "Keep these words",
+    ownHint: "Not needed. Kept as you type.",
+    before: (note: string) => `It was marked fault before: ${note}`,
+    beforeBare: "It was marked fault before.",
     goOn: "Go on",
     misTap: "Mis-tap: it is good",
     more: "Say what is wrong",
-    noteOf: (labels: readonly string[], own: string) => [labels.join("; "), own].filter(Boolean).join(". "),
+    noteOf: (labels: readonly string[], own: string) =>
+      [labels.length > 0 ? `Not as drawn: ${labels.join("; ")}` : "", own].filter(Boolean).join(". "),
   },
 
   measure: {
@@ -72,7 +74,6 @@ export const walkingWords = {
 
   held: {
     title: "What holds it",
-    seen: (note: string) => `Seen: ${note}`,
     who: "Who may",
     whoUsual: "You, by the maker’s manual; a licensed shop where it is not plain.",
     again: "Fixed, look again",
@@ -111,6 +112,7 @@ export const walkingWords = {
     whenHint: "As written on the card. Leave it empty if it is not.",
     start: "Enter the marks",
     untimed: "from paper",
+    copy: "Copy the mark from the card.",
     noteOf: (when: string) => `Walked on paper, ${when}.`,
     noteUnknown: "Walked on paper, when was not written.",
     cardTitle: (kind: Purpose, rig: string) => `${purpose[kind]}: ${rig}`,
