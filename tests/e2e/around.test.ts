@@ -2,7 +2,7 @@ import { appendFileSync, readFileSync, writeFileSync } from "node:fs";
 import AxeBuilder from "@axe-core/playwright";
 import type { BrowserContext, Page } from "@playwright/test";
 import { expect, test } from "../support/product";
-import { callOff, tap } from "../support/walking";
+import { callOff, slowPhone, tap } from "../support/walking";
 import type { Product } from "../support/product-process";
 
 const DRIVER = "driver@demo.example";
@@ -244,6 +244,7 @@ test("a full phone is said within a second, and the walk can be taken away as a 
   await page.goto("/offline");
   await setQuota(page, product, 6_000_000);
   await readyPhone(page, product);
+  await slowPhone(page);
   await startHookUp(page);
   await mark(page);
   await fill(page);
@@ -291,6 +292,7 @@ test("a store deleted under a running walk is said within a second; this page st
   product,
 }) => {
   await readyPhone(page, product);
+  await slowPhone(page);
   await context.setOffline(true);
   await startHookUp(page);
   await mark(page);
@@ -398,6 +400,7 @@ test("a new version is not offered while a walk is open in any tab; after it, an
 }) => {
   test.setTimeout(120_000);
   await readyPhone(page, product);
+  await slowPhone(page);
   const rigs = await context.newPage();
   await rigs.goto("/field");
   await expect(hookUp(rigs)).toBeVisible();
@@ -431,6 +434,7 @@ test("a tab with a walk keeps its page and goes on when the worker changes under
   product,
 }) => {
   await readyPhone(page, product);
+  await slowPhone(page);
   await startHookUp(page);
   await mark(page);
   await laterBuild(async () => {

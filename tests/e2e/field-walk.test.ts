@@ -10,6 +10,7 @@ import {
   place,
   readyPhone,
   SETTLED_MS,
+  slowPhone,
   startHookUp,
   tap,
   walkOn,
@@ -118,6 +119,7 @@ test("a hold at fault becomes good only with a reason", async ({ page, product }
 
 test("a second tab reads the walk that the first one records", async ({ page, context, product }) => {
   await readyPhone(page, product);
+  await slowPhone(page);
   await startHookUp(page);
   await tap(page, good);
   const second = await context.newPage();

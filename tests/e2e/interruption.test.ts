@@ -8,6 +8,7 @@ import {
   nobody,
   place,
   readyPhone,
+  slowPhone,
   startHookUp,
   storedEntries,
   tap,
@@ -15,6 +16,8 @@ import {
 } from "../support/walking";
 
 const goOn = /^(Go on$|Nobody has)/;
+
+test.beforeEach(async ({ page }) => slowPhone(page));
 
 test("a phone killed at ten random moments: nothing marked is lost, the same step, the last two again", async ({
   page,
@@ -30,8 +33,7 @@ test("a phone killed at ten random moments: nothing marked is lost, the same ste
   test.info().annotations.push({ type: "seed", description: String(seed) });
   const random = randomOf(seed);
   for (let kill = 0; kill < 10; kill += 1) {
-    const slowed = await context.newCDPSession(current);
-    await slowed.send("Emulation.setCPUThrottlingRate", { rate: 4 });
+    await slowPhone(current);
     // Somewhere in the middle of a mark or two, without waiting for what they lead to.
     for (let mark = 0; mark < 1 + Math.floor(random() * 3); mark += 1) {
       const button = current.getByRole("button", { name: /^(Good|Nobody has)/ }).first();
@@ -108,7 +110,7 @@ test("paused, taken up, someone was in the car: the cabin is asked again, and on
   page,
   product,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   while ((await place(page))[0]! < 10) {
@@ -133,7 +135,7 @@ test("paused, taken up, someone was in the car: the cabin is asked again, and on
 });
 
 test("at the last look: someone was in the car, so the cabin comes first", async ({ page, product }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   await walkOn(page, () => good, nobody);
@@ -148,7 +150,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
   page,
   product,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   await tap(page, good);
@@ -178,7 +180,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
 });
 
 test("couldn't see leaves the walk unfinished, and says what", async ({ page, product }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   const unseen = await ask(page).innerText();
@@ -222,7 +224,7 @@ test("called off with a reason: closed, signed, and the reason in the record", a
 });
 
 test("a verdict goes stale when the rig was left", async ({ page, product }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   await walkOn(page);
@@ -236,7 +238,7 @@ test("a verdict goes stale when the rig was left", async ({ page, product }) => 
 });
 
 test("a card is printed, and entered later as a walk from paper, untimed", async ({ page, product }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await page.getByRole("link", { name: /^Paper cards/ }).click();
   await tap(page, /^Print: hook-up/);
@@ -262,7 +264,7 @@ test("what is not as drawn is touched, kept in the mark, and shown where the rig
   page,
   product,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(240_000);
   await readyPhone(page, product);
   await startHookUp(page);
   while ((await ask(page).innerText()) !== "Left arm: pin in, clip over it") {

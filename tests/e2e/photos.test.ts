@@ -108,6 +108,9 @@ test("the buttons are reached by keyboard, large enough for a knuckle, and named
   page,
   product,
 }) => {
+  test.setTimeout(120_000);
+  // Listened for from the start: the browser needs a moment to hand a chooser over.
+  const chooser = page.waitForEvent("filechooser", { timeout: 120_000 });
   await toPhotoField(page, product);
   const field = page.getByRole("group", { name: photoWords.group });
   for (const name of [photoWords.take, photoWords.choose]) {
@@ -121,7 +124,6 @@ test("the buttons are reached by keyboard, large enough for a knuckle, and named
   await field.getByLabel(photoWords.take).focus();
   await page.keyboard.press("Tab");
   await expect(field.getByLabel(photoWords.choose)).toBeFocused();
-  const chooser = page.waitForEvent("filechooser");
   await page.keyboard.press("Enter");
   await (
     await chooser

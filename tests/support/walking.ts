@@ -20,6 +20,12 @@ export async function readyPhone(page: Page, product: Signing, email = DRIVER): 
   await page.evaluate(async () => void (await navigator.serviceWorker.ready));
 }
 
+/** From here on the page runs as on a phone with a quarter of this machine's speed. */
+export async function slowPhone(page: Page): Promise<void> {
+  const session = await page.context().newCDPSession(page);
+  await session.send("Emulation.setCPUThrottlingRate", { rate: 4 });
+}
+
 /** Taps a button once it takes touches. */
 export async function tap(page: Page, name: RegExp): Promise<void> {
   await page.getByRole("button", { name }).first().waitFor();
