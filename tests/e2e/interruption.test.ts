@@ -1,3 +1,4 @@
+import type { Page } from "@playwright/test";
 import { expect, test } from "../support/product";
 import {
   ask,
@@ -17,7 +18,11 @@ import {
 
 const goOn = /^(Go on$|Nobody has)/;
 
-test.beforeEach(async ({ page }) => slowPhone(page));
+/** A slow phone, once everything is on it. */
+async function readySlowPhone(page: Page, product: Parameters<typeof readyPhone>[1]): Promise<void> {
+  await readyPhone(page, product);
+  await slowPhone(page);
+}
 
 test("a phone killed at ten random moments: nothing marked is lost, the same step, the last two again", async ({
   page,
@@ -25,7 +30,7 @@ test("a phone killed at ten random moments: nothing marked is lost, the same ste
   product,
 }) => {
   test.setTimeout(300_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   const address = page.url();
   let current = page;
@@ -81,7 +86,7 @@ function randomOf(seed: number): () => number {
 }
 
 test("a reload waits at the same check, and the last two are asked again", async ({ page, product }) => {
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   const asked: string[] = [];
   for (let mark = 0; mark < 3; mark += 1) {
@@ -111,7 +116,7 @@ test("paused, taken up, someone was in the car: the cabin is asked again, and on
   product,
 }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   while ((await place(page))[0]! < 10) {
     const asked = await ask(page).innerText();
@@ -136,7 +141,7 @@ test("paused, taken up, someone was in the car: the cabin is asked again, and on
 
 test("at the last look: someone was in the car, so the cabin comes first", async ({ page, product }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   await walkOn(page, () => good, nobody);
   await tap(page, /^Someone, or not sure/);
@@ -151,7 +156,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
   product,
 }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   await tap(page, good);
   await expect(page.getByText(/^2 of \d+$/)).toBeVisible();
@@ -181,7 +186,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
 
 test("couldn't see leaves the walk unfinished, and says what", async ({ page, product }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   const unseen = await ask(page).innerText();
   await walkOn(page, (asked) => (asked === unseen ? /^Couldn’t see/ : good));
@@ -193,7 +198,7 @@ test("couldn't see leaves the walk unfinished, and says what", async ({ page, pr
 
 test("a clock set back an hour is recorded, and the walking time goes on", async ({ page, product }) => {
   await page.clock.install();
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   await page.clock.setSystemTime(Date.now() - 3_600_000);
   await page.waitForTimeout(700);
@@ -208,7 +213,7 @@ test("a clock set back an hour is recorded, and the walking time goes on", async
 });
 
 test("called off with a reason: closed, signed, and the reason in the record", async ({ page, product }) => {
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   await tap(page, good);
   await tap(page, /^Stop…/);
@@ -225,7 +230,7 @@ test("called off with a reason: closed, signed, and the reason in the record", a
 
 test("a verdict goes stale when the rig was left", async ({ page, product }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   await walkOn(page);
   await tap(page, closeAndSign);
@@ -239,7 +244,7 @@ test("a verdict goes stale when the rig was left", async ({ page, product }) => 
 
 test("a card is printed, and entered later as a walk from paper, untimed", async ({ page, product }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await page.getByRole("link", { name: /^Paper cards/ }).click();
   await tap(page, /^Print: hook-up/);
   await expect(page.getByRole("heading", { name: "Hook-up: Maple rig" })).toBeVisible();
@@ -265,7 +270,7 @@ test("what is not as drawn is touched, kept in the mark, and shown where the rig
   product,
 }) => {
   test.setTimeout(240_000);
-  await readyPhone(page, product);
+  await readySlowPhone(page, product);
   await startHookUp(page);
   while ((await ask(page).innerText()) !== "Left arm: pin in, clip over it") {
     const asked = await ask(page).innerText();
