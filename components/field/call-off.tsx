@@ -8,7 +8,7 @@ import { Question } from "./question";
 import { useSettled } from "./settling";
 import { useTaking } from "./taking";
 import { SaveTrouble } from "./save-trouble";
-import { plainText } from "./walk-plan";
+import { plainText } from "@/lib/domain/json";
 
 const words = walkingWords.stop;
 

@@ -9,7 +9,7 @@ import { CheckPhotos } from "./check-photos";
 import type { Callouts } from "./callouts";
 import type { Marking } from "./marking";
 import { Question } from "./question";
-import { plainText } from "./walk-plan";
+import { plainText } from "@/lib/domain/json";
 
 const words = walkingWords.details;
 

@@ -2,6 +2,7 @@ import type { SegmentState, StripStation } from "@/components/tape/strip";
 import type { WalkView } from "@/lib/client/recorder";
 import type { Depth, MarkBody, Purpose } from "@/lib/domain/entry";
 import { asksAboutCar, type Interruption } from "@/lib/domain/interruption";
+import { plainText } from "@/lib/domain/json";
 import { checksOf, walkChecks, type Check, type RevisionDocument } from "@/lib/domain/revision";
 import { segmentOf } from "@/lib/domain/walk-reading";
 import { CALL_OFF, CLOSING, PLAN } from "./address";
@@ -108,13 +109,6 @@ export function tallyOf(document: RevisionDocument, steps: readonly Step[], mark
 /** Whether calling this check good needs a reason: it was last seen to be why the rig must not be towed. */
 export function needsReason(check: Check, faulted: { has(key: string): boolean }): boolean {
   return check.effect === "hold" && faulted.has(check.key);
-}
-
-const LONE_SURROGATE = /[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/g;
-
-/** Words as they may enter a record: a lone half of an emoji would make the whole walk unreadable to the server. */
-export function plainText(text: string): string {
-  return text.replace(LONE_SURROGATE, "").replace(/\s+/g, " ").trim();
 }
 
 /**

@@ -59,3 +59,8 @@ const LONE_SURROGATE = /[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[
 function surrogateFault(value: string, pointer: string): JsonFault | null {
   return LONE_SURROGATE.test(value) ? { pointer, detail: "a lone surrogate" } : null;
 }
+
+/** Words on one line as a record may hold them: a lone half of an emoji would make the whole walk unreadable. */
+export function plainText(text: string): string {
+  return text.replace(new RegExp(LONE_SURROGATE, "g"), "").replace(/\s+/g, " ").trim();
+}

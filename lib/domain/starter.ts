@@ -1,3 +1,4 @@
+import { plainText } from "./json";
 import * as z from "zod/mini";
 import type { Check, RevisionDocument } from "./revision";
 import * as check from "./plain-checks";
@@ -120,10 +121,7 @@ function sheetOf({ name, hitch, brake, lamps, airLine, manual }: StarterAnswers)
   };
 }
 
-const LONE_SURROGATE = /[\uD800-\uDBFF](?![\uDC00-\uDFFF])|(?<![\uD800-\uDBFF])[\uDC00-\uDFFF]/g;
-
 /** What someone typed as a list can hold it: one line, no longer than this, no half of an emoji. */
 export function typedWords(text: string, most: number): string {
-  const line = text.replace(/\s+/g, " ").trim();
-  return line.slice(0, most).replace(LONE_SURROGATE, "").trim();
+  return plainText(plainText(text).slice(0, most));
 }
