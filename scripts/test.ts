@@ -3,8 +3,11 @@ import { prepareTests } from "./test-machine";
 import { runPlaywright, runVitest } from "./test-runs";
 import { runScript } from "./shutdown";
 
-/** What a stage found: how many tests or checks passed and failed, and what to read when any failed. */
-export type Outcome = { passed: number; failed: number; output: string };
+/**
+ * What a stage found: how many tests or checks passed and failed, what to read when any failed, and how many passed
+ * at the second try only.
+ */
+export type Outcome = { passed: number; failed: number; output: string; again?: number };
 
 type Stage = { name: string; groups: string[]; run: (words: string[]) => Promise<Outcome> };
 
@@ -34,12 +37,15 @@ await runScript(async () => {
   for (const { name, run } of chosen) {
     const began = Date.now();
     const why = broken(name);
-    const { passed, failed, output } = why ? { passed: 0, failed: 1, output: why } : await run(words);
+    const outcome: Outcome = why ? { passed: 0, failed: 1, output: why } : await run(words);
+    const { passed, failed, output, again = 0 } = outcome;
     total.passed += passed;
     total.failed += failed;
     const seconds = ((Date.now() - began) / 1000).toFixed(1);
-    if (failed > 0) console.log(output.trimEnd());
-    console.log(`${failed > 0 ? "FAIL" : "ok  "}  ${name.padEnd(22)} ${count(passed, failed)}  ${seconds} s`);
+    if (failed > 0 || again > 0) console.log(output.trimEnd());
+    console.log(
+      `${failed > 0 ? "FAIL" : "ok  "}  ${name.padEnd(22)} ${count(passed, failed, again)}  ${seconds} s`,
+    );
   }
   console.log(`${total.passed} passed, ${total.failed} failed`);
   return total.failed === 0 && total.passed > 0 ? 0 : 1;
@@ -52,6 +58,7 @@ function choose(asked: string[]): { chosen: Stage[]; words: string[] } {
   return { chosen: wanted.size > 0 ? stages.filter((stage) => wanted.has(stage)) : stages, words };
 }
 
-function count(passed: number, failed: number): string {
-  return `${String(passed).padStart(5)} passed${failed > 0 ? `, ${failed} failed` : ""}`;
+function count(passed: number, failed: number, again: number): string {
+  const more = (failed > 0 ? `, ${failed} failed` : "") + (again > 0 ? `, ${again} at the second try` : "");
+  return `${String(passed).padStart(5)} passed${more}`;
 }

