@@ -13,6 +13,9 @@ export const problems = {
   "device-taken": { status: 409, title: "That device id belongs to another key or member." },
   "address-taken": { status: 409, title: "There is an account with that address already." },
   "id-taken": { status: 409, title: "An id in this request belongs to something that exists already." },
+  "stale-base": { status: 409, title: "Someone else has saved this rig meanwhile." },
+  "newer-schema": { status: 422, title: "This sheet was written by a newer Hookfast." },
+  "impossible-sheet": { status: 422, title: "Something on this sheet cannot be so." },
   "too-many-attempts": { status: 429, title: "Too many failed attempts. Wait, then try again." },
   "bad-link": {
     status: 403,

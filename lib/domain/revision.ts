@@ -82,9 +82,17 @@ export const lampsShape = z.looseObject({
   expected: z.optional(z.partialRecord(z.enum(signals), z.partialRecord(z.enum(lamps), z.enum(lampStates)))),
 });
 
+/** Where a check comes from; `says` names the rule or the manual, and common practice says that it is that. */
+export const originShape = z.looseObject({
+  kind: z.enum(["rule", "vehicle-manual", "equipment-manual", "practice"]),
+  says: z.string(),
+});
+export type Origin = z.infer<typeof originShape>;
+
 /**
  * One thing to look at: what is asked, how to look, why it matters and what a fault does. `who` says who may mend it,
- * `touches` names the checks that mending it can change, `figures` are the rig's own numbers by callout.
+ * `touches` names the checks that mending it can change, `figures` are the rig's own numbers by callout, `listed` says
+ * what on the sheet puts it on this list, and `origin` where it comes from.
  */
 export const checkShape = z.looseObject({
   key: z.string().check(z.minLength(1)),
@@ -104,6 +112,8 @@ export const checkShape = z.looseObject({
   measure: z.optional(measureShape),
   lamps: z.optional(lampsShape),
   figures: z.optional(z.partialRecord(z.enum(["A", "B", "C", "D"]), z.string())),
+  listed: z.optional(z.string()),
+  origin: z.optional(originShape),
 });
 export type Check = z.infer<typeof checkShape>;
 

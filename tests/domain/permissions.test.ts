@@ -7,9 +7,24 @@ test("who may do what", () => {
     roles.map((role) => [role, actions.filter((action) => may(role, action))]),
   );
   expect(table).toEqual({
-    driver: ["walks.record", "walks.read-own", "devices.register"],
-    installer: ["walks.record", "walks.read-own", "walks.read-all", "devices.register"],
-    manager: ["walks.record", "walks.read-own", "walks.read-all", "devices.register"],
-    auditor: ["walks.read-own", "walks.read-all", "devices.register"],
+    driver: ["walks.record", "walks.read-own", "devices.register", "rigs.read"],
+    installer: [
+      "walks.record",
+      "walks.read-own",
+      "walks.read-all",
+      "devices.register",
+      "rigs.read",
+      "rigs.write",
+    ],
+    manager: [
+      "walks.record",
+      "walks.read-own",
+      "walks.read-all",
+      "devices.register",
+      "rigs.read",
+      "rigs.write",
+      "people.invite",
+    ],
+    auditor: ["walks.read-own", "walks.read-all", "devices.register", "rigs.read"],
   });
 });
