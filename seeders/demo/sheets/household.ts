@@ -92,7 +92,8 @@ export const householdSheet: Sheet = {
     airLine: { there: false },
     brake: {
       id: id(8),
-      family: "portable-proportional",
+      family: "portable",
+      proportional: true,
       manualApply: true,
       monitor: true,
       boosterMode: false,

@@ -89,7 +89,8 @@ export const shortCoachSheet: Sheet = {
     airLine: { there: false },
     brake: {
       id: id(9),
-      family: "portable-on-off",
+      family: "portable",
+      proportional: false,
       manualApply: true,
       monitor: true,
       boosterMode: false,
