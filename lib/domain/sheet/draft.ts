@@ -1,7 +1,9 @@
 import { plainText } from "../json";
-import { gearFields, gearKeys } from "./gear";
 import { fieldsShown, isFilled, partIn, parts, partShows, type Part } from "./draft-sections";
+import type { Fields } from "./field";
+import { gearFields, gearKeys } from "./gear";
 import type { Sheet } from "./sheet";
+import { conductorFields, contactFields, groundFields, segmentFields, spliceFields } from "./wiring";
 
 /**
  * A sheet as someone types it: where a sheet has nothing a draft may have an empty text, and a figure that does not read
@@ -77,6 +79,31 @@ const rows = <T extends object>(list: T[] | undefined) =>
   (list ?? []).filter((row) => Object.keys(row).length > 0);
 const some = (lists: Record<string, unknown[]>) =>
   Object.fromEntries(Object.entries(lists).filter(([, list]) => list.length > 0));
+
+/** A row of a list with nothing in it yet. Its fields are there all the same: one that is missing could not be emptied. */
+export function blankRow(fields: Fields): Draft {
+  return Object.fromEntries(Object.keys(fields).map((key) => [key, ""]));
+}
+
+/** A draft as the form takes it up, with every row whole. */
+export function withBlanks(draft: Draft): Draft {
+  const wiring = (draft.wiring ?? {}) as Record<string, Draft[] | undefined>;
+  const whole = (rows: unknown, fields: Fields) =>
+    ((rows ?? []) as Draft[]).map((row) => ({ ...blankRow(fields), ...row }));
+  return {
+    ...draft,
+    wiring: {
+      ...wiring,
+      socket: whole(wiring.socket, contactFields),
+      grounds: whole(wiring.grounds, groundFields),
+      segments: whole(wiring.segments, segmentFields).map((segment: Draft) => ({
+        ...segment,
+        conductors: whole(segment.conductors, conductorFields),
+        splices: whole(segment.splices, spliceFields),
+      })),
+    },
+  };
+}
 
 /** A sheet as one about another rig: the same in all it says, of other coaches, cars and pieces of gear. */
 export function withoutIds(sheet: Sheet): Sheet {
