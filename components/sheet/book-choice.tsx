@@ -42,7 +42,7 @@ function FromTheBook({ part }: { part: Part }) {
   return (
     <div className="mt-3 border-2 border-dashed border-edge p-3">
       <label htmlFor={id} className="font-semibold">
-        {words.bookLabel(words.parts[part.key])}
+        {words.bookLabel(part.title)}
       </label>
       <p id={`${id}-lead`} className="mb-2 text-base text-soft">
         {words.bookLead}
@@ -87,6 +87,6 @@ function Replaced({ part }: { part: Part }) {
 }
 
 function withPart(draft: Record<string, unknown>, { path, key }: Part, values: Record<string, unknown>) {
-  if (path === key) return { ...draft, [key]: values };
+  if (path.length === 1) return { ...draft, [key]: values };
   return { ...draft, gear: { ...(draft.gear as object | undefined), [key]: values } };
 }

@@ -3,12 +3,13 @@ import { Button } from "@/components/ui/button";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import { conductorWords, optionWords } from "@/lib/domain/messages/sheet-wiring";
 import { blankRow } from "@/lib/domain/sheet/draft";
+import type { ListOutline } from "@/lib/domain/sheet/outline";
 import { changing, conductorFields, type Conductor } from "@/lib/domain/sheet/wiring";
 import { FieldLine } from "./field-line";
 import { RowHead, Where } from "./row-list";
 
 /** The wires of a segment: color, what each does at the near and at the far end, and a word where the two differ. */
-export function ConductorRows({ name }: { name: string }) {
+export function ConductorRows({ list, name }: { list: ListOutline; name: string }) {
   const { fields: rows, append, remove } = useFieldArray({ name });
   const { getValues, setValue } = useFormContext();
   const copy = () =>
@@ -17,12 +18,17 @@ export function ConductorRows({ name }: { name: string }) {
       if (near && !far) setValue(`${name}.${at}.far`, near);
     });
   return (
-    <div role="group" aria-label={words.conductors} className="mt-4">
-      <h4 className="font-extrabold">{words.conductors}</h4>
+    <div role="group" aria-label={list.title} className="mt-4">
+      <h4 className="font-extrabold">{list.title}</h4>
       <Where words={conductorWords} />
       <ol>
         {rows.map((row, at) => (
-          <ConductorRow key={`${row.id} ${at}`} name={`${name}.${at}`} at={at} onRemove={() => remove(at)} />
+          <ConductorRow
+            key={`${row.id} ${at}`}
+            title={list.item(at + 1)}
+            name={`${name}.${at}`}
+            onRemove={() => remove(at)}
+          />
         ))}
       </ol>
       <div className="flex flex-wrap gap-2.5 pt-3">
@@ -41,11 +47,12 @@ export function ConductorRows({ name }: { name: string }) {
   );
 }
 
-function ConductorRow({ name, at, onRemove }: { name: string; at: number; onRemove: () => void }) {
+type ConductorRowProps = { title: string; name: string; onRemove: () => void };
+
+function ConductorRow({ title, name, onRemove }: ConductorRowProps) {
   const wire = (useWatch({ name }) ?? {}) as Conductor;
   const differs = changing({ conductors: [wire] }).length > 0;
   const { color, near, far, tagged } = wire;
-  const title = words.wire(at + 1);
   return (
     <li role="group" aria-label={title} className="border-b border-rule py-3">
       <RowHead title={title} onRemove={onRemove} />

@@ -20,7 +20,7 @@ export function PartFields({ part: key, alone = false }: { part: PartKey; alone?
   const values = partIn(sheet, part) ?? {};
   const filled = more.filter((field) => isFilled(values[field])).length;
   return (
-    <Group title={words.parts[key]} hidden={alone}>
+    <Group title={part.title} hidden={alone}>
       {part.thing && <BookChoice part={part} />}
       <Lines part={part} keys={first} />
       {more.length > 0 && (
@@ -40,7 +40,12 @@ export function PartFields({ part: key, alone = false }: { part: PartKey; alone?
 
 function Lines({ part, keys }: { part: Part; keys: readonly string[] }) {
   return keys.map((key) => (
-    <FieldLine key={key} name={`${part.path}.${key}`} field={part.fields[key]!} words={part.words[key]!} />
+    <FieldLine
+      key={key}
+      name={`${part.path.join(".")}.${key}`}
+      field={part.fields[key]!}
+      words={part.words[key]!}
+    />
   ));
 }
 

@@ -3,23 +3,21 @@ import { Button } from "@/components/ui/button";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import type { FieldWords } from "@/lib/domain/messages/sheet-vehicles";
 import { blankRow } from "@/lib/domain/sheet/draft";
-import type { Fields } from "@/lib/domain/sheet/field";
+import type { ListOutline } from "@/lib/domain/sheet/outline";
 import { FieldLine } from "./field-line";
 
 type RowListProps = {
   name: string;
-  fields: Fields;
-  words: Record<string, FieldWords>;
+  list: ListOutline;
   most: number;
-  /** What a row is called, counted from 1. */
-  called: (at: number) => string;
   add: string;
   /** Rows that can be put in at once where there are none. */
   fill?: { label: string; rows: Record<string, unknown>[] };
 };
 
 /** Rows of a few fields each. Where to find them is said once, above. */
-export function RowList({ name, fields, words: of, most, called, add, fill }: RowListProps) {
+export function RowList({ name, list, most, add, fill }: RowListProps) {
+  const { fields, words: of, item: called } = list;
   const { fields: rows, append, remove } = useFieldArray({ name });
   return (
     <>

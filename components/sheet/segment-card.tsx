@@ -1,13 +1,12 @@
 import { useWatch } from "react-hook-form";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
-import { spliceWords } from "@/lib/domain/messages/sheet-wiring";
-import { wiringLists } from "@/lib/domain/sheet/draft-sections";
-import { spliceFields } from "@/lib/domain/sheet/wiring";
+import type { ListOutline } from "@/lib/domain/sheet/outline";
 import { ConductorRows } from "./conductor-rows";
 import { FieldLine } from "./field-line";
 import { RowHead, RowList } from "./row-list";
 
 type SegmentCardProps = {
+  list: ListOutline;
   at: number;
   of: number;
   onMove: (by: -1 | 1) => void;
@@ -15,12 +14,13 @@ type SegmentCardProps = {
 };
 
 /** One run of wires between two places, with what each wire does at either end and where it is spliced. */
-export function SegmentCard({ at, of, onMove, onRemove }: SegmentCardProps) {
+export function SegmentCard({ list, at, of, onMove, onRemove }: SegmentCardProps) {
   const name = `wiring.segments.${at}`;
-  const title = words.segment(at + 1);
+  const title = list.item(at + 1);
   const from = useWatch({ name: `${name}.from` }) as unknown;
   const to = useWatch({ name: `${name}.to` }) as unknown;
-  const { fields, words: labels } = wiringLists.segments;
+  const { fields, words: labels } = list;
+  const [conductors, splices] = list.lists as [ListOutline, ListOutline];
   return (
     <li role="group" aria-label={title} className="border-2 border-ink p-3">
       <RowHead title={title} onRemove={onRemove} />
@@ -31,27 +31,14 @@ export function SegmentCard({ at, of, onMove, onRemove }: SegmentCardProps) {
       ) : null}
       <div className="mt-2 grid grid-cols-[repeat(auto-fit,minmax(min(100%,15rem),1fr))] gap-x-4 gap-y-3">
         {Object.entries(fields).map(([key, field]) => (
-          <FieldLine
-            key={key}
-            name={`${name}.${key}`}
-            field={field}
-            words={labels[key as keyof typeof labels]}
-            compact
-          />
+          <FieldLine key={key} name={`${name}.${key}`} field={field} words={labels[key]!} compact />
         ))}
       </div>
-      <ConductorRows name={`${name}.conductors`} />
-      <div role="group" aria-label={`${title}, ${words.splices}`} className="mt-4">
-        <h4 className="font-extrabold">{words.splices}</h4>
+      <ConductorRows list={conductors} name={`${name}.conductors`} />
+      <div role="group" aria-label={`${title}, ${splices.title}`} className="mt-4">
+        <h4 className="font-extrabold">{splices.title}</h4>
         <p className="text-base text-soft">{words.splicesLead}</p>
-        <RowList
-          name={`${name}.splices`}
-          fields={spliceFields}
-          words={spliceWords}
-          most={16}
-          called={words.splice}
-          add={words.spliceAdd}
-        />
+        <RowList name={`${name}.splices`} list={splices} most={16} add={words.spliceAdd} />
       </div>
       {of > 1 && (
         <div className="mt-4 flex flex-wrap gap-x-5 border-t border-rule pt-1">

@@ -2,12 +2,15 @@ import { useFieldArray } from "react-hook-form";
 import { Button } from "@/components/ui/button";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import { blankRow } from "@/lib/domain/sheet/draft";
-import { wiringLists } from "@/lib/domain/sheet/draft-sections";
+import { parts } from "@/lib/domain/sheet/draft-sections";
+import type { ListOutline } from "@/lib/domain/sheet/outline";
 import { segmentFields } from "@/lib/domain/sheet/wiring";
 import { useDraftDesk } from "./draft-context";
 import { Group } from "./part-fields";
 import { RowList, Where } from "./row-list";
 import { SegmentCard } from "./segment-card";
+
+const [socket, segmentList, grounds] = parts.wiring.lists as [ListOutline, ListOutline, ListOutline];
 
 // How many contacts each socket has.
 const contacts: Record<string, number> = { "4-flat": 4, "5-flat": 5, "6-round": 6, "7-blade": 7 };
@@ -20,21 +23,21 @@ export function WiringEditor() {
   const numbered = Array.from({ length: count ?? 0 }, (_, at) => ({ contact: String(at + 1) }));
   return (
     <>
-      <Group title={words.socketTitle} lead={words.socketLead}>
+      <Group title={socket.title} lead={words.socketLead}>
         <RowList
           name="wiring.socket"
-          {...wiringLists.socket}
+          list={socket}
           most={13}
-          called={words.contact}
           add={words.contactAdd}
           fill={count ? { label: words.socketFill(count), rows: numbered } : undefined}
         />
       </Group>
-      <Group title={words.segmentsTitle} lead={words.segmentsLead}>
-        <Where words={wiringLists.segments.words} />
+      <Group title={segmentList.title} lead={words.segmentsLead}>
+        <Where words={segmentList.words} />
         <ol className="mt-3 flex flex-col gap-4">
           {segments.map((segment, at) => (
             <SegmentCard
+              list={segmentList}
               key={`${segment.id} ${at}`}
               at={at}
               of={segments.length}
@@ -60,14 +63,8 @@ export function WiringEditor() {
           </Button>
         )}
       </Group>
-      <Group title={words.groundsTitle} lead={words.groundsLead}>
-        <RowList
-          name="wiring.grounds"
-          {...wiringLists.grounds}
-          most={12}
-          called={words.ground}
-          add={words.groundAdd}
-        />
+      <Group title={grounds.title} lead={words.groundsLead}>
+        <RowList name="wiring.grounds" list={grounds} most={12} add={words.groundAdd} />
       </Group>
     </>
   );

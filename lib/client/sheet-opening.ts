@@ -22,7 +22,8 @@ export type Opened =
       sheetless: boolean;
     }
   | { kind: "may-not"; why: "role" | "keeper" }
-  | { kind: "gone" | "not-here" };
+  | { kind: "gone" }
+  | { kind: "not-here" };
 
 /** Where a sheet can come from, and who asks. */
 export interface Ground {

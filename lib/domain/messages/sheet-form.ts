@@ -1,6 +1,5 @@
-import type { PartKey, SectionKey } from "../sheet/draft-sections";
+import type { SectionKey } from "../sheet/draft-sections";
 import type { Field } from "../sheet/field";
-import { gearNames } from "./sheet-gear";
 
 const plural = (count: number, one: string, many = `${one}s`) => `${count} ${count === 1 ? one : many}`;
 
@@ -15,14 +14,6 @@ const sections: Record<SectionKey, string> = {
   wiring: "Wiring",
   manual: "The car’s own manual",
   look: "Look it over",
-};
-
-const parts: Record<PartKey, string> = {
-  coach: "Coach",
-  car: "Car",
-  ...gearNames,
-  wiring: "Wiring",
-  procedure: "The car’s own manual",
 };
 
 const number = "This is not a number. Enter the figure alone, or choose Not known.";
@@ -48,15 +39,6 @@ export const sheetFormWords = {
   editing: (name: string) => `Rig sheet, ${name}`,
   unnamed: "Rig without a name",
   sections,
-  parts,
-  id: "its own history",
-  rows: {
-    socket: "contact",
-    segments: "segment",
-    conductors: "wire",
-    splices: "splice",
-    grounds: "ground point",
-  },
   name: {
     label: "Name of the rig",
     where: "What the people who walk it call it: a unit number, a nickname, the bay that it stands in.",
@@ -152,15 +134,12 @@ export const sheetFormWords = {
   replacedHint: "Empties these fields and begins a history of its own.",
 
   // Wiring
-  socketTitle: "Contacts of the coach’s socket",
   socketLead:
     "What each contact does by a tester with a bulb, one signal at a time. A color is not a measurement.",
   socketFill: (count: number) => `Add its ${count} contacts`,
   contactAdd: "Add a contact",
-  segmentsTitle: "Segments, from the coach to the lamps",
   segmentsLead:
     "A segment is a run between two places where the wires are joined or plugged. Each wire has a function at either end; they are measured, not read off a color.",
-  segment: (at: number) => `Segment ${at}`,
   segmentAdd: "Add a segment",
   segmentBetween: (from: string, to: string) => `${from} to ${to}`,
   up: "Move toward the coach",
@@ -168,18 +147,11 @@ export const sheetFormWords = {
   remove: "Remove",
   removeAloud: (what: string) => `Remove ${what}`,
   moveAloud: (how: string, what: string) => `${how}: ${what}`,
-  conductors: "Wires",
   conductorsNone: "No wires yet.",
   conductorAdd: "Add a wire",
-  wire: (at: number) => `Wire ${at}`,
-  splice: (at: number) => `Splice ${at}`,
-  contact: (at: number) => `Contact ${at}`,
-  ground: (at: number) => `Ground point ${at}`,
   copyFar: "Measured the same at the far end: copy where it is empty",
-  splices: "Splices",
   splicesLead: "Where wires are joined within this segment, and how.",
   spliceAdd: "Add a splice",
-  groundsTitle: "Ground points",
   groundsLead: "Each point, and every device that hangs on it. The brake unit too.",
   groundAdd: "Add a ground point",
   changes: (color: string, near: string, far: string) =>

@@ -20,10 +20,10 @@ export function draftWarnings(draft: Draft): FieldError[] {
 
 /** An error of a shape as the form tells it: at the field rather than within its value, and in words. */
 export function atField({ pointer, detail }: FieldError): FieldError {
-  const { pointer: field, kind } = placeOf(pointer);
+  const { pointer: at, field } = placeOf(pointer);
   const unreadable = detail.startsWith("Invalid") || detail === "not a finite number";
-  if (unreadable) return { pointer: field, detail: say.unreadable[kind ?? "text"] };
-  return { pointer: field, detail: say.faults[detail] ?? detail };
+  if (unreadable) return { pointer: at, detail: say.unreadable[field?.kind ?? "text"] };
+  return { pointer: at, detail: say.faults[detail] ?? detail };
 }
 
 function oncePerField(errors: readonly FieldError[]): FieldError[] {

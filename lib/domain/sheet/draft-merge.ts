@@ -1,5 +1,6 @@
 import { canonicalText } from "../json";
-import { partIn, parts, wiringLists, type Part } from "./draft-sections";
+import { partIn, parts, type Part } from "./draft-sections";
+import { pointerTo } from "./outline";
 import { SHEET_VERSION, type Sheet } from "./sheet";
 
 /** A field that both people changed, each to something else. Undefined where one of them emptied it. */
@@ -61,17 +62,14 @@ function leaves(sheet: Sheet): Map<string, unknown> {
   for (const part of Object.values(parts)) {
     const values = partIn(sheet, part) ?? {};
     for (const key of keysOf(part))
-      if (values[key] !== undefined) found.set(pointerTo(part, key), values[key]);
+      if (values[key] !== undefined) found.set(pointerTo([...part.path, key]), values[key]);
   }
   return found;
 }
 
-const keysOf = ({ key, fields }: Part) => [
-  "id",
-  ...Object.keys(fields),
-  ...(key === "wiring" ? Object.keys(wiringLists) : []),
-];
-const pointerTo = ({ path }: Part, key: string) => `/${path.replace(".", "/")}/${key}`;
+function keysOf({ fields, lists }: Part): string[] {
+  return ["id", ...Object.keys(fields), ...lists.map(({ key }) => key)];
+}
 
 function fromLeaves(found: ReadonlyMap<string, unknown>): Sheet {
   const sheet: Record<string, unknown> = { v: SHEET_VERSION, name: "" };

@@ -1,58 +1,53 @@
-import { sheetFormWords as say } from "../messages/sheet-form";
-import { conductorWords, spliceWords } from "../messages/sheet-wiring";
+import type { Field } from "./field";
 import type { FieldWords } from "../messages/sheet-vehicles";
-import { isGear } from "./draft";
-import { parts, sectionOf, wiringLists, type PartKey, type SectionKey } from "./draft-sections";
-import type { Field, Fields } from "./field";
-import { conductorFields, spliceFields } from "./wiring";
+import { sectionOf, type SectionKey } from "./draft-sections";
+import type { Fields } from "./field";
+import { outline, pointerTo, type ListOutline } from "./outline";
 
 /** Where a pointer into a sheet leads: the field itself, what kind it is, and how a person finds it in the form. */
 export interface Place {
   /** To the field, where the pointer led into its value. */
   pointer: string;
-  kind: Field["kind"] | null;
+  field: Field | null;
   section: SectionKey;
   /** “Coach: GCWR”, “Wiring, segment 2: Gauge, AWG”. */
   words: string;
 }
 
-type Table = { fields: Fields; words: Record<string, FieldWords> };
-
-const innerLists: Record<string, Table> = {
-  conductors: { fields: conductorFields, words: conductorWords },
-  splices: { fields: spliceFields, words: spliceWords },
-};
+type Table = { fields: Fields; words: Record<string, FieldWords>; lists: readonly ListOutline[] };
 
 /** Reads a pointer into a sheet. One that leads nowhere is said as it stands. */
 export function placeOf(pointer: string): Place {
   const steps = pointer.split("/").slice(1);
-  const section = sectionOf(pointer);
-  const [top = ""] = steps;
-  if (top === "name" || top === "notes") {
-    return { pointer: `/${top}`, kind: "text", section, words: say[top].label };
-  }
-  const gear = top === "gear";
-  const key = (gear ? steps[1] : top) as PartKey;
-  if (!(key in parts) || isGear(key) !== gear) return { pointer, kind: null, section, words: pointer };
-  return within(steps, gear ? 2 : 1, parts[key], say.parts[key], section);
+  const part =
+    outline.find(({ path }) => path.length > 0 && path.every((step, at) => steps[at] === step)) ??
+    outline[0]!;
+  return (
+    within(steps, part.path.length, part, part.title, sectionOf(pointer)) ?? {
+      pointer,
+      field: null,
+      section: sectionOf(pointer),
+      words: pointer,
+    }
+  );
 }
 
-function within(steps: string[], at: number, table: Table, over: string, section: SectionKey): Place {
+function within(steps: string[], at: number, table: Table, over: string, section: SectionKey): Place | null {
   const name = steps[at];
-  const to = (length: number) => `/${steps.slice(0, length).join("/")}`;
-  if (name === undefined) return { pointer: to(at), kind: null, section, words: over };
-  const list = listOf(name);
-  if (list && !(name in table.fields)) {
+  const whole = (words: string, length: number): Place => ({
+    pointer: pointerTo(steps.slice(0, length)),
+    field: null,
+    section,
+    words,
+  });
+  if (name === undefined) return at > 0 ? whole(over, at) : null;
+  const list = table.lists.find(({ key }) => key === name);
+  if (list) {
     const row = steps[at + 1];
-    const called = `${over}, ${say.rows[name as keyof typeof say.rows]}`;
-    if (row === undefined) return { pointer: to(at + 1), kind: null, section, words: called };
-    return within(steps, at + 2, list, `${called} ${Number(row) + 1}`, section);
+    if (row === undefined) return whole(`${over}, ${list.title}`, at + 1);
+    return within(steps, at + 2, list, `${over}, ${list.item(Number(row) + 1)}`, section);
   }
   const field = table.fields[name];
-  const label = table.words[name]?.label ?? (name === "id" ? say.id : name);
-  return { pointer: to(at + 1), kind: field?.kind ?? null, section, words: `${over}: ${label}` };
-}
-
-function listOf(name: string): Table | undefined {
-  return innerLists[name] ?? (wiringLists as Record<string, Table>)[name];
+  if (!field) return null;
+  return { ...whole(`${over}: ${table.words[name]!.label}`, at + 1), field };
 }

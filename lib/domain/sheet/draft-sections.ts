@@ -1,18 +1,9 @@
-import {
-  contactWords,
-  groundWords,
-  procedureWords,
-  segmentWords,
-  wiringWords,
-} from "../messages/sheet-wiring";
-import { gearWords } from "../messages/sheet-gear";
-import { carWords, coachWords, type FieldWords } from "../messages/sheet-vehicles";
+import type { FieldWords } from "../messages/sheet-vehicles";
 import type { Fields } from "./field";
-import { gearFields, gearKeys, type GearKey } from "./gear";
+import type { GearKey } from "./gear";
+import { at, outline, type ListOutline } from "./outline";
 import { procedureFields } from "./procedure";
 import type { Sheet } from "./sheet";
-import { carFields, coachFields } from "./vehicles";
-import { contactFields, groundFields, segmentFields, wiringFields } from "./wiring";
 
 /** What the form asks in turn, in walking order; `look` is where it is looked over and saved. */
 export const sectionKeys = [
@@ -34,13 +25,15 @@ export type PartKey = "coach" | "car" | GearKey | "wiring" | "procedure";
 /** One thing of the sheet with its fields: those that the list hangs on first, the rest for limits and geometry. */
 export interface Part {
   key: PartKey;
-  /** Where it stands in a sheet, as the form names it. */
-  path: string;
+  title: string;
+  /** Where it stands in a sheet. */
+  path: readonly string[];
   fields: Fields;
   words: Record<string, FieldWords>;
   first: readonly string[];
   /** Whether it has a history of its own, and so an id. */
   thing: boolean;
+  lists: readonly ListOutline[];
 }
 
 // What the list, the limits that rule a rig out, and someone who has to know the thing again go by.
@@ -89,43 +82,13 @@ const first: Record<PartKey, readonly string[]> = {
   procedure: Object.keys(procedureFields),
 };
 
-const gearPart = (key: GearKey): Part => ({
-  key,
-  path: `gear.${key}`,
-  fields: gearFields[key],
-  words: gearWords[key],
-  first: first[key],
-  thing: true,
-});
-
-export const parts: Record<PartKey, Part> = {
-  coach: {
-    key: "coach",
-    path: "coach",
-    fields: coachFields,
-    words: coachWords,
-    first: first.coach,
-    thing: true,
-  },
-  car: { key: "car", path: "car", fields: carFields, words: carWords, first: first.car, thing: true },
-  ...(Object.fromEntries(gearKeys.map((key) => [key, gearPart(key)])) as Record<GearKey, Part>),
-  wiring: {
-    key: "wiring",
-    path: "wiring",
-    fields: wiringFields,
-    words: wiringWords,
-    first: first.wiring,
-    thing: false,
-  },
-  procedure: {
-    key: "procedure",
-    path: "procedure",
-    fields: procedureFields,
-    words: procedureWords,
-    first: first.procedure,
-    thing: false,
-  },
-};
+/** The parts of a sheet that the form asks field by field. */
+export const parts = Object.fromEntries(
+  outline.flatMap((part) => {
+    const key = part.path.at(-1) as PartKey | undefined;
+    return key ? [[key, { ...part, key, first: first[key] } satisfies Part]] : [];
+  }),
+) as unknown as Record<PartKey, Part>;
 
 /** The parts of each section. */
 export const sectionParts: Record<SectionKey, readonly PartKey[]> = {
@@ -141,19 +104,9 @@ export const sectionParts: Record<SectionKey, readonly PartKey[]> = {
   look: [],
 };
 
-/** The lists of the wiring, with the fields of one row. */
-export const wiringLists = {
-  socket: { fields: contactFields, words: contactWords },
-  segments: { fields: segmentFields, words: segmentWords },
-  grounds: { fields: groundFields, words: groundWords },
-} as const;
-
-type Loose = Record<string, unknown> | undefined;
-
 /** What a sheet, or a draft of one, holds of a part. */
-export function partIn(sheet: Sheet, { key }: Pick<Part, "key">): Loose {
-  if (key in gearFields) return (sheet.gear as Record<string, Loose> | undefined)?.[key];
-  return sheet[key as "coach"] as Loose;
+export function partIn(sheet: Sheet, { path }: Pick<Part, "path">): Record<string, unknown> | undefined {
+  return at(sheet, path);
 }
 
 /** Whether a value has been entered, not known included. */

@@ -1,7 +1,7 @@
 import { plainText } from "../json";
 import { fieldsShown, isFilled, partIn, parts, partShows, type Part } from "./draft-sections";
 import type { Fields } from "./field";
-import { gearFields, gearKeys } from "./gear";
+import { gearKeys } from "./gear";
 import type { Sheet } from "./sheet";
 import { conductorFields, contactFields, groundFields, segmentFields, spliceFields } from "./wiring";
 
@@ -114,6 +114,3 @@ export function withoutIds(sheet: Sheet): Sheet {
 }
 
 const structuredCloneOf = <T>(value: T): T => JSON.parse(JSON.stringify(value)) as T;
-
-/** A part's keys in a table of gear. */
-export const isGear = (key: string): key is keyof typeof gearFields => key in gearFields;
