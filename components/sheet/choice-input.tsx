@@ -54,52 +54,38 @@ function List({ id, value, onChange, describedBy, invalid, answers }: AnswersPro
   );
 }
 
-function Buttons({ id, label, value, onChange, describedBy, invalid, answers }: AnswersProps) {
-  const filled = answers.some((answer) => answer.value === value);
+function Buttons({ id, value, onChange, describedBy, invalid, answers }: AnswersProps) {
   return (
-    <>
-      <div
-        id={id}
-        tabIndex={-1}
-        role="radiogroup"
-        aria-labelledby={`${id}-label`}
-        aria-describedby={describedBy}
-        className={`grid grid-cols-[repeat(auto-fit,minmax(min(100%,7rem),1fr))] gap-2 outline-none ${invalid ? "border-l-8 border-ink pl-2" : ""}`}
-      >
-        {answers.map(({ key, label: answer, value: means }) => (
-          <label
-            key={key}
-            className={`group relative flex min-h-13 items-center gap-2.5 rounded-[3px] border-2 border-edge px-3 py-1.5 text-base leading-tight font-semibold has-checked:border-solid has-checked:border-ink has-checked:bg-ink has-checked:text-paper ${key === NOT_KNOWN ? "border-dashed" : ""}`}
-          >
-            {/* It lies over its label, so that the whole button shows the focus and takes the touch. */}
-            <input
-              type="radio"
-              name={id}
-              className="absolute -inset-0.5 cursor-pointer appearance-none rounded-[3px]"
-              checked={means === value}
-              onChange={() => onChange(means)}
-            />
-            <span
-              aria-hidden="true"
-              className="grid size-4.5 shrink-0 place-items-center rounded-full border-2 border-current"
-            >
-              <span className="hidden size-2 rounded-full bg-current group-has-checked:block" />
-            </span>
-            <span className="min-w-0">{answer}</span>
-          </label>
-        ))}
-      </div>
-      {/* Its place stays where there is nothing to clear, so that nothing jumps under a thumb. */}
-      <div className="flex min-h-11 justify-end">
-        <button
-          type="button"
-          aria-label={words.clearAloud(label)}
-          onClick={() => onChange("")}
-          className={`min-h-11 px-2 text-base underline underline-offset-4 ${filled ? "" : "invisible"}`}
+    <div
+      id={id}
+      tabIndex={-1}
+      role="radiogroup"
+      aria-labelledby={`${id}-label`}
+      aria-describedby={describedBy}
+      className={`grid gap-2 outline-none ${answers.length > 3 ? "grid-cols-[repeat(auto-fill,minmax(min(100%,10rem),1fr))]" : "grid-cols-[repeat(auto-fit,minmax(min(100%,6.5rem),1fr))]"} ${invalid ? "border-l-8 border-ink pl-2" : ""}`}
+    >
+      {answers.map(({ key, label: answer, value: means }) => (
+        <label
+          key={key}
+          className={`group relative flex min-h-13 items-center gap-2 rounded-[3px] border-2 border-edge px-2.5 py-1.5 text-base leading-tight font-semibold has-checked:border-solid has-checked:border-ink has-checked:bg-ink has-checked:text-paper ${key === NOT_KNOWN ? "border-dashed" : ""}`}
         >
-          {words.clear}
-        </button>
-      </div>
-    </>
+          {/* It lies over its label, so that the whole button shows the focus and takes the touch. */}
+          <input
+            type="radio"
+            name={id}
+            className="absolute -inset-0.5 cursor-pointer appearance-none rounded-[3px]"
+            checked={means === value}
+            onChange={() => onChange(means)}
+          />
+          <span
+            aria-hidden="true"
+            className="grid size-4.5 shrink-0 place-items-center rounded-full border-2 border-current"
+          >
+            <span className="hidden size-2 rounded-full bg-current group-has-checked:block" />
+          </span>
+          <span className="min-w-0">{answer}</span>
+        </label>
+      ))}
+    </div>
   );
 }

@@ -17,7 +17,9 @@ export function Contents({ section, faults, onGo }: ContentsProps) {
       <ol>
         {sectionKeys.map((key) => {
           const { filled, of } = progressOf(sheet, key);
-          const wrong = faults.filter(({ pointer }) => sectionOf(pointer) === key).length;
+          // A name that nobody has given yet is not a mistake.
+          const told = faults.filter(({ pointer }) => sheet.name || pointer !== "/name");
+          const wrong = told.filter(({ pointer }) => sectionOf(pointer) === key).length;
           const current = key === section;
           return (
             <li key={key}>

@@ -56,7 +56,12 @@ export const FieldLine = memo(function FieldLine({
   };
   return (
     <div className={compact ? "min-w-0" : "border-b border-rule py-4"}>
-      {labels(field, id, of.label)}
+      <div className="flex items-start justify-between gap-3">
+        {labels(field, id, of.label)}
+        {hasButtons(field, compact) && (
+          <Clear label={of.label} shown={input.value !== ""} onClear={() => control.onChange("")} />
+        )}
+      </div>
       {!compact && (
         <p id={`${id}-where`} className="mb-2 max-w-prose text-base leading-snug text-soft">
           {of.where}
@@ -90,6 +95,26 @@ function labels({ kind }: Field, id: string, label: string): ReactNode {
   );
 }
 
+function hasButtons(field: Field, compact: boolean): boolean {
+  return field.kind === "yes-no" || (field.kind === "choice" && !compact && field.of.length <= 4);
+}
+
+type ClearProps = { label: string; shown: boolean; onClear: () => void };
+
+/** Takes an answer back. Its place stays where there is none, so that nothing jumps under a thumb. */
+function Clear({ label, shown, onClear }: ClearProps) {
+  return (
+    <button
+      type="button"
+      aria-label={words.clearAloud(label)}
+      onClick={onClear}
+      className={`-my-2.5 min-h-11 shrink-0 px-2 text-base underline underline-offset-4 ${shown ? "" : "invisible"}`}
+    >
+      {words.clear}
+    </button>
+  );
+}
+
 function inputFor(field: Field, input: InputProps, compact: boolean): ReactNode {
   switch (field.kind) {
     case "text":
@@ -98,7 +123,7 @@ function inputFor(field: Field, input: InputProps, compact: boolean): ReactNode 
     case "date":
       return <TypedInput {...input} field={field} />;
     case "choice":
-      return <ChoiceInput {...input} options={field.of} asList={compact || field.of.length > 4} />;
+      return <ChoiceInput {...input} options={field.of} asList={!hasButtons(field, compact)} />;
     case "yes-no":
       return <ChoiceInput {...input} options={null} asList={false} />;
     case "photo":

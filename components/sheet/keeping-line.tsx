@@ -12,5 +12,5 @@ export function KeepingLine({ keeping: { state, at } }: { keeping: KeepingState 
     );
   }
   if (at === null) return state === "idle" ? words.untouched : words.keeping;
-  return <span className="tabular">{words.kept(clockTimeText(Date.parse(at)))}</span>;
+  return words.kept(clockTimeText(Date.parse(at)));
 }

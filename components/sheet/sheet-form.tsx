@@ -6,7 +6,7 @@ import { sheetResolver } from "@/lib/client/sheet-resolver";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import { sheetOf, withBlanks, type Draft } from "@/lib/domain/sheet/draft";
 import { draftErrors, draftWarnings } from "@/lib/domain/sheet/draft-check";
-import { sectionKeys } from "@/lib/domain/sheet/draft-sections";
+import { progressOf, sectionKeys } from "@/lib/domain/sheet/draft-sections";
 import { Contents } from "./contents";
 import { DraftDeskContext } from "./draft-context";
 import { KeepingLine } from "./keeping-line";
@@ -47,15 +47,18 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
     member,
     at: new Date().toISOString(),
   });
-  const first = useRef(true);
+  const [begun] = useState(() => JSON.stringify(form.getValues()));
+  const changed = useRef(false);
   useEffect(() => {
-    if (!first.current) keeper.changed(read);
-    first.current = false;
+    changed.current ||= JSON.stringify(values) !== begun;
+    if (changed.current) keeper.changed(read);
     // Only what was typed, or another base, makes it another draft.
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [values, base]);
   // A draft that was begun before may hold what cannot be so, which is said at once.
-  useEffect(() => void form.trigger(), [form, generation]);
+  useEffect(() => {
+    if (form.getValues("name")) void form.trigger();
+  }, [form, generation]);
 
   const replace = (draft: Draft) => {
     form.reset(withBlanks(draft));
@@ -65,6 +68,7 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
   };
   const sheet = sheetOf(values);
   const at = sectionKeys.indexOf(section);
+  const { filled, of } = progressOf(sheet, section);
   return (
     <FormProvider {...form}>
       <DraftDeskContext value={{ rig: start.rig, isNew, sheet, replace }}>
@@ -73,7 +77,7 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
             title={sheet.name ? words.editing(sheet.name) : isNew ? words.newTitle : words.title}
             sub={<KeepingLine keeping={keeping} />}
           />
-          <div className="@4xl:grid @4xl:grid-cols-[15rem_minmax(0,1fr)] @4xl:gap-8">
+          <div className="@4xl:grid @4xl:grid-cols-[17rem_minmax(0,1fr)] @4xl:gap-8">
             <div className="hidden @4xl:sticky @4xl:top-4 @4xl:block @4xl:self-start">
               <Contents section={section} faults={faults} onGo={go} />
             </div>
@@ -94,13 +98,16 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
                   <Contents section={section} faults={faults} onGo={go} />
                 </div>
               </details>
-              <h2
-                ref={heading}
-                tabIndex={-1}
-                className="mb-2 text-2xl leading-tight font-extrabold outline-none"
-              >
-                {words.sections[section]}
-              </h2>
+              <div className="mb-2 flex flex-wrap items-baseline justify-between gap-x-4">
+                <h2
+                  ref={heading}
+                  tabIndex={-1}
+                  className="text-2xl leading-tight font-extrabold outline-none"
+                >
+                  {words.sections[section]}
+                </h2>
+                {of > 0 && <p className="tabular text-soft">{words.progress(filled, of)}</p>}
+              </div>
               <SectionBody
                 key={`${section} ${generation}`}
                 section={section}

@@ -75,7 +75,7 @@ const first: Record<PartKey, readonly string[]> = {
   cord: ["shape", "carEnd"],
   chargeLine: ["there", "plug", "fuseAmps"],
   airLine: ["there"],
-  brake: ["family", "manualApply", "monitor", "boosterMode", "poweredFrom"],
+  brake: ["family", "proportional", "manualApply", "monitor", "boosterMode", "poweredFrom"],
   breakaway: ["there", "anchor", "switchAt", "battery"],
   wiring: ["style", "converter", "converterAt", "stopFeedRelay"],
   lightBar: ["heldBy", "power"],
