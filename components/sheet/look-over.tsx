@@ -4,6 +4,7 @@ import { Group } from "./part-fields";
 import { PlaceLinks } from "./place-links";
 import { SavePanel } from "./save-panel";
 import type { SectionBodyProps } from "./section-body";
+import { WhatComesOut } from "./what-comes-out";
 
 /** Everything before saving: what cannot be so, what rules the rig out, what is missing, what comes of it. */
 export function LookOver(props: Omit<SectionBodyProps, "section">) {
@@ -15,6 +16,7 @@ export function LookOver(props: Omit<SectionBodyProps, "section">) {
           <PlaceLinks errors={faults} onGo={onGo} />
         </Group>
       )}
+      <WhatComesOut wrong={faults.length > 0} />
       <Group title={words.missingTitle}>
         <Missing onGo={onGo} />
       </Group>

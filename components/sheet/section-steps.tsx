@@ -8,7 +8,7 @@ type SectionStepsProps = { at: number; onGo: (section: SectionKey) => void };
 export function SectionSteps({ at, onGo }: SectionStepsProps) {
   const [before, after] = [sectionKeys[at - 1], sectionKeys[at + 1]];
   return (
-    <div className="by-hand sticky bottom-0 -mx-4 mt-6 flex gap-2.5 border-t-hair border-ink bg-paper px-4 pt-2.5 pb-[max(0.625rem,env(safe-area-inset-bottom))] @4xl:static @4xl:mx-0 @4xl:px-0 print:hidden">
+    <div className="by-hand sticky bottom-0 z-1 -mx-4 mt-6 flex flex-wrap gap-2.5 border-t-hair border-ink bg-paper px-4 pt-2.5 pb-[max(0.625rem,env(safe-area-inset-bottom))] @max-[14rem]:static @4xl:static @4xl:mx-0 @4xl:px-0 print:hidden">
       <Button
         size="desk"
         variant="quiet"
@@ -18,15 +18,11 @@ export function SectionSteps({ at, onGo }: SectionStepsProps) {
       >
         {words.previous}
       </Button>
-      <Button
-        size="desk"
-        variant="good"
-        disabled={!after}
-        onClick={() => after && onGo(after)}
-        className="min-h-14 flex-[2]"
-      >
-        {after ? `${words.next}: ${words.sections[after]}` : words.next}
-      </Button>
+      {after && (
+        <Button size="desk" variant="good" onClick={() => onGo(after)} className="min-h-14 flex-[2]">
+          {`${words.next}: ${words.sections[after]}`}
+        </Button>
+      )}
     </div>
   );
 }
