@@ -36,8 +36,8 @@ export function WhatComesOut({ wrong }: { wrong: boolean }) {
         </div>
       )}
       <Group title={words.listTitle}>
-        <p className="tabular mt-2">{words.listCount(hookUp.short.length, hookUp.full.length)}</p>
-        <p className="tabular">{words.listOthers(walks["re-check"].full.length, walks.unhook.full.length)}</p>
+        <p className="mt-2">{words.listCount(hookUp.short.length, hookUp.full.length)}</p>
+        <p>{words.listOthers(walks["re-check"].full.length, walks.unhook.full.length)}</p>
       </Group>
     </>
   );
