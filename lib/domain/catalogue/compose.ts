@@ -1,9 +1,9 @@
 import { purposes, type Purpose } from "../entry";
-import { plainDocument } from "../plain-list";
 import { stationKeys, type Check, type RevisionDocument, type StationKey } from "../revision";
 import type { Sheet } from "../sheet/sheet";
 import { CATALOGUE } from "./catalogue";
 import { checksOf } from "./checks";
+import { documentOf } from "./document";
 import { factsOf } from "./facts";
 import { ordersFor } from "./order";
 
@@ -25,5 +25,5 @@ export function compose(sheet: Sheet): RevisionDocument {
       listed.filter((one) => one.station === station && walked.has(one.check)).map(({ check }) => check),
     ]),
   ) as Record<StationKey, Check[]>;
-  return plainDocument({ sheet: { ...sheet }, catalogue: CATALOGUE, checks, walks });
+  return documentOf({ sheet: { ...sheet }, catalogue: CATALOGUE, checks, walks });
 }

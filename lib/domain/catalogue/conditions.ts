@@ -24,7 +24,7 @@ const conditions = {
   stowsOnCoach: ({ stowsOn }) => equals(stowsOn, "coach"),
   shortPair: ({ shortPair }) => shortPair,
   brake: ({ brake }) => (brake === null ? null : brake !== "none"),
-  brakeBox: brakeIs("portable-proportional", "portable-on-off"),
+  brakeBox: brakeIs("portable"),
   brakeBuiltIn: brakeIs("installed-vacuum"),
   brakeAir: brakeIs("air"),
   brakeHydraulic: brakeIs("hydraulic"),
