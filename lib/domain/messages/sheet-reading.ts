@@ -1,5 +1,36 @@
-/** What is said of a sheet that cannot be taken as it is. */
+/** What a sheet is read back with: its parts, and what stands where nothing does. */
 export const sheetReadingWords = {
+  rig: "Rig",
+  coach: "Coach",
+  car: "Car",
+  wiring: "Wiring",
+  procedure: "The car’s own manual",
+  name: "Name",
+  notes: "Notes",
+  socket: "Coach’s socket, as measured",
+  segments: "Segments",
+  grounds: "Ground points",
+  conductors: "Wires",
+  splices: "Splices",
+  contact: (number: number) => `Contact ${number}`,
+  segment: (number: number) => `Segment ${number}`,
+  ground: (number: number) => `Ground point ${number}`,
+  conductor: (number: number) => `Wire ${number}`,
+  splice: (number: number) => `Splice ${number}`,
+  /** Two sheets name two things where this differs. */
+  identity: "Which one it is",
+  numbered: (id: string) => `Book number ${id.slice(0, 8)}`,
+  notNumbered: "Not in the book",
+  /** An item of a list that the other sheet has. */
+  notThere: "Not there",
+  yes: "Yes",
+  no: "No",
+  notKnown: "Not known",
+  notLooked: "Nobody has looked yet",
+  photograph: (kilobytes: number) => `Photograph, ${kilobytes} kB`,
+  enteredAs: (shown: string, entered: string) => `${shown}, entered as ${entered}`,
+  months: ["Jan", "Feb", "Mar", "Apr", "May", "Jun", "Jul", "Aug", "Sep", "Oct", "Nov", "Dec"],
+  // What is said of a sheet that cannot be taken as it is.
   newer: (version: number, newest: number) =>
     `It is of version ${version}; the newest known here is ${newest}.`,
   twice: "This id stands on the sheet already. Each thing has its own.",
