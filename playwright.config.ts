@@ -5,8 +5,8 @@ const asRoot = process.getuid?.() === 0 ? ["--no-sandbox"] : [];
 export default defineConfig({
   testDir: "tests/e2e",
   testMatch: "**/*.test.ts",
-  // The product under test is stopped and started: one test at a time.
-  workers: 1,
+  // Each file has a product of its own, which its tests stop and start: files side by side, tests one after another.
+  workers: 2,
   // One more try: a machine that stood still for a moment is not a fault. The report counts such a test as flaky.
   retries: 1,
   timeout: 60_000,

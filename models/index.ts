@@ -9,6 +9,9 @@ import { PhotoObject } from "./photo-object";
 import { Revision } from "./revision";
 import { Rig } from "./rig";
 import { Session } from "./session";
+import { SheetPhoto } from "./sheet-photo";
+import { Thing } from "./thing";
+import { ThingState } from "./thing-state";
 import { Walk } from "./walk";
 
 const tables = {
@@ -23,6 +26,9 @@ const tables = {
   Fork,
   PhotoEntry,
   PhotoObject,
+  Thing,
+  ThingState,
+  SheetPhoto,
 };
 export type Tables = typeof tables;
 
@@ -40,6 +46,7 @@ export function bindModels(sequelize: Sequelize): Tables {
   Rig.belongsTo(Organisation, { as: "keeper", foreignKey: "keeperId" });
   Rig.belongsTo(Organisation, { as: "builder", foreignKey: "builderId" });
   Revision.belongsTo(Rig, { as: "rig", foreignKey: "rigId" });
+  Revision.belongsTo(Member, { as: "member", foreignKey: "memberId" });
   Walk.belongsTo(Rig, { as: "rig", foreignKey: "rigId" });
   Walk.belongsTo(Revision, { as: "revision", foreignKey: "revisionId" });
   Walk.belongsTo(Member, { as: "member", foreignKey: "memberId" });
@@ -48,5 +55,9 @@ export function bindModels(sequelize: Sequelize): Tables {
   Fork.belongsTo(Walk, { as: "walk", foreignKey: "walkId" });
   PhotoEntry.belongsTo(Walk, { as: "walk", foreignKey: "walkId" });
   PhotoObject.belongsTo(Organisation, { as: "organisation", foreignKey: "organisationId" });
+  Thing.belongsTo(Organisation, { as: "organisation", foreignKey: "organisationId" });
+  ThingState.belongsTo(Thing, { as: "thing", foreignKey: "thingId" });
+  ThingState.belongsTo(Rig, { as: "rig", foreignKey: "rigId" });
+  SheetPhoto.belongsTo(Rig, { as: "rig", foreignKey: "rigId" });
   return tables;
 }

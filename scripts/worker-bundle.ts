@@ -8,7 +8,13 @@ import { PlainError, root } from "./environment";
 type Precached = { url: string; revision: string | null };
 
 /** The documents a phone must be able to open with neither network nor server. */
-const documents = { "/": "index", "/field": "field", "/offline": "offline", "/sign-in": "sign-in" };
+const documents = {
+  "/": "index",
+  "/field": "field",
+  "/desk/sheet": "desk/sheet",
+  "/offline": "offline",
+  "/sign-in": "sign-in",
+};
 
 /** Bundles `service-worker/` for a build, with the list of what to keep on the phone written into it. */
 export async function bundleWorker(distDir: string): Promise<void> {

@@ -13,6 +13,7 @@ export function planFor(asked: Asked, keptFiles: ReadonlySet<string>): Plan {
   if (method !== "GET" || !sameOrigin || fromRouter || path.startsWith("/api/")) return "leave";
   if (keptFiles.has(path)) return "file";
   if (mode !== "navigate") return "leave";
-  if (path === "/field") return "shell";
+  // Both work from what is on the phone, and the network may be too slow to wait for.
+  if (path === "/field" || path === "/desk/sheet") return "shell";
   return path === "/" || path === "/sign-in" ? "network-else-shell" : "network-else-offline";
 }

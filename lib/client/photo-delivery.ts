@@ -41,16 +41,25 @@ export async function deliver(
     await shelf.setState(photo, "lost");
     return { kind: "answered", value: null };
   }
-  const ask = () => call(photoAnswerShape, "POST", `/api/photos/${photo.sha256}`, undefined, fetch);
+  const answer = await sendPhoto(photo.sha256, bytes, fetch);
+  if (answer.kind !== "answered") return answer;
+  await shelf.setState(photo, "sent");
+  return answer;
+}
+
+/** Sends a photograph's bytes, unless the server has them. Answered means that it says so. */
+export async function sendPhoto(
+  sha256: string,
+  bytes: ArrayBuffer,
+  fetch: Fetch = globalThis.fetch.bind(globalThis),
+): Promise<Answer<unknown>> {
+  const ask = () => call(photoAnswerShape, "POST", `/api/photos/${sha256}`, undefined, fetch);
   let answer = await ask();
   if (answer.kind === "answered" && "put" in answer.value) {
     if (!(await put(answer.value.put, bytes, fetch))) return { kind: "unreached" };
     answer = await ask();
   }
-  if (answer.kind !== "answered") return answer;
-  if ("put" in answer.value) return { kind: "unreached" };
-  await shelf.setState(photo, "sent");
-  return answer;
+  return answer.kind === "answered" && "put" in answer.value ? { kind: "unreached" } : answer;
 }
 
 async function put({ url, method, headers }: PhotoPut, body: ArrayBuffer, fetch: Fetch): Promise<boolean> {

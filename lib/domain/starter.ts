@@ -1,17 +1,10 @@
-import { plainText } from "./json";
 import * as z from "zod/mini";
-import type { Check, RevisionDocument } from "./revision";
-import * as check from "./plain-checks";
-import { plainDocument, type PlainList } from "./plain-list";
-import * as own from "./starter-checks";
-
-export const hitches = ["direct", "ball", "pintle"] as const;
-export const brakes = ["portable", "built-in", "none"] as const;
-export const lampings = ["diodes", "bulbs", "light-bar", "trailer-plug"] as const;
-
-export type Hitch = (typeof hitches)[number];
-export type Brake = (typeof brakes)[number];
-export type Lamping = (typeof lampings)[number];
+import { compose } from "./catalogue/compose";
+import { plainText } from "./json";
+import type { RevisionDocument } from "./revision";
+import { brakeFamilies, couplings } from "./sheet/gear";
+import { SHEET_VERSION, type Sheet } from "./sheet/sheet";
+import { wiringStyles } from "./sheet/wiring";
 
 /** The most characters of what someone may write here. */
 export const STARTER = { name: 60, page: 20, endState: 300 } as const;
@@ -29,96 +22,32 @@ export const manualShape = z.discriminatedUnion("says", [
 ]);
 export type Manual = z.infer<typeof manualShape>;
 
-/** The few answers that a plain list is made of. */
+/** The few answers that a first sheet is made of. */
 export const starterShape = z.object({
   name: words(STARTER.name),
-  hitch: z.enum(hitches),
-  brake: z.enum(brakes),
-  lamps: z.enum(lampings),
+  hitch: z.enum(couplings),
+  brake: z.enum(brakeFamilies),
+  lamps: z.enum(wiringStyles),
   /** Whether an air line runs from the coach to the car. */
   airLine: z.boolean(),
   manual: manualShape,
 });
 export type StarterAnswers = z.infer<typeof starterShape>;
 
-/**
- * A plain list from a few answers: the same answers make the same document. It knows no ratings, no measures and no
- * maker; the sheet that is filled in later takes its place as a new revision.
- */
-export function starterDocument(answers: StarterAnswers): RevisionDocument {
-  const parts = partsOf(answers);
-  return plainDocument({
-    sheet: sheetOf(answers),
-    catalogue: "plain 1",
-    ...stationsOf(parts),
-    walks: walksOf(parts),
-  });
-}
-
-/** The checks that the answers decide; a list without one has nothing there. */
-function partsOf({ hitch, brake, lamps, airLine, manual }: StarterAnswers) {
-  const manualHold = { how: [], forbidden: [own.manualForbids], "not-recorded": [own.manualNotRecorded] };
-  const lampGear = { diodes: [], bulbs: [], "light-bar": [own.lightBar], "trailer-plug": [own.trailerPlug] };
+/** The sheet that a few answers come to: no ratings, no measures, and whatever else is not known stays open. */
+export function starterSheet({ name, hitch, brake, lamps, airLine, manual }: StarterAnswers): Sheet {
   return {
-    manual: manualHold[manual.says],
-    receiver: [own.receiverPin, ...{ direct: [], ball: [own.ball], pintle: [own.pintle] }[hitch]],
-    cord: [brake === "none" ? own.cord : check.cordAndLanyard, ...(airLine ? [check.airLine] : [])],
-    endState: manual.says === "how" ? [own.endState(manual.page, manual.endState)] : [],
-    brake: [{ portable: own.brakeBox, "built-in": own.brakeBuiltIn, none: own.brakeMissing }[brake]],
-    lampGear: lampGear[lamps],
-  };
-}
-
-type Parts = ReturnType<typeof partsOf>;
-
-const arms = [check.arm("left"), check.arm("right")];
-
-function stationsOf({ manual, receiver, cord, endState, brake, lampGear }: Parts): Pick<PlainList, "checks"> {
-  return {
-    checks: {
-      "coach-tail": [...manual, ...receiver, check.barStowed],
-      "car-nose": arms,
-      "cables-and-cord": [check.cables, ...cord, check.cordJacket, check.linesOff],
-      "car-cabin": [...endState, ...brake, check.carHeld],
-      pull: [check.rolling, check.wheelHeat],
-      "car-tail": [...lampGear, check.lamps],
-      "last-look": [check.joints, check.tires],
-    },
-  };
-}
-
-function walksOf({ manual, receiver, cord, endState, brake, lampGear }: Parts): PlainList["walks"] {
-  const gear = [...manual, ...receiver, ...arms, check.cables, ...cord];
-  const hookUp: Check[] = [
-    ...gear,
-    check.cordJacket,
-    ...endState,
-    ...brake,
-    check.rolling,
-    ...lampGear,
-    check.lamps,
-    check.joints,
-    check.tires,
-  ];
-  // The car is held before anything comes off, whatever its manual says about towing.
-  const unhook = [check.carHeld, check.linesOff, check.barStowed];
-  return {
-    "hook-up": hookUp,
-    "re-check": [...gear, ...brake, check.wheelHeat, ...lampGear, check.lamps, check.tires],
-    unhook,
-    delivery: [...hookUp, ...unhook],
-    "yard-out": hookUp,
-    "yard-in": [...unhook, check.tires],
-  };
-}
-
-function sheetOf({ name, hitch, brake, lamps, airLine, manual }: StarterAnswers): RevisionDocument["sheet"] {
-  return {
+    v: SHEET_VERSION,
     name,
-    gear: { towBar: { coupling: hitch }, brake: { family: brake }, airLine },
+    gear: { towBar: { coupling: hitch }, airLine: { there: airLine }, brake: { family: brake } },
     wiring: { style: lamps },
     procedure: manual,
   };
+}
+
+/** The list of a few answers: the same answers make the same document. */
+export function starterDocument(answers: StarterAnswers): RevisionDocument {
+  return compose(starterSheet(answers));
 }
 
 /** What someone typed as a list can hold it: one line, no longer than this, no half of an emoji. */

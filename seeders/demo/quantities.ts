@@ -1,17 +1,20 @@
-/** A quantity in SI as it is computed with, beside the value that was typed in. */
-type Entered<Name extends string> = Record<Name, number> & { entered: { value: number; unit: string } };
+import { quantityOf, type QuantityKind, type QuantityOf } from "@/lib/domain/sheet/quantity";
 
-function quantity<Name extends string>(name: Name, factor: number, unit: string) {
-  return (value: number): Entered<Name> =>
-    ({ [name]: round(value * factor), entered: { value, unit } }) as Entered<Name>;
+function typed<K extends QuantityKind>(kind: K, unit: string) {
+  return (value: number): QuantityOf<K> => {
+    const quantity = quantityOf(kind, value, unit);
+    if (!quantity) throw new Error(`no such unit of ${kind}: ${unit}`);
+    return quantity;
+  };
 }
 
-// A record holds six decimals at the most.
-function round(value: number): number {
-  return Math.round(value * 1e6) / 1e6;
-}
+export const pounds = typed("mass", "lb");
+export const inches = typed("length", "in");
+export const feet = typed("length", "ft");
+export const milesPerHour = typed("speed", "mph");
+export const psi = typed("pressure", "psi");
 
-export const pounds = quantity("massKg", 0.45359237, "lb");
-export const inches = quantity("lengthM", 0.0254, "in");
-export const feet = quantity("lengthM", 0.3048, "ft");
-export const milesPerHour = quantity("speedMps", 0.44704, "mph");
+/** The id of a thing of the demo: a coach, a car or a piece of gear. */
+export function thingId(rig: number, thing: number): string {
+  return `d3300000-0000-4000-8000-000000${rig}${String(thing).padStart(4, "0")}`;
+}

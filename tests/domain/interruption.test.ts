@@ -10,7 +10,10 @@ import {
   type Interruption,
 } from "@/lib/domain/interruption";
 import type { RevisionDocument } from "@/lib/domain/revision";
-import { householdRig } from "@/seeders/demo/household-rig";
+import { compose } from "@/lib/domain/catalogue/compose";
+import { householdSheet } from "@/seeders/demo/sheets/household";
+
+const householdRig = compose(householdSheet);
 
 const MINUTE_MS = 60_000;
 const at = "2026-11-30T10:00:00.000Z";

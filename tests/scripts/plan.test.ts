@@ -12,8 +12,9 @@ const navigation: Asked = {
 
 it.each<[string, Partial<Asked>, string]>([
   ["the field wing opens from the phone", {}, "shell"],
+  ["so does the form of a rig sheet", { path: "/desk/sheet" }, "shell"],
   ["the first page asks the network first", { path: "/" }, "network-else-shell"],
-  ["so does signing in", { path: "/sign-in" }, "network-else-shell"],
+  ["signing in asks it too", { path: "/sign-in" }, "network-else-shell"],
   ["any other page may end at the offline page", { path: "/desk" }, "network-else-offline"],
   ["signing up is one: it does nothing without the network", { path: "/sign-up" }, "network-else-offline"],
   ["a path below the field wing is another page", { path: "/field/x" }, "network-else-offline"],

@@ -1,4 +1,5 @@
-import type { Brake, Hitch, Lamping } from "../starter";
+import type { BrakeFamily, Coupling } from "../sheet/gear";
+import type { WiringStyle } from "../sheet/wiring";
 import { deference } from "./walk";
 
 /** What is wrong with one line of a sign-up. */
@@ -96,15 +97,18 @@ export const starterWords = {
       direct: { label: "Into the receiver", hint: "The bar’s own shank, held by a pin" },
       ball: { label: "On a ball", hint: "A coupler with a latch" },
       pintle: { label: "On a pintle hook", hint: "A ring on a hook with a latch" },
-    } satisfies Record<Hitch, Choice>,
+    } satisfies Record<Coupling, Choice>,
   },
   brake: {
     ask: "What brakes the car while it is towed?",
     choices: {
       portable: { label: "A portable box", hint: "It stands at the pedal" },
-      "built-in": { label: "A brake built into the car" },
+      "installed-vacuum": { label: "Built in, electric", hint: "With a vacuum of its own" },
+      air: { label: "Built in, on the coach’s air" },
+      hydraulic: { label: "A line of fluid from the coach" },
+      surge: { label: "In the tow bar", hint: "By its push or by a cable" },
       none: { label: "Nothing yet", hint: "The list then says: do not tow" },
-    } satisfies Record<Brake, Choice>,
+    } satisfies Record<BrakeFamily, Choice>,
   },
   airLine: {
     ask: "Does an air line run from the coach to the car?",
@@ -117,7 +121,7 @@ export const starterWords = {
       bulbs: { label: "Separate bulbs", hint: "Put into the car’s lamp housings" },
       "light-bar": { label: "A light bar", hint: "Set on the car’s tail and taken off again" },
       "trailer-plug": { label: "Lamps on a trailer plug", hint: "Plugged into a socket on the car" },
-    } satisfies Record<Lamping, Choice>,
+    } satisfies Record<WiringStyle, Choice>,
   },
   manual: {
     ask: "What does the car’s own manual say about towing it on all four wheels?",

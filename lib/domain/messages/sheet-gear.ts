@@ -117,6 +117,10 @@ export const gearWords: { [K in GearKey]: WordsOf<(typeof gearFields)[K]> } = {
       "What kind it is",
       "A box at the pedal, a unit built into the car, or worked by air, fluid or the bar.",
     ),
+    proportional: words(
+      "Brakes in proportion",
+      "In its manual. Proportional follows how hard the coach brakes; the others are on or off.",
+    ),
     manualApply: words("Control in the coach", "A switch or lever that puts the car’s brake on by hand."),
     monitor: words("Monitor in the coach", "A lamp or display that shows what the unit does."),
     boosterMode: words(

@@ -18,15 +18,7 @@ export type Coupling = (typeof couplings)[number];
 
 export const armEnds = ["pin", "quick"] as const;
 
-export const brakeFamilies = [
-  "portable-proportional",
-  "portable-on-off",
-  "installed-vacuum",
-  "air",
-  "hydraulic",
-  "surge",
-  "none",
-] as const;
+export const brakeFamilies = ["portable", "installed-vacuum", "air", "hydraulic", "surge", "none"] as const;
 export type BrakeFamily = (typeof brakeFamilies)[number];
 
 /**
@@ -81,6 +73,7 @@ export const gearFields = {
   airLine: fields({ there, ...piece }),
   brake: fields({
     family: { kind: "choice", of: brakeFamilies },
+    proportional: { kind: "yes-no" },
     manualApply: { kind: "yes-no" },
     monitor: { kind: "yes-no" },
     boosterMode: { kind: "yes-no" },

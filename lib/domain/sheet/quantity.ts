@@ -64,10 +64,8 @@ export function quantityOf<K extends QuantityKind>(
 ): QuantityOf<K> | null {
   const factor = factorOf(kind, unit);
   if (factor === null) return null;
-  return {
-    [siMember[kind]]: rounded(value * factor),
-    entered: { value: rounded(value), unit },
-  } as QuantityOf<K>;
+  const entered = { value: rounded(value), unit };
+  return { [siMember[kind]]: rounded(entered.value * factor), entered } as QuantityOf<K>;
 }
 
 /** The SI value of a quantity. */

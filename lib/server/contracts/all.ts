@@ -2,6 +2,16 @@ import type { Contract } from "../contract";
 import { registerDevice } from "./devices";
 import { readBundle, sendEntries } from "./field";
 import { askForPhoto, readPhoto, sendPhoto } from "./photos";
+import {
+  listRigs,
+  listThings,
+  makeRig,
+  readRevision,
+  readRig,
+  readSheetSchema,
+  readThing,
+  saveRevision,
+} from "./rigs";
 import { readHealth, readKeys, readOpenApi } from "./service";
 import { signIn, signOut, whoAmI } from "./session";
 import { signUp } from "./sign-up";
@@ -22,6 +32,14 @@ export const contracts: readonly Contract[] = [
   listWalks,
   readWalk,
   readRecord,
+  listRigs,
+  makeRig,
+  readRig,
+  saveRevision,
+  readRevision,
+  listThings,
+  readThing,
+  readSheetSchema,
   readKeys,
   readHealth,
   readOpenApi,

@@ -1,5 +1,5 @@
-import { purposes, type Depth, type Purpose } from "./entry";
-import { stationKeys, type Check, type RevisionDocument, type StationKey } from "./revision";
+import { purposes, type Depth, type Purpose } from "../entry";
+import { stationKeys, type Check, type RevisionDocument, type StationKey } from "../revision";
 
 const titles: Record<StationKey, string> = {
   "coach-tail": "Coach tail",
@@ -11,17 +11,16 @@ const titles: Record<StationKey, string> = {
   "last-look": "Last look",
 };
 
-/** A list by hand: the checks at each station, and which of them each kind of walk takes, in walking order. */
-export interface PlainList {
+/** What a document is put together from: the checks at each station, and those of each walk in walking order. */
+interface Composed {
   sheet: RevisionDocument["sheet"];
-  /** Where the checks come from. */
   catalogue: string;
   checks: Record<StationKey, Check[]>;
   walks: Record<Purpose, Check[]>;
 }
 
-/** The revision document of a list by hand. A short walk takes the holds of the full one. */
-export function plainDocument({ sheet, catalogue, checks, walks }: PlainList): RevisionDocument {
+/** A revision document. A short walk takes the holds of the full one. */
+export function documentOf({ sheet, catalogue, checks, walks }: Composed): RevisionDocument {
   const depths = (list: Check[]): Record<Depth, string[]> => ({
     full: list.map(({ key }) => key),
     short: list.filter(({ effect }) => effect === "hold").map(({ key }) => key),

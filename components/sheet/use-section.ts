@@ -1,0 +1,42 @@
+import { useSearchParams } from "next/navigation";
+import { useEffect, useRef, type RefObject } from "react";
+import { sectionKeys, type SectionKey } from "@/lib/domain/sheet/draft-sections";
+
+/** Which section is open, by the address, so that the way back of the phone goes through them. */
+export function useSection(): {
+  section: SectionKey;
+  go: (section: SectionKey, focus?: string) => void;
+  heading: RefObject<HTMLHeadingElement | null>;
+} {
+  const params = useSearchParams();
+  const wanted = params.get("section");
+  const section = sectionKeys.find((key) => key === wanted) ?? "rig";
+  const heading = useRef<HTMLHeadingElement>(null);
+  const arrived = useRef<SectionKey | null>(null);
+  const focus = useRef<string | null>(null);
+  useEffect(() => {
+    // The first section of a page load leaves the focus where the browser put it.
+    const moved = arrived.current !== null && arrived.current !== section;
+    arrived.current = section;
+    if (!moved && focus.current === null) return;
+    const target = focus.current ? document.getElementById(focus.current) : null;
+    focus.current = null;
+    openFolds(target);
+    if (target) target.scrollIntoView({ block: "center" });
+    else window.scrollTo(0, 0);
+    (target ?? heading.current)?.focus({ preventScroll: true });
+  });
+  const go = (next: SectionKey, field?: string) => {
+    focus.current = field ?? null;
+    const query = new URLSearchParams(params);
+    query.set("section", next);
+    // The router follows the address without asking the server for anything.
+    window.history.pushState(null, "", `?${query.toString()}`);
+  };
+  return { section, go, heading };
+}
+
+function openFolds(target: Element | null): void {
+  for (let fold = target?.closest("details"); fold; fold = fold.parentElement?.closest("details"))
+    fold.open = true;
+}
