@@ -1,12 +1,14 @@
 import { digestOf } from "@/lib/domain/digest";
 import type { BundleRig } from "@/lib/domain/field";
-import { canonicalText } from "@/lib/domain/json";
 import type { Member } from "@/lib/domain/member";
+import { may } from "@/lib/domain/permissions";
 import { Problem } from "@/lib/domain/problem";
 import { tables } from "@/lib/server/database";
 import { deviceRegistered } from "@/lib/server/devices";
 import { ingest } from "@/lib/server/ingest/ingest";
 import { hashPassword } from "@/lib/server/password";
+import { composed, storeRevision } from "@/lib/server/rigs/store-revision";
+import { claimThings } from "@/lib/server/things/recording";
 import { inTransaction } from "@/lib/server/transaction";
 import { members, organisations, PASSWORD, type DemoMemberKey } from "./people";
 import { rigs } from "./rigs";
@@ -44,27 +46,35 @@ async function seedPeopleAndRigs(now: Date): Promise<void> {
   });
 }
 
-/** Issues a rig's list where it has none yet, or anew where a demo that stands already has an older one. */
+/** Saves a rig's sheet where it has none yet, or anew where a demo that stands already has an older list. */
 async function keepListsCurrent(now: Date): Promise<void> {
   const { Revision } = tables();
-  for (const { id: rigId, revisionId, document } of Object.values(rigs)) {
-    const digest = Buffer.from(digestOf(document), "hex");
-    const latest = await Revision.findOne({
-      attributes: ["number", "digest"],
-      where: { rigId },
-      order: [["number", "DESC"]],
-      raw: true,
-    });
-    if (latest && digest.equals(latest.digest)) continue;
-    await Revision.create({
-      id: latest ? crypto.randomUUID() : revisionId,
-      rigId,
-      number: (latest?.number ?? 0) + 1,
-      digest,
-      document: Buffer.from(canonicalText(document)),
-      createdAt: latest ? now : longBefore(now),
+  for (const { id: rigId, keeperId, sheet } of Object.values(rigs)) {
+    const revision = composed(sheet);
+    await inTransaction(async (transaction) => {
+      const latest = await Revision.findOne({
+        attributes: ["number", "digest"],
+        where: { rigId },
+        order: [["number", "DESC"]],
+        raw: true,
+        transaction,
+      });
+      if (latest?.digest.toString("hex") === revision.digest) return;
+      const author = { member: writerOf(keeperId), now: latest ? now : longBefore(now), transaction };
+      const faults = await claimThings(author, rigId, sheet);
+      if (faults[0]) throw new Error(`the demo's sheet: ${faults[0].pointer} ${faults[0].detail}`);
+      await storeRevision(author, rigId, (latest?.number ?? 0) + 1, revision);
     });
   }
+}
+
+/** Who filled in the sheets of a keeper's rigs. */
+function writerOf(keeperId: string): Member {
+  const keys = Object.keys(members) as DemoMemberKey[];
+  const writer = keys.find(
+    (key) => members[key].organisationId === keeperId && may(members[key].role, "rigs.write"),
+  );
+  return demoMember(writer!);
 }
 
 /** Long before the first walk, so that the history makes sense. */
@@ -94,7 +104,7 @@ function demoMember(key: DemoMemberKey): Member {
 }
 
 function bundleRig(key: keyof typeof rigs): BundleRig {
-  const { id, name, revisionId, document } = rigs[key];
-  const revision = { id: revisionId, digest: digestOf(document), document };
+  const { id, name, document } = rigs[key];
+  const revision = { id, digest: digestOf(document), document };
   return { id, name, revision, openFindings: [], lastWalk: null };
 }

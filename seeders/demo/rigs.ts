@@ -9,7 +9,6 @@ import { shortCoachSheet } from "./sheets/short-coach";
 
 interface DemoRig {
   id: string;
-  revisionId: string;
   name: string;
   keeperId: string;
   builderId: string | null;
@@ -31,6 +30,5 @@ export const rigs = {
 export type DemoRigKey = keyof typeof rigs;
 
 function demoRig(tail: string, sheet: Sheet, keeperId: string, builderId: string | null): DemoRig {
-  const revisionId = id(tail.replace("2", "3"));
-  return { id: id(tail), revisionId, name: sheet.name, keeperId, builderId, sheet, document: compose(sheet) };
+  return { id: id(tail), name: sheet.name, keeperId, builderId, sheet, document: compose(sheet) };
 }
