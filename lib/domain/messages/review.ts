@@ -109,7 +109,6 @@ export const besideWords = {
 
 export const listedWords = {
   question: "Why is this on my list?",
-  why: "What for",
-  listed: "On your list",
+  listed: "On this list",
   origin: "Comes from",
 } as const;
