@@ -7,7 +7,8 @@ import type { ReactNode } from "react";
 import { whoQuery } from "@/lib/client/desk-queries";
 import type { Member } from "@/lib/domain/member";
 import { deskWords } from "@/lib/domain/messages/desk";
-import { rigsWords, thingsWords } from "@/lib/domain/messages/rigs";
+import { rigsWords } from "@/lib/domain/messages/rigs";
+import { thingsWords } from "@/lib/domain/messages/things";
 import { may } from "@/lib/domain/permissions";
 import { SignedIn } from "./signed-in";
 

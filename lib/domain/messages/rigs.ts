@@ -1,9 +1,8 @@
-import type { Purpose } from "../entry";
 import type { Effect, Origin } from "../revision";
 import { plural } from "./desk";
 import { gearNames } from "./sheet-gear";
 import { sheetReadingWords } from "./sheet-reading";
-import { deference, purposeWords } from "./walk";
+import { deference } from "./walk";
 
 const DO_NOT_TOW = "Do not tow";
 
@@ -173,73 +172,4 @@ export const listChangeWords = {
   walksAdded: (names: string) => `Now also asked in: ${names}`,
   walksRemoved: (names: string) => `No longer asked in: ${names}`,
   walksMoved: (names: string) => `Another place in the order of: ${names}`,
-} as const;
-
-export const reviewWords = {
-  title: "Reviewer’s page",
-  of: (rig: string) => `Every check, ${rig}`,
-  sub: "Every check of the catalogue held against this sheet: in or out, and why. In walking order.",
-  back: "The rig",
-  fetching: "Fetching the rig",
-  noRig: "No rig was named.",
-  in: "In",
-  out: "Out",
-  filter: "Show",
-  filters: { all: "In and out", in: "In only", out: "Out only" },
-  purpose: "Walk",
-  anyPurpose: "Any walk",
-  holds: "Holds only",
-  shown: (listed: number, out: number) => `${plural(listed, "check")} in, ${plural(out, "check")} out.`,
-  nothing: "No check is like that.",
-  labels: {
-    how: "How to look",
-    why: "Why",
-    mend: "What mends it",
-    who: "Who may",
-    caution: "Caution",
-    origin: "Where it comes from",
-    walks: "Walks",
-  },
-  mayBeAbsent: "May be marked as not on this rig.",
-  walks: (purposes: readonly Purpose[]) => purposes.map((purpose) => purposeWords[purpose]).join(", "),
-  compare: "Compare with another rig",
-  compareSub: "What is on one list and not on the other, and what is put differently.",
-  other: "The other rig",
-  choose: "Choose a rig",
-  same: "The two lists are the same.",
-  noSheet:
-    "This revision is from before there were sheets, so there is nothing to hold the catalogue against.",
-} as const;
-
-export const listedWords = {
-  question: "Why is this on my list?",
-} as const;
-
-export const thingsWords = {
-  nav: "Gear",
-  title: "Coaches, cars and gear",
-  sub: "Each with a history of its own, which outlives the rig it is on.",
-  caption: "Coaches, cars and gear",
-  fetching: "Fetching coaches, cars and gear",
-  emptyTitle: "Nothing in the book yet",
-  empty: "A coach, a car or a piece of gear appears here when a rig’s sheet has it.",
-  columns: { kind: "Kind", label: "What it is", rigs: "On" },
-  noRig: "on no rig now",
-} as const;
-
-export const thingWords = {
-  plainTitle: "One thing",
-  fetching: "Fetching its history",
-  back: "Gear",
-  goneTitle: "There is no such thing in the book",
-  gone: "It may belong to someone else, or the link may be cut short.",
-  toThings: "Go to coaches, cars and gear",
-  on: "On",
-  now: "As its latest sheet has it",
-  history: "History",
-  historySub: "Newest first: on which rig, since when, and what was written down differently.",
-  first: "First written down.",
-  taken: "No longer on this rig.",
-  moved: (rig: string) => `Came onto ${rig}.`,
-  unchanged: (count: number) => `${plural(count, "revision")} with nothing new of it`,
 } as const;
