@@ -35,7 +35,11 @@ export function Fetched<T>({ query, label, rows = 5, gone, heading, children }: 
   return (
     <>
       {heading}
-      {error ? <Trouble error={error} retry={again} busy={isFetching} /> : <Skeleton label={label} rows={rows} />}
+      {error ? (
+        <Trouble error={error} retry={again} busy={isFetching} />
+      ) : (
+        <Skeleton label={label} rows={rows} />
+      )}
     </>
   );
 }

@@ -19,7 +19,7 @@ export function OldRevision({ rig, revision }: OldRevisionProps) {
   const sheet = sheetIn(revision.document);
   const title = `${sheet?.name ?? rig.name}, ${words.row(revision.number).toLowerCase()}`;
   return (
-    <>
+    <div className="workshop-sheet">
       <title>{`${title} · ${deskWords.brand}`}</title>
       <DeskHeading
         over={<BackLink href={`/desk/rig?id=${rig.id}`} label={rig.name} />}
@@ -49,6 +49,6 @@ export function OldRevision({ rig, revision }: OldRevisionProps) {
           <ListReading document={revision.document} title={rigWords.list} />
         </div>
       </div>
-    </>
+    </div>
   );
 }

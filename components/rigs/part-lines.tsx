@@ -15,7 +15,9 @@ export function PartLines({ part: { known, unknown, gaps, lists } }: { part: Rea
           ))}
         </dl>
       )}
-      {shown.length + unknown.length === 0 && !hasItems && <p className="pt-2 text-soft">{words.nothingKnown}</p>}
+      {shown.length + unknown.length === 0 && !hasItems && (
+        <p className="pt-2 text-soft">{words.nothingKnown}</p>
+      )}
       {unknown.length > 0 && (
         <p className="border-b border-rule py-1.5 italic">{words.notKnown(labels(unknown))}</p>
       )}

@@ -11,7 +11,7 @@ export function ProcedurePhoto({ procedure }: { procedure: Procedure | undefined
     <div className="mt-2 space-y-3">
       {photo && (
         <div className="w-64 max-w-full">
-          <DeskPhoto photo={{ ...photo, arrived: true }} alt={words.photo} />
+          <DeskPhoto photo={{ seq: 0, sha256: photo.sha256, check: null, arrived: true }} alt={words.photo} />
         </div>
       )}
       <Notice>{words.manualCaution}</Notice>

@@ -11,7 +11,7 @@ import { Button, buttonClass } from "../ui/button";
 
 type RigActionsProps = { reading: RigReading; sheet: Sheet | null };
 
-/** What can be done with a rig: edit its sheet, take it along as a file or on paper, read its walks. */
+/** What can be done with a rig: edit its sheet, take it along as a file or on paper, go on to the walks. */
 export function RigActions({ reading, sheet }: RigActionsProps) {
   const [said, setSaid] = useState("");
   const take = async (of: Sheet) => {
@@ -43,7 +43,7 @@ export function RigActions({ reading, sheet }: RigActionsProps) {
         <Button size="desk" onClick={() => window.print()}>
           {words.print}
         </Button>
-        <Link href={`/desk?rig=${reading.id}`} prefetch={false} className={buttonClass("plain", "desk")}>
+        <Link href="/desk" prefetch={false} className={buttonClass("plain", "desk")}>
           {words.walks}
         </Link>
       </div>

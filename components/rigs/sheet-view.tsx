@@ -37,7 +37,7 @@ function Part({ part, sheet }: { part: ReadPart; sheet: Sheet }) {
         {part.title}
       </h3>
       {part.there ? <PartLines part={part} /> : <p className="py-2 text-base">{words.notOnRig}.</p>}
-      {part.key === "wiring" && <WiringLists lists={part.lists} />}
+      {part.key === "wiring" && <WiringLists wiring={sheet.wiring} />}
       {part.key === "procedure" && <ProcedurePhoto procedure={sheet.procedure} />}
     </section>
   );

@@ -1,8 +1,8 @@
-import type { Depth } from "../entry";
 import type { Effect, Origin } from "../revision";
 import { plural } from "./desk";
 import { gearNames } from "./sheet-gear";
 import { sheetReadingWords } from "./sheet-reading";
+import { deference } from "./walk";
 
 const DO_NOT_TOW = "Do not tow";
 
@@ -53,7 +53,7 @@ export const rigWords = {
   edit: "Edit the sheet",
   export: "Export as a file",
   print: "Print",
-  walks: "Its walks",
+  walks: "Walks",
   exported: (name: string) => `Saved as ${name}.`,
   exportFailed: "The file could not be made. Try again.",
   ruledOut: DO_NOT_TOW,
@@ -74,9 +74,12 @@ export const rigWords = {
   photo: "Page of the manual, photographed",
   list: "List",
   listSub: (catalogue: string) => `Follows from the sheet, by the catalogue “${catalogue}”.`,
+  listByHand: (catalogue: string) => `Written by hand: “${catalogue}”.`,
   listHeads: { walk: "Walk", full: "Full", short: "Short" },
-  counts: (depth: Depth, count: number) => `${plural(count, "check")} in the ${depth} list`,
+  checks: (count: number) => plural(count, "check"),
   review: "Every check, in or out and why",
+  printed: (digest: string) =>
+    `Rig sheet ${digest}. What someone wrote down of these vehicles, not a statement that they are fit for the road. ${deference}`,
 } as const;
 
 export const wiringReadingWords = {
@@ -91,12 +94,14 @@ export const wiringReadingWords = {
   nearEnd: "the near end",
   farEnd: "the far end",
   noColor: "no color written down",
-  changes: (color: string, near: string, far: string) =>
-    `One color, two functions: ${color} is ${near} here and ${far} there.`,
+  thisWire: "this wire",
+  segmentsSub: "What each wire does was measured at both ends; its color does not say.",
+  changes: (color: string, near: string, nearEnd: string, far: string, farEnd: string) =>
+    `One color, two functions: ${color} is “${near}” at ${nearEnd} and “${far}” at ${farEnd}.`,
   tagWanted: "Tag it at both ends with what it does there.",
   tagged: "Tagged at both ends",
   untagged: "No tag",
-  tagUnknown: "Not looked for",
+  tagUnknown: "Not known",
   tagNeeded: "Wants a tag",
 } as const;
 
@@ -105,10 +110,9 @@ export const revisionsWords = {
   sub: "Newest first. A walk always shows the one it was made against.",
   row: (number: number) => `Revision ${number}`,
   byNobody: "made by a phone or the demo",
-  latest: "latest",
-  earlier: "Earlier",
-  later: "Later",
-  pick: "Compare two",
+  latestRow: (number: number) => `Revision ${number}, the latest`,
+  changed: "What changed",
+  changedIn: (number: number) => `What changed in revision ${number}`,
   earlierOf: "The earlier",
   laterOf: "The later",
   comparing: (one: number, other: number) => `Revision ${one} against ${other}`,
@@ -165,5 +169,7 @@ export const listChangeWords = {
     lamps: "Lamps",
     figures: "Figures",
   } as Record<string, string>,
-  walks: "The walks that have it",
+  walksAdded: (names: string) => `Now also asked in: ${names}`,
+  walksRemoved: (names: string) => `No longer asked in: ${names}`,
+  walksMoved: (names: string) => `Another place in the order of: ${names}`,
 } as const;
