@@ -9,8 +9,9 @@ import { photoStore } from "./store";
 type Found = { organisation: string; bytes: number; mime: PhotoMime };
 
 /**
- * A photograph's bytes for a member who may see a walk that names it (as `maySeeWalk` says). One that has not come, is
- * named by no such walk, or is not there at all is the same `not-found`.
+ * A photograph's bytes for a member who may see a walk (as `maySeeWalk` says) or a rig's sheet that names it. One that has
+ * not come, is named by none of them, or is not there at all is the same `not-found`. The bytes are always those that the
+ * organisation of that walk or sheet has sent.
  */
 export async function photoBytes(
   { id, role, organisation }: Member,
@@ -26,6 +27,12 @@ export async function photoBytes(
       JOIN rigs r ON r.id = w.rig_id
       JOIN photo_objects o ON o.sha256 = p.sha256 AND o.organisation_id = w.organisation_id
       WHERE p.sha256 = :sha256 AND ${seen}
+      UNION ALL
+      SELECT o.organisation_id AS organisation, o.bytes, o.mime
+      FROM sheet_photos p
+      JOIN rigs r ON r.id = p.rig_id AND :organisation IN (r.keeper_id, r.builder_id)
+      JOIN photo_objects o ON o.sha256 = p.sha256 AND o.organisation_id = p.organisation_id
+      WHERE p.sha256 = :sha256
       LIMIT 1`,
     {
       type: QueryTypes.SELECT,
