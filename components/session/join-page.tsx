@@ -39,7 +39,7 @@ export function JoinPage() {
     <PlainPage>
       {member && <SignedInNote member={member} signedOut={() => setMember(null)} />}
       {member ? (
-        <h2 className="text-xl leading-tight font-extrabold">{words.other}</h2>
+        <h2 className="text-xl leading-tight font-extrabold">{words.title}</h2>
       ) : (
         <h1 className="text-[1.875rem] leading-[1.1] font-extrabold">{words.title}</h1>
       )}

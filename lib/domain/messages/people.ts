@@ -54,5 +54,4 @@ export const joinWords = {
   unreachedTitle: "Hookfast cannot be reached from here",
   unreached: "The invitation stays open meanwhile. Try again in coverage.",
   again: "Try again",
-  other: "Join as someone else",
 } as const;
