@@ -107,7 +107,7 @@ export const pull: Entry[] = [
     words: ({ brake, sheet: { coach } }) => ({
       part: "wheels",
       drawn: "standing",
-      ask: "No wheel hot by its pair, no tire low",
+      ask: "No hot wheel, no low tire",
       how: "Hold the back of a hand near each car wheel, without touching. Compare left with right. Straight off a long grade, wait first. No tire is low.",
       why: text(
         "One hot wheel means a brake that drags, or a bearing, and a soft tire runs hot until it comes apart.",
