@@ -126,6 +126,10 @@ describe("every list", () => {
 /** Whether gear is on the rig: no is the only answer that keeps its check off the list. */
 const unlessNo = (known: boolean | null) => known !== false;
 
+/** Whether nothing on the sheet wants a cord and none is written down. */
+const noCord = ({ style, lightBarPower, cordEnd }: Factors) =>
+  style === "light-bar" && lightBarPower === "own-battery" && cordEnd === null;
+
 /** The topics of a hook-up that hold, and whether a rig has them. */
 const topics: [string, (of: Factors) => boolean][] = [
   ["coach-held", () => true],
@@ -193,8 +197,8 @@ describe("a hook-up", () => {
       ["monitor", ({ monitor }) => monitor === null],
       ["jacks-up", ({ jacks, suspension }) => jacks !== true && suspension !== "air"],
       ["short-cables", ({ arms, shortCables }) => arms === null && shortCables === null],
-      ["cord", ({ style, lightBarPower }) => style === "light-bar" && lightBarPower === "own-battery"],
-      ["cord-jacket", ({ style, lightBarPower }) => style === "light-bar" && lightBarPower === "own-battery"],
+      ["cord", noCord],
+      ["cord-jacket", noCord],
     ];
     const may = new Map(open);
     expect(
@@ -295,6 +299,7 @@ const absent: [string, (of: Factors) => boolean, RegExp][] = [
   ],
   ["an air line", ({ airLine, brake }) => airLine === false && brake !== "air", /air line/i],
   ["a charge line", ({ chargeLine }) => chargeLine === false, /charge line/i],
+  ["a cord to take off", ({ cordEnd }) => cordEnd === "hard-wired", /put away: cord/i],
   ["a breakaway switch", ({ breakaway }) => breakaway === false, /lanyard|breakaway/i],
   ["a light bar", ({ style }) => style !== "light-bar" && style !== null, /light bar/i],
   ["a trailer plug", ({ style }) => style !== "trailer-plug" && style !== null, /trailer plug/i],

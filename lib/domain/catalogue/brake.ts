@@ -134,7 +134,8 @@ export const brakeReady: Entry[] = [
   {
     id: "monitor",
     key: "monitor",
-    station: "car-cabin",
+    // It is seen from the coach's seat, where the pull begins.
+    station: "pull",
     effect: "fix",
     when: [maybe("monitor")],
     words: () => ({

@@ -34,7 +34,7 @@ function drivingAgain({ backToDriving, sheet: { procedure } }: Facts): string {
     procedure?.battery && `The battery while towing, by the sheet: “${procedure.battery}”.`,
     backToDriving
       ? `From ${name}, in the owner’s words: “${backToDriving}”`
-      : `The sheet does not have what ${name} wants before the car is driven: look there.`,
+      : "The sheet does not have what this car’s own manual wants before it is driven: look there.",
   );
 }
 

@@ -52,7 +52,7 @@ export const carTail: Entry[] = [
         ...(!drawnSo && { drawn: "place" as const }),
         ask: held.ask,
         how: text(
-          "The bar sits where it can be seen from behind and does not move by hand.",
+          "The light bar sits where it can be seen from behind and does not move by hand.",
           held.how,
           own && "Its battery is charged, as its own manual shows it.",
           power === "cord" && "Its cord is home and does not hang.",

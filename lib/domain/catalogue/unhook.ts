@@ -59,17 +59,20 @@ function endsAway({ armEnds }: Facts): string {
 const plateArms = ({ removableArms }: Facts) =>
   removableArms && "The base plate’s own arms are off and put away, or home and locked.";
 
+const hardWired = ({ sheet }: Facts) => sheet.gear?.cord?.carEnd === "hard-wired";
+
 /** What hangs between the vehicles besides the bar, by name. */
-function lines({ breakaway, airLine, sheet: { gear } }: Facts): string {
-  const charge = gear?.chargeLine?.there && gear.chargeLine.plug === "own-plug";
+function lines(facts: Facts): string {
+  const { breakaway, airLine, sheet } = facts;
+  const charge = sheet.gear?.chargeLine?.there && sheet.gear.chargeLine.plug === "own-plug";
   const names = [
-    "cord",
+    !hardWired(facts) && "cord",
     "cables",
     breakaway !== false && "lanyard",
     airLine && "air line",
     charge && "charge line",
   ].filter(Boolean);
-  return `${names.slice(0, -1).join(", ")} and ${names.at(-1)}`;
+  return names.join(", ").replace(/, (?=[^,]*$)/, " and ");
 }
 
 export const unhook: Entry[] = [
@@ -109,10 +112,13 @@ export const unhook: Entry[] = [
     when: [only("every")],
     words: (facts) => ({
       part: "cord",
-      drawn: facts.breakaway === false ? "place" : "off",
+      // Its drawing has sockets on both vehicles, and a lanyard.
+      drawn: facts.breakaway === false || hardWired(facts) ? "place" : "off",
       ask: "Cord, cables, lines off and capped",
       how: text(
-        `Off and put away: ${lines(facts)}. The caps on the sockets are closed.`,
+        `Off and put away: ${lines(facts)}.`,
+        hardWired(facts) && "The cord stays on the car, unplugged and tied up.",
+        "The caps on the sockets are closed.",
         facts.breakaway !== false && "The pin stays in the breakaway switch.",
       ),
       why: "What still hangs between the vehicles is torn off when the first one drives. An open socket fills with water.",
@@ -182,11 +188,11 @@ export const unhook: Entry[] = [
       drawn: "place",
       ask: "Light bar off, car’s own lamps in view",
       how: text(
-        "The bar is off the car and put away.",
+        "The light bar is off the car and put away.",
         gear?.lightBar?.power !== "own-battery" && "Its cord is out of the way of doors and wheels.",
         "The car’s own lamps and its plate are in view.",
       ),
-      why: "A bar that was left on hides the car’s own lamps, or falls off on the road.",
+      why: "A light bar that was left on hides the car’s own lamps, or falls off on the road.",
       mend: "Take it off and put it where it is counted.",
       origin: practice,
     }),
