@@ -3,7 +3,7 @@ import { useFormContext } from "react-hook-form";
 import { Button, buttonClass } from "@/components/ui/button";
 import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import type { FieldError } from "@/lib/domain/problem";
-import { finished, withoutIds, type Draft } from "@/lib/domain/sheet/draft";
+import { finished, imported, type Draft } from "@/lib/domain/sheet/draft";
 import { atField } from "@/lib/domain/sheet/draft-check";
 import { placeOf } from "@/lib/domain/sheet/draft-places";
 import { readSheet } from "@/lib/domain/sheet/sheet";
@@ -18,7 +18,7 @@ type Came =
 
 /** Takes a sheet out of a file into the draft, and gives the draft away as one. */
 export function FilesPanel() {
-  const { isNew, replace } = useDraftDesk();
+  const { replace } = useDraftDesk();
   const { getValues } = useFormContext();
   const [came, setCame] = useState<Came | null>(null);
   const input = useRef<HTMLInputElement>(null);
@@ -29,9 +29,9 @@ export function FilesPanel() {
     if (!file) return;
     const read = await sheetFrom(file);
     if (read.kind !== "sheet") return setCame(read);
-    setCame({ kind: "taken", file: file.name, before: structuredClone(getValues()) });
-    // A new rig is other metal: what it is made of begins a history of its own.
-    replace({ ...(isNew ? withoutIds(read.sheet) : read.sheet) });
+    const before = structuredClone(getValues());
+    setCame({ kind: "taken", file: file.name, before });
+    replace(imported(read.sheet, before));
   };
   const give = () => {
     const sheet = finished(getValues(), () => crypto.randomUUID());

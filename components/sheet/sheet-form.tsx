@@ -12,6 +12,7 @@ import { DraftDeskContext } from "./draft-context";
 import { KeepingLine } from "./keeping-line";
 import { SectionBody } from "./section-body";
 import { SectionSteps } from "./section-steps";
+import { SheetPrint } from "./sheet-print";
 import { useKeeper } from "./use-keeping";
 import { useSection } from "./use-section";
 import { Warnings } from "./warnings";
@@ -77,7 +78,8 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
             title={sheet.name ? words.editing(sheet.name) : isNew ? words.newTitle : words.title}
             sub={<KeepingLine keeping={keeping} />}
           />
-          <div className="@4xl:grid @4xl:grid-cols-[17rem_minmax(0,1fr)] @4xl:gap-8">
+          <SheetPrint />
+          <div className="print:hidden @4xl:grid @4xl:grid-cols-[17rem_minmax(0,1fr)] @4xl:gap-8">
             <div className="hidden @4xl:sticky @4xl:top-4 @4xl:block @4xl:self-start">
               <Contents section={section} faults={faults} onGo={go} />
             </div>

@@ -65,7 +65,8 @@ export function useSaving({ base, keeper, onCheck, onBase }: Ground) {
     if (answer.kind === "answered") return arrived(sheet);
     const { problem } = answer;
     if (problem.code === "signed-out") return setSaving({ is: "signed-out" });
-    if (problem.code === "stale-base") return meet(sheet);
+    // A new rig that exists: it was saved from here before, and the way back led to an empty form.
+    if (problem.code === "stale-base" || (problem.code === "id-taken" && over === null)) return meet(sheet);
     const errors = (problem.errors ?? []).map(({ pointer, detail }) =>
       atField({ pointer: pointer.replace(/^\/sheet(?=\/|$)/, ""), detail }),
     );

@@ -23,7 +23,7 @@ export function useSection(): {
     focus.current = null;
     openFolds(target);
     if (target) target.scrollIntoView({ block: "center" });
-    else window.scrollTo(0, 0);
+    else heading.current?.closest("form")?.scrollIntoView();
     (target ?? heading.current)?.focus({ preventScroll: true });
   });
   const go = (next: SectionKey, field?: string) => {

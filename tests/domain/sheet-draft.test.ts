@@ -1,5 +1,5 @@
 import { describe, expect, it, test } from "vitest";
-import { finished, sheetOf, withBlanks, withoutIds, type Draft } from "@/lib/domain/sheet/draft";
+import { finished, imported, sheetOf, withBlanks, withoutIds, type Draft } from "@/lib/domain/sheet/draft";
 import { draftErrors, draftWarnings } from "@/lib/domain/sheet/draft-check";
 import { mergeSheets, withField } from "@/lib/domain/sheet/draft-merge";
 import { placeOf } from "@/lib/domain/sheet/draft-places";
@@ -135,7 +135,15 @@ describe("a draft", () => {
     expect(sheetOf({ name: "x", coach: { gvwr: null, gcwr: "" } }).coach).toEqual({ gvwr: null });
   });
 
-  it("of another rig has no ids", () => {
+  it("that comes from a file keeps the ids of the draft and brings none", () => {
+    const draft = { name: "y", coach: { id: "mine" }, gear: { cord: { id: "my cord" } } };
+    const taken = imported({ ...householdSheet, gear: { towBar: { id: "theirs", rating: null } } }, draft);
+    expect(taken.coach).toMatchObject({ id: "mine", jacks: householdSheet.coach!.jacks });
+    expect(taken.gear).toEqual({ towBar: { rating: null } });
+    expect(imported(householdSheet, householdSheet as unknown as Draft)).toEqual(householdSheet);
+  });
+
+  it("without its ids says the same", () => {
     const copy = withoutIds(householdSheet);
     expect(JSON.stringify(copy)).not.toContain('"id"');
     expect(householdSheet.coach?.id).toBeDefined();

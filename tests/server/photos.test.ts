@@ -5,6 +5,7 @@ import path from "node:path";
 import { QueryTypes } from "sequelize";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { GET as readPhoto, POST as askForPhoto, PUT as sendPhoto } from "@/app/api/photos/[sha256]/route";
+import { POST as makeRig } from "@/app/api/rigs/route";
 import { GET as readWalk } from "@/app/api/walks/[id]/route";
 import { walkReadingShape } from "@/lib/domain/history";
 import { PHOTO, photoAnswerShape, type PhotoMime, type PhotoPut } from "@/lib/domain/photo";
@@ -450,6 +451,35 @@ describe("who may look at a photograph", () => {
     expect(await photosIn(walk, stranger)).toMatchObject([{ arrived: false }]);
     expect((await put(link, one.bytes, { who: stranger })).status).toBe(204);
     expect((await read(one.sha256, stranger)).status).toBe(200);
+  });
+});
+
+describe("a photograph that a rig's sheet names", () => {
+  test("is sent by whoever saves the sheet, and seen by keeper and builder alone", async () => {
+    const shop = await givenOrganisation("shop");
+    const installer = await givenMember({ role: "installer", organisation: shop });
+    const later = await givenMember({ role: "driver" });
+    const one = photo();
+    await expectProblem(await ask(one.sha256, installer), 404, "not-found");
+    const id = crypto.randomUUID();
+    const page = { sha256: one.sha256, bytes: one.bytes.length, mime: "image/jpeg" };
+    const sheet = { v: 1, name: "With its page", procedure: { says: "how", page: "214", photo: page } };
+    expect((await makeRig(request("POST", "/api/rigs", installer, { id, sheet }))).status).toBe(201);
+
+    expect((await read(one.sha256, installer)).status).toBe(404);
+    await expectProblem(await ask(one.sha256, stranger), 404, "not-found");
+    const link = await placeOf(one.sha256, installer);
+    expect((await put(link, one.bytes, { who: installer })).status).toBe(204);
+    expect(await (await ask(one.sha256, installer)).json()).toEqual({ have: true });
+
+    const seen = async () => [
+      Buffer.from(await (await read(one.sha256, installer)).arrayBuffer()).equals(one.bytes),
+      (await read(one.sha256, later)).status,
+      (await read(one.sha256, stranger)).status,
+    ];
+    expect(await seen()).toEqual([true, 404, 404]);
+    await tables().Rig.update({ keeperId: later.organisation.id }, { where: { id } });
+    expect(await seen()).toEqual([true, 200, 404]);
   });
 });
 

@@ -6,7 +6,7 @@ import { settings } from "@/lib/server/settings";
 import { givenSheet } from "../support/sheet";
 
 interface Schema {
-  type?: string;
+  type?: string | string[];
   const?: unknown;
   enum?: unknown[];
   anyOf?: Schema[];
@@ -37,10 +37,11 @@ function faults(value: unknown, at: Schema, pointer = ""): string[] {
     const each = at.anyOf.map((one) => faults(value, one, pointer));
     return each.some((found) => found.length === 0)
       ? []
-      : each.reduce((a, b) => (a.length < b.length ? a : b));
+      : each.reduce((a, b) => (a.length <= b.length ? a : b));
   }
   const kind = value === null ? "null" : Array.isArray(value) ? "array" : typeof value;
-  const fits = at.type === kind || (at.type === "integer" && Number.isInteger(value));
+  const types = [at.type ?? kind].flat();
+  const fits = types.includes(kind) || (types.includes("integer") && Number.isInteger(value));
   if (at.type !== undefined && !fits) return [pointer];
   if ("const" in at && at.const !== value) return [pointer];
   if (at.enum && !at.enum.includes(value)) return [pointer];

@@ -19,6 +19,7 @@ type Values = Record<string, unknown>;
 export async function goToSection(page: Page, section: SectionKey): Promise<void> {
   const title = words.sections[section];
   const heading = page.getByRole("heading", { level: 2, name: title, exact: true });
+  await page.getByRole("heading", { level: 2 }).first().waitFor();
   if (await heading.isVisible()) return;
   const fold = page.locator("form > details").first();
   if (await fold.isVisible()) await fold.locator("summary").click();

@@ -105,12 +105,26 @@ export function withBlanks(draft: Draft): Draft {
   };
 }
 
-/** A sheet as one about another rig: the same in all it says, of other coaches, cars and pieces of gear. */
-export function withoutIds(sheet: Sheet): Sheet {
-  const copy = structuredCloneOf(sheet);
-  for (const part of [copy.coach, copy.car, ...Object.values(copy.gear ?? {})])
-    delete (part as { id?: string })?.id;
-  return copy;
+/**
+ * A sheet out of a file as a draft of a rig: the file says how things are and never which ones they are, so the ids
+ * stay those of the draft.
+ */
+export function imported(sheet: Sheet, draft: Draft): Draft {
+  const taken = withoutIds(sheet) as unknown as Draft;
+  const mine = sheetOf(draft);
+  for (const part of Object.values(parts)) {
+    const id = part.thing && partIn(mine, part)?.id;
+    const values = partIn(taken as unknown as Sheet, part);
+    if (id && values) values.id = id;
+  }
+  return taken;
 }
 
-const structuredCloneOf = <T>(value: T): T => JSON.parse(JSON.stringify(value)) as T;
+/** A sheet without the ids of its things: what it says, of whichever coach, car and gear. */
+export function withoutIds(sheet: Sheet): Sheet {
+  const copy = JSON.parse(JSON.stringify(sheet)) as Sheet;
+  for (const part of Object.values(parts)) {
+    if (part.thing) delete partIn(copy, part)?.id;
+  }
+  return copy;
+}

@@ -5,7 +5,7 @@ export const askForPhoto = contract({
   method: "POST",
   path: "/api/photos/{sha256}",
   summary:
-    "Ask where a photograph's bytes go. An entry of a walk of the member's organization has to name it; ask once " +
+    "Ask where a photograph's bytes go. An entry of a walk of the member's organization has to name it, or a sheet; ask once " +
     "more after sending, and `have` says that it is there.",
   action: "walks.record",
   answers: { 200: { json: photoAnswerShape } },
@@ -26,7 +26,8 @@ export const sendPhoto = contract({
 export const readPhoto = contract({
   method: "GET",
   path: "/api/photos/{sha256}",
-  summary: "The bytes of a photograph as recorded, for whoever may read a walk that names it.",
+  summary:
+    "The bytes of a photograph as recorded, for whoever may read a walk or a rig whose sheet names it.",
   action: "walks.read-own",
   answers: { 200: { bytes: "image/*" } },
 });

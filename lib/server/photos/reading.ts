@@ -4,22 +4,24 @@ import { may } from "@/lib/domain/permissions";
 import type { PhotoMime, WalkPhoto } from "@/lib/domain/photo";
 import { Problem } from "@/lib/domain/problem";
 import { database } from "../database";
+import { seenOnSheet } from "./in-sheets";
 import { photoStore } from "./store";
 
 type Found = { organisation: string; bytes: number; mime: PhotoMime };
 
 /**
- * A photograph's bytes for a member who may see a walk that names it (as `maySeeWalk` says). One that has not come, is
- * named by no such walk, or is not there at all is the same `not-found`.
+ * A photograph's bytes for a member who may see a walk that names it (as `maySeeWalk` says), or a rig whose sheet does.
+ * One that has not come, is named by neither, or is not there at all is the same `not-found`.
  */
 export async function photoBytes(
-  { id, role, organisation }: Member,
+  member: Member,
   sha256: string,
 ): Promise<{ mime: PhotoMime; bytes: Uint8Array<ArrayBuffer> } | Problem> {
+  const { id, role, organisation } = member;
   const seen = may(role, "walks.read-all")
     ? "(w.member_id = :id OR w.organisation_id = :organisation OR r.keeper_id = :organisation)"
     : "w.member_id = :id";
-  const [found] = await database().query<Found>(
+  const [inWalk] = await database().query<Found>(
     `SELECT o.organisation_id AS organisation, o.bytes, o.mime
       FROM photo_entries p
       JOIN walks w ON w.id = p.walk_id
@@ -32,6 +34,7 @@ export async function photoBytes(
       replacements: { sha256: Buffer.from(sha256, "hex"), organisation: organisation.id, id },
     },
   );
+  const found = inWalk ?? (await seenOnSheet(member, sha256));
   const bytes = found && (await photoStore().read({ ...found, sha256 }));
   return bytes ? { mime: found.mime, bytes } : new Problem("not-found");
 }

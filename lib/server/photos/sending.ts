@@ -4,6 +4,7 @@ import type { Member } from "@/lib/domain/member";
 import { isPhotoMime, PHOTO, type PhotoAnswer, type PhotoLink } from "@/lib/domain/photo";
 import { Problem } from "@/lib/domain/problem";
 import { database, tables } from "../database";
+import { namedBySheet } from "./in-sheets";
 import { linkHolds } from "./link";
 import { photoStore, type StoredPhoto } from "./store";
 
@@ -23,16 +24,18 @@ export function recordedQuery({ id, organisation }: Pick<Member, "id" | "organis
 }
 
 /**
- * Where the bytes of a photograph go that an entry of a walk of the member's organisation names, or that they are
- * there. Asking is also how their arrival is noted: a store that is not ours does not tell.
+ * Where the bytes of a photograph go that an entry of a walk of the member's organisation names, or one of its sheets,
+ * or that they are there. Asking is also how their arrival is noted: a store that is not ours does not tell.
  */
 export async function placeFor(
-  { id, organisation }: Member,
+  member: Member,
   sha256: string,
   now: Date = new Date(),
 ): Promise<PhotoAnswer | Problem> {
-  const { sql, replacements } = recordedQuery({ id, organisation }, sha256);
-  const [recorded] = await database().query<Recorded>(sql, { type: QueryTypes.SELECT, replacements });
+  const { organisation } = member;
+  const { sql, replacements } = recordedQuery(member, sha256);
+  const [inWalk] = await database().query<Recorded>(sql, { type: QueryTypes.SELECT, replacements });
+  const recorded = inWalk ?? (await namedBySheet(member, sha256));
   if (!recorded) return new Problem("not-found");
   const { bytes, mime } = recorded;
   if (bytes > PHOTO.bytes) return new Problem("too-large", { detail: `The most is ${PHOTO.bytes} bytes.` });
