@@ -32,6 +32,11 @@ export async function read<T>(shape: z.ZodMiniType<T>, path: string): Promise<T>
   return valueOf(await call(shape, "GET", path));
 }
 
+/** Sends to one of our own routes; throws `Refused` or `Unreached`. */
+export async function send<T>(shape: z.ZodMiniType<T>, path: string, body: unknown): Promise<T> {
+  return valueOf(await call(shape, "POST", path, body));
+}
+
 export const whoQuery = queryOptions({
   queryKey: ["session"],
   queryFn: async () => valueOf(await whoAmI()).member,
