@@ -31,7 +31,7 @@ export async function invite(role: Role): Promise<MadeInvitation> {
 
 /** Withdraws an invitation; one that is gone already is withdrawn as well. */
 export async function withdraw(id: string): Promise<void> {
-  const answer = await call<void>(null, "DELETE", `/api/invitations/${id}`);
+  const answer = await call<void>(null, "DELETE", `/api/invitations?id=${id}`);
   if (answer.kind === "refused" && answer.problem.code === "not-found") return;
   valueOf(answer);
 }
@@ -44,10 +44,10 @@ export function tokenIn(search: string): string | null {
 
 /** What a link invites to. */
 export function invitation(token: string, fetch?: Fetch): Promise<Answer<InvitationReading>> {
-  return call(invitationReadingShape, "GET", `/api/join/${token}`, undefined, fetch);
+  return call(invitationReadingShape, "GET", `/api/invitations/${token}`, undefined, fetch);
 }
 
 /** Becomes a member by a link, and is signed in. */
 export function join(token: string, form: Join, fetch?: Fetch): Promise<Answer<{ member: Member }>> {
-  return call(z.object({ member: memberShape }), "POST", `/api/join/${token}`, form, fetch);
+  return call(z.object({ member: memberShape }), "POST", `/api/invitations/${token}`, form, fetch);
 }

@@ -1,8 +1,7 @@
 import { randomUUID } from "node:crypto";
 import { afterEach, beforeEach, describe, expect, test, vi } from "vitest";
-import { DELETE as withdraw } from "@/app/api/invitations/[id]/route";
-import { GET as listInvitations, POST as invite } from "@/app/api/invitations/route";
-import { GET as readInvitation, POST as join } from "@/app/api/join/[token]/route";
+import { DELETE as withdraw, GET as listInvitations, POST as invite } from "@/app/api/invitations/route";
+import { GET as readInvitation, POST as join } from "@/app/api/invitations/[token]/route";
 import { GET as listPeople } from "@/app/api/members/route";
 import { GET as whoAmI, POST as signIn } from "@/app/api/session/route";
 import {
@@ -37,12 +36,13 @@ afterEach(() => void vi.useRealTimers());
 const at = (params: object) => ({ params: Promise.resolve(params) });
 const ask = (who: { cookie: string } | null, role: string = "driver") =>
   invite(request("POST", "/api/invitations", who, { role }));
-const look = (token: string) => readInvitation(request("GET", `/api/join/${token}`, null), at({ token }));
+const look = (token: string) =>
+  readInvitation(request("GET", `/api/invitations/${token}`, null), at({ token }));
 const enter = (token: string, over: object = {}, who: { cookie: string } | null = null) =>
   join(
     request(
       "POST",
-      `/api/join/${token}`,
+      `/api/invitations/${token}`,
       who,
       { name: "Lee", email, password: PASSWORD, ...over },
       { "x-forwarded-for": `192.0.2.${count}` },
@@ -50,7 +50,7 @@ const enter = (token: string, over: object = {}, who: { cookie: string } | null 
     at({ token }),
   );
 const takeBack = (who: { cookie: string } | null, id: string) =>
-  withdraw(request("DELETE", `/api/invitations/${id}`, who), at({ id }));
+  withdraw(request("DELETE", `/api/invitations?id=${id}`, who));
 
 async function givenInvitation(who = manager, role: Role = "driver"): Promise<{ id: string; token: string }> {
   const response = await ask(who, role);

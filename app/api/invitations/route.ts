@@ -1,6 +1,6 @@
 import { Problem } from "@/lib/domain/problem";
-import { invite, listInvitations } from "@/lib/server/contracts/people";
-import { invited, openInvitations } from "@/lib/server/people/invitations";
+import { invite, listInvitations, withdrawInvitation } from "@/lib/server/contracts/people";
+import { invited, openInvitations, withdrawn } from "@/lib/server/people/invitations";
 import { serve } from "@/lib/server/serve";
 
 export const GET = serve(listInvitations, async ({ member }) => ({
@@ -12,3 +12,8 @@ export const POST = serve(invite, async ({ member, body }) => {
   const made = await invited(member, body.role);
   return made instanceof Problem ? made : { status: 201, json: made };
 });
+
+export const DELETE = serve(
+  withdrawInvitation,
+  async ({ member, query }) => (await withdrawn(member, query.id)) ?? { status: 204 },
+);

@@ -8,6 +8,7 @@ import {
   peopleShape,
 } from "@/lib/domain/invitation";
 import { memberShape } from "@/lib/domain/member";
+import { uuidShape } from "@/lib/domain/shapes";
 import { contract } from "../contract";
 
 export const listPeople = contract({
@@ -37,15 +38,17 @@ export const invite = contract({
 
 export const withdrawInvitation = contract({
   method: "DELETE",
-  path: "/api/invitations/{id}",
+  path: "/api/invitations",
   summary: "Withdraw an invitation.",
   action: "people.invite",
+  query: z.strictObject({ id: uuidShape }),
   answers: { 204: null },
+  problems: ["not-found"],
 });
 
 export const readInvitation = contract({
   method: "GET",
-  path: "/api/join/{token}",
+  path: "/api/invitations/{token}",
   summary: "What an invitation's link invites to.",
   public: true,
   answers: { 200: { json: invitationReadingShape } },
@@ -53,7 +56,7 @@ export const readInvitation = contract({
 
 export const join = contract({
   method: "POST",
-  path: "/api/join/{token}",
+  path: "/api/invitations/{token}",
   summary: "Become a member by an invitation, and sign in.",
   public: true,
   body: { shape: joinShape, limit: 16 * 1024 },

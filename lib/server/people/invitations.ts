@@ -91,7 +91,9 @@ export async function joined(
   const email = normalAddress(body.email);
   const tooMany = await countSignUp(request, email);
   if (tooMany) return tooMany;
-  // Before looking anything up, as in a sign-up.
+  // A link that leads nowhere is not worth a password's hash.
+  const known = await invitationOf(token, now);
+  if (known instanceof Problem) return known;
   const passwordHash = await hashPassword(password);
   return inTransaction(async (transaction): Promise<Member | Problem> => {
     const { Member, Invitation } = tables();
