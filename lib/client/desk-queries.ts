@@ -21,7 +21,8 @@ export function isRefusal(error: unknown, code: ProblemDocument["code"]): boolea
   return error instanceof Refused && error.problem.code === code;
 }
 
-function valueOf<T>(answer: Answer<T>): T {
+/** An answer's value; throws {@link Refused} or {@link Unreached} where there is none. */
+export function valueOf<T>(answer: Answer<T>): T {
   if (answer.kind === "answered") return answer.value;
   throw answer.kind === "refused" ? new Refused(answer.problem) : new Unreached();
 }

@@ -70,7 +70,10 @@ describe.each(Object.entries(rigs))("the list of the rig %s", (_, { document }) 
       expect([ask, ask.length <= 38]).toEqual([ask, true]);
       const words = [ask, how, why, mend, caution].join(" ");
       expect(words).not.toMatch(/\b(safe|legal|passed|certified|compliant|roadworthy)\b/i);
-      expect(words).not.toMatch(/\b(neutral|reverse|transmission|in park|in gear|torque|ft-lb|n·m)\b/i);
+      // What a transfer case does to park is a fact; what to do with one is not ours to say.
+      expect(words.replace("With a transfer case in neutral, ", "")).not.toMatch(
+        /\b(neutral|reverse|transmission|in park|in gear|torque|ft-lb|n·m)\b/i,
+      );
       expect(words).not.toMatch(/!|\bplease\b/i);
       for (const sentence of [how, why, mend]) expect(sentence).toMatch(/^[A-Z].+[.”]$/);
     }

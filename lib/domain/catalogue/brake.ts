@@ -15,6 +15,9 @@ const boxHow = ({ sheet: { car, gear } }: Facts) =>
   text(
     "The unit stands against the seat with the floor mat out, its arm clamped to the pedal, and its ready light is lit. The pedal is all the way up.",
     car?.adjustablePedals && "Pedals that adjust are nearest the seat.",
+    car?.booster !== "electric" &&
+      car?.booster !== "none" &&
+      "Where the unit’s manual wants no vacuum left in the booster, the pedal went hard before the unit was set.",
     car?.booster === "electric" &&
       (gear?.brake?.boosterMode
         ? "Its menu shows the mode for an electric booster, as its manual has it."
@@ -67,12 +70,18 @@ export const brakeReady: Entry[] = [
     ...ready,
     id: "brake-air",
     when: [only("brake"), only("brakeAir")],
-    words: () => ({
+    words: ({ sheet: { gear } }) => ({
       ...shared,
       kind: "brake-idle",
       part: "brake-air",
+      // Its drawing has a monitor lamp.
+      ...(gear?.brake?.monitor !== true && { drawn: "place" as const }),
       ask: "Air up, pedal all the way up",
-      how: "The coach’s air is up and nothing hisses. In the car the cylinder’s rod is in and the pedal is up on its stop. With the coach’s brake pedal down the monitor lamp is lit.",
+      how: text(
+        "The coach’s air is up and nothing hisses. In the car the cylinder’s rod is in and the pedal is up on its stop.",
+        gear?.brake?.monitor !== false &&
+          "The brake’s lamp in the coach is lit while the coach’s brake pedal is down.",
+      ),
       mend: "Press the car’s pedal by hand and let go. If it does not come back, look at the cylinder’s bracket. A hiss: look at the line for a chafed place.",
       origin: makersManual("brakes on the coach’s air"),
     }),
@@ -125,7 +134,8 @@ export const brakeReady: Entry[] = [
   {
     id: "monitor",
     key: "monitor",
-    station: "car-cabin",
+    // It is seen from the coach's seat, where the pull begins.
+    station: "pull",
     effect: "fix",
     when: [maybe("monitor")],
     words: () => ({

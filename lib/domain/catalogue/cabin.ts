@@ -1,5 +1,5 @@
 import { figure } from "../messages/catalogue-figures";
-import { only } from "./conditions";
+import { only, told } from "./conditions";
 import { text, type Entry } from "./entry";
 import type { Facts } from "./facts";
 import { carsManual, couplingRule, makersManual, practice } from "./origins";
@@ -27,16 +27,31 @@ function engineRun({ sheet: { procedure = {} } }: Facts): string | false {
   return run !== "" && `Engine run, as recorded: ${run}.`;
 }
 
+/** What undoes the towing state, as far as it is written down. */
+function drivingAgain({ backToDriving, sheet: { procedure } }: Facts): string {
+  const name = procedure?.manual ?? "this car’s owner’s manual";
+  return text(
+    procedure?.battery && `The battery while towing, by the sheet: “${procedure.battery}”.`,
+    backToDriving
+      ? `From ${name}, in the owner’s words: “${backToDriving}”`
+      : "The sheet does not have what this car’s own manual wants before it is driven: look there.",
+  );
+}
+
 /** The rest of what is recorded beside the end state. */
 function recorded({ fuse, sheet: { procedure = {} } }: Facts): string {
   const { battery, fuseKept, speedCap } = procedure;
   return text(
-    battery && `Battery: “${battery}”`,
-    fuse && `Fuse that comes out: “${fuse}”`,
-    fuse && fuseKept && `Kept: “${fuseKept}”`,
+    battery && `Battery: “${battery}”.`,
+    fuse && `Fuse that comes out: “${fuse}”.`,
+    fuse && fuseKept && `Kept: “${fuseKept}”.`,
     speedCap && `Highest speed, as recorded: ${figure(speedCap)}.`,
   );
 }
+
+// A fact of how these cars are built, and no instruction: what is done about it is in the car's own manual.
+const PARK =
+  "With a transfer case in neutral, park does not hold the car and no gear does: parking brake and chocks do.";
 
 const parkingBrakeOff = {
   lever: "The lever is all the way down and",
@@ -72,7 +87,7 @@ export const cabin: Entry[] = [
       ask: withPage(facts, "Cabin again as on page", "Cabin again as on the page"),
       how: text(
         engineRun(facts),
-        "If it fell due by this stop, it was run, and the cabin is again as the page ends.",
+        "If it fell due by this stop, it was run, the cabin is again as the page ends, and the parking brake is off.",
         quoted(facts),
       ),
       why: `A run that is left out can ruin the gearbox, and a car that was started is in another state than it was towed in. ${wrongWay}`,
@@ -105,6 +120,8 @@ export const cabin: Entry[] = [
     when: [only("every")],
     words: ({ sheet: { car } }) => ({
       part: "parking-brake",
+      // Its drawing has a lever.
+      ...(car?.parkingBrake !== "lever" && { drawn: "place" as const }),
       ask: "Parking brake off, chocks out",
       how: text(
         "The bar is attached.",
@@ -126,15 +143,17 @@ export const cabin: Entry[] = [
     station: "car-cabin",
     effect: "hold",
     when: [only("every")],
-    words: ({ transferCase }) => ({
+    words: ({ transferCase, manual, sheet: { car } }) => ({
       part: "chocks",
       ask: "Car held: parking brake, chocks",
       how: text(
-        "Before any pin comes out: the car’s parking brake is on, and a chock stands tight on each side of one wheel. The coach’s own brake is set.",
-        transferCase &&
-          "This car has a transfer case. As it was towed, park does not hold it: parking brake and chocks do.",
-        transferCase === null &&
-          "Where a car has a transfer case, park may not hold it as it was towed: parking brake and chocks do.",
+        "Before any pin comes out or any latch is opened: the car’s parking brake is on, and a chock stands tight on each side of one wheel. The coach’s own brake is set.",
+        transferCase && `This car has a transfer case. ${PARK}`,
+        transferCase === null && `The sheet does not say whether this car has a transfer case. ${PARK}`,
+        car?.parkingBrake === "switch" &&
+          "An electric parking brake sets only with the car’s battery connected: the chocks come first.",
+        manual.says === "how" &&
+          "What the car’s manual wants while the car still hangs on the bar comes before the pins.",
       ),
       why: "The bar may be all that holds the car. Pull a pin and the car can roll onto whoever stands there.",
       mend: "Set the parking brake and chock a wheel, then come back to the bar.",
@@ -153,11 +172,11 @@ export const cabin: Entry[] = [
       ask: fuse && /^\w{1,6}$/.test(fuse) ? `Fuse ${fuse} back in its place` : "Fuse back in its place",
       how: text(
         "The place that the car’s manual names has its fuse in it, pressed home, its strip whole.",
-        fuse && `On the sheet: “${fuse}”`,
-        procedure?.fuseKept && `Kept while towing: “${procedure.fuseKept}”`,
+        fuse && `On the sheet: “${fuse}”.`,
+        procedure?.fuseKept && `Kept while towing: “${procedure.fuseKept}”.`,
       ),
       why: "The manual has it out only while towing. The car should not be driven without it.",
-      mend: "Take it from where it is kept and press it home. A blown one is replaced by the same number.",
+      mend: "Take it from where it is kept and press it home. A blown one is replaced by one of the same rating.",
       origin: { kind: "vehicle-manual", says: "This car’s owner’s manual, as the sheet has it." },
     }),
   },
@@ -166,15 +185,15 @@ export const cabin: Entry[] = [
     key: "back-to-driving",
     station: "car-cabin",
     effect: "hold",
-    when: [only("backToDriving")],
-    words: ({ backToDriving, sheet: { procedure } }) => ({
+    when: [told("backToDriving")],
+    words: (facts) => ({
       part: "cabin",
       drawn: "place",
       ask: "Car as the manual wants it to drive",
-      how: `From ${procedure?.manual ?? "this car’s owner’s manual"}, in the owner’s words: “${backToDriving ?? ""}”`,
+      how: drivingAgain(facts),
       why: "A car that is driven as it was towed can be damaged, or roll away where it is parked.",
       mend: "Do what the manual wants, in its order, before anyone drives.",
-      origin: { kind: "vehicle-manual", says: "This car’s owner’s manual, as the sheet has it." },
+      origin: { kind: "vehicle-manual", says: "This car’s owner’s manual." },
     }),
   },
   {
@@ -183,12 +202,15 @@ export const cabin: Entry[] = [
     station: "car-cabin",
     effect: "fix",
     when: [only("every")],
-    words: ({ sheet, fuse, brake }) => ({
+    words: ({ sheet, fuse, brake, wiring, airLine, drop }) => ({
       part: "last-look",
       drawn: "place",
       ask: "Tow set whole, as on the sheet",
       how: text(
         "Bar, cables, cord, chocks and the manuals are there.",
+        drop && "So is the drop receiver.",
+        airLine && "So is the air line.",
+        wiring === "light-bar" && "So is the light bar.",
         brake !== null && brake !== "none" && "So is what belongs to the brake.",
         fuse && "So is the fuse that comes out.",
         serials(sheet),

@@ -31,9 +31,11 @@ const cordSlack = ({ sheet: { gear } }: Facts) =>
     ? "It is tied to the bar or lies in it, has slack for a full turn and clears the ground."
     : "It has slack for a full turn and clears the ground.";
 
-/** Whether nothing but the lamps could want a cord, and they may have a battery of their own. */
-const mayLackCord = ({ wiring, sheet: { gear } }: Facts) =>
-  wiring === "light-bar" && gear?.lightBar?.power === "own-battery";
+/** What runs down while a breakaway switch's pin is out, by what the brake draws on. */
+function pinOut(brake: Facts["brake"]): string {
+  if (brake === "surge" || brake === "hydraulic") return "for as long as it is.";
+  return brake === "air" ? "and its stored air runs down." : "and its battery runs down in minutes.";
+}
 
 const cordKey = { key: "cord", station: "cables-and-cord", effect: "hold" } as const;
 
@@ -114,33 +116,30 @@ export const cablesAndCord: Entry[] = [
     station: "cables-and-cord",
     effect: "hold",
     when: [maybe("breakaway")],
-    words: ({ sheet: { gear } }) => ({
+    words: ({ brake, sheet: { gear } }) => ({
       part: "lanyard",
       ask: "Lanyard on its own frame point",
       how: text(
-        "The switch’s pin is fully in. The lanyard runs from it in line with the switch to a point of its own on the coach’s frame: not bar, ball, drop receiver, cable or a cable’s hook.".replace(
-          "bar, ball, drop receiver, cable or a cable’s hook",
-          "the bar, its mount, a cable or a cable’s hook",
-        ),
+        "The switch’s pin is fully in. The lanyard runs from it in line with the switch to a point of its own on the coach’s frame: not the bar, its mount, a cable or a cable’s hook.",
         "It has slack for a full turn and does not drag.",
         gear?.breakaway?.anchor && `Its point, by the sheet: ${gear.breakaway.anchor}.`,
       ),
       why: "A lanyard on a part that leaves with the bar never pulls the switch. On a cable’s hook, one failure takes both.",
       mend: "Move it to its own point on the frame. How long it should be against the cables, the switch’s own manual says.",
-      caution: "Do not leave the pin out: the brake stays on and its battery runs down in minutes.",
+      caution: text("Do not leave the pin out: the brake stays on", pinOut(brake)),
       origin: makersManual("breakaway switches"),
     }),
   },
   {
     ...cordKey,
     id: "cord",
-    when: [unless("airLine")],
+    when: [maybe("cord"), unless("airLine")],
     words: (facts) => ({
       ...cordWords(facts),
       part: "cord",
       // The part's drawing has the lanyard on it, which is a check of its own.
       drawn: "place",
-      ask: mayLackCord(facts) ? "Cord, where there is one, latched" : "Cord latched, clear of the ground",
+      ask: "Cord latched, clear of the ground",
       how: text(cordEnds(facts), cordSlack(facts)),
       mend: "Seat and latch the plugs. Tie up what hangs near the ground.",
       origin: practice,
@@ -170,7 +169,7 @@ export const cablesAndCord: Entry[] = [
   {
     ...cordKey,
     id: "cord-air-unsaid",
-    when: [unsaid("airLine")],
+    when: [maybe("cord"), unsaid("airLine")],
     words: (facts) => ({
       ...cordWords(facts),
       part: "cord",
@@ -190,7 +189,7 @@ export const cablesAndCord: Entry[] = [
     key: "cord-jacket",
     station: "cables-and-cord",
     effect: "fix",
-    when: [only("every")],
+    when: [maybe("cord")],
     words: () => ({
       part: "cord",
       drawn: "place",
@@ -214,12 +213,12 @@ export const cablesAndCord: Entry[] = [
       return {
         part: "charge-line",
         // Its drawing has a plug of its own.
-        ...(plug === "in-cord" && { drawn: "place" as const }),
-        ask: plug === "in-cord" ? "Charge line: fuse in, clamp on" : "Charge line plugged in, fuse in",
+        ...(plug !== "own-plug" && { drawn: "place" as const }),
+        ask: plug === "own-plug" ? "Charge line plugged in, fuse in" : "Charge line: fuse in, clamp on",
         how: text(
-          plug === "in-cord"
-            ? "The charge line runs in the cord."
-            : "The charge line’s plug is home beside the cord’s.",
+          plug === "in-cord" && "The charge line runs in the cord.",
+          plug === "own-plug" && "The charge line’s plug is home beside the cord’s.",
+          !plug && "Where the charge line has a plug of its own, that is home.",
           "At the car’s battery its fuse is in, the holder’s cover shut and the clamp tight on its post.",
         ),
         why: "Without it the car’s battery may be flat at the end of the day, and what hangs on it with it.",
@@ -227,7 +226,7 @@ export const cablesAndCord: Entry[] = [
         who: "You for plug and fuse; a licensed shop for the line.",
         caution: "A fuse of a higher number than the line was built for can set it on fire.",
         origin: practice,
-        ...(fuseAmps && plug !== "in-cord" && { figures: { B: `${fuseAmps} A` } }),
+        ...(fuseAmps && plug === "own-plug" && { figures: { B: `${fuseAmps} A` } }),
       };
     },
   },
@@ -237,7 +236,7 @@ export const cablesAndCord: Entry[] = [
     station: "cables-and-cord",
     effect: "hold",
     when: [maybe("breakaway")],
-    words: ({ sheet: { gear } }) => {
+    words: ({ brake, sheet: { gear } }) => {
       const { battery, lastPulledOn } = gear?.breakaway ?? {};
       return {
         part: "lanyard",
@@ -248,8 +247,11 @@ export const cablesAndCord: Entry[] = [
           battery && `Its power, by the sheet: ${battery}.`,
           lastPulledOn && `By the sheet it was last pulled on ${lastPulledOn}.`,
         ),
-        why: "A switch that was never pulled seizes, and a battery at rest shows nothing of what it can hold.",
-        mend: "Work the pin and look at the switch’s battery by its own manual. A seized switch is replaced.",
+        why: text(
+          "A switch that was never pulled seizes.",
+          brake !== "air" && brake !== "surge" && "A battery at rest shows nothing of what it can hold.",
+        ),
+        mend: "Work the pin, and look at what powers the brake then, by the switch’s own manual. A seized switch is replaced.",
         who: "A licensed shop, by the switch’s own manual.",
         caution: "Leave the pin out for minutes only. Nobody between the vehicles while either can move.",
         touches: ["lanyard", "brake-ready"],

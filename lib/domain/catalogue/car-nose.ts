@@ -122,8 +122,8 @@ export const carNose: Entry[] = [
     station: "car-nose",
     effect: "hold",
     when: [only("every")],
-    words: () => ({
-      part: "arm",
+    words: ({ armEnds }) => ({
+      part: armEnds === "quick" ? "arm-quick" : "arm",
       drawn: "place",
       ask: "Bar: no play, no bend, no crack",
       how: "Push and pull each joint of the bar by hand. Sight along both arms. Look at yoke, swivel and welds, and at each pin for a bend.",

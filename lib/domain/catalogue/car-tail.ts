@@ -12,19 +12,23 @@ const holds = {
   brackets: { ask: "Light bar on, brackets closed", how: "Both brackets are closed and pinned." },
 };
 
-function lampsHow({ brake, sheet: { wiring } }: Facts): string {
+/** Whether the car's brake works by its pedal, and so lights its own stop lamps; unknown counts as yes. */
+const pressesPedal = ({ brake }: Facts) => brake !== "none" && brake !== "hydraulic" && brake !== "surge";
+
+function lampsHow(facts: Facts): string {
+  const { wiring } = facts.sheet;
   return text(
-    "Stand behind the car. Go through the signals one at a time and look at both sides each time.",
-    brake !== "none" && "The brake is on and set as for the road while you look.",
+    "Stand behind the car and look at both sides each time: tail, left, right, stop, hazard, stop with left, stop with right.",
+    pressesPedal(facts) && "The brake unit is on and set as for the road while you look.",
     wiring?.converter === "two-to-three" &&
       "With this converter the hazards may show as red pulses: compare with what this rig did when it was known to be right.",
   );
 }
 
-function lampsWhy({ brake }: Facts): string {
+function lampsWhy(facts: Facts): string {
   return text(
     "The arrow on the dash does not show what the car’s lamps do.",
-    brake !== "none" && "Stop with turn is where a brake that presses the pedal hides the turn.",
+    pressesPedal(facts) && "Stop with turn is where a brake that presses the pedal hides the turn.",
   );
 }
 
@@ -38,18 +42,21 @@ export const carTail: Entry[] = [
     words: ({ sheet: { gear } }) => {
       const { heldBy, power } = gear?.lightBar ?? {};
       const own = power === "own-battery";
+      const drawnSo = heldBy === "straps" && !own;
       const held = heldBy
         ? holds[heldBy]
         : { ask: "Light bar on, both ends held", how: "Both ends are held." };
       return {
         part: "light-bar",
-        // Its drawing has a cord.
-        ...(own && { drawn: "place" as const }),
+        // Its drawing has straps and a cord.
+        ...(!drawnSo && { drawn: "place" as const }),
         ask: held.ask,
         how: text(
-          "The bar sits where it can be seen from behind and does not move by hand.",
+          "The light bar sits where it can be seen from behind and does not move by hand.",
           held.how,
-          own ? "Its battery is charged, as its own manual shows it." : "Its cord is home and does not hang.",
+          own && "Its battery is charged, as its own manual shows it.",
+          power === "cord" && "Its cord is home and does not hang.",
+          !power && "Its cord is home and does not hang, or its battery is charged.",
           "The plate is in view.",
         ),
         why: "A bar that slides off hangs by its wire or is gone, and the car is dark from behind.",
@@ -90,7 +97,7 @@ export const carTail: Entry[] = [
       why: lampsWhy(facts),
       mend: "Seat the plugs first, then look at the ground. A dark lamp on one side only is often its bulb.",
       who: "You for plugs and bulbs; a licensed shop for the wiring.",
-      touches: ["cord"],
+      touches: ["cord", "light-bar", "trailer-plug"],
       origin: couplingRule,
       ...(facts.layout && { lamps: { layout: facts.layout } }),
     }),

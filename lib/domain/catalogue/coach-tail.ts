@@ -4,6 +4,7 @@ import { text, type Entry, type Words } from "./entry";
 import type { Facts } from "./facts";
 import { couplingRule, makersManual, practice } from "./origins";
 
+const BETWEEN = "Nobody between the vehicles while either can move.";
 const pinWhy =
   "These pins hold everything behind the coach. A pin that walks out lets the whole bar slide out.";
 const receiver = { key: "receiver-pins", station: "coach-tail", effect: "hold" } as const;
@@ -11,9 +12,16 @@ const touches = ["cables", "lanyard", "cord"];
 const pinMend = {
   mend: "Push the pin through and close its clip. Replace a pin that is bent or worn.",
   who: "You, with a pin and clip of the maker’s kind. Cracked welds: a licensed shop.",
+  caution: BETWEEN,
   touches,
   origin: couplingRule,
 } satisfies Partial<Words>;
+
+const armPieces = {
+  pin: "A pin and a clip for each arm.",
+  quick: "A spring clip for each arm.",
+  unsaid: "What keeps each arm at the car.",
+};
 
 /** What is said of a drop receiver beside a coupler, which its drawing does not show. */
 function dropWords({ drop }: Facts): string | false {
@@ -31,10 +39,10 @@ export const coachTail: Entry[] = [
     words: () => ({
       part: "coach-held",
       ask: "Coach braked, car chocked",
-      how: "The coach’s parking brake is set and its lamp is lit. A chock stands on each side of one car wheel. The ground is level.",
+      how: "The coach’s parking brake is set and its lamp is lit. A chock stands on each side of one car wheel. The ground is level, the rig in line, and a few feet of road ahead are clear.",
       why: "Between the vehicles is where people are crushed. Nothing may move while someone stands there.",
       mend: "Set the brake, chock the car, and come back only then.",
-      caution: "Nobody between the vehicles while either can move.",
+      caution: BETWEEN,
       origin: makersManual("tow bars"),
     }),
   },
@@ -86,13 +94,13 @@ export const coachTail: Entry[] = [
         part: "ball",
         ask: "Coupler down on ball, latch pinned",
         how: text(
-          "The coupler sits all the way down on the ball. Its latch lies flat, the tab back in its slot, a pin or lock through it. The nut under the ball is in place, the shank not scraped. The ball mount’s hitch pin is through, its clip closed.",
+          "The coupler sits all the way down on the ball. Its latch lies flat, the tab back in its slot, a pin or lock through it, and lifted hard it stays down. The nut under the ball is in place, the shank not scraped. The ball mount’s hitch pin is through, its clip closed.",
           dropWords(facts),
         ),
         why: "A coupler whose latch is not pinned, or of another size than its ball, can be levered off in a deep dip.",
         mend: "Lift the coupler off, look into it, set it down again and pin the latch. A cracked part is replaced. The sizes on ball and coupler are the same.",
         who: "You for the latch and its pin. Cracks, and the ball’s nut: a licensed shop.",
-        caution: "A coupler that comes down can crush a hand.",
+        caution: text("A coupler that comes down can crush a hand.", BETWEEN),
         touches,
         origin: makersManual("tow bars with a coupler"),
         ...(size && { figures: { C: `${figure(size)} ball` } }),
@@ -113,7 +121,7 @@ export const coachTail: Entry[] = [
       why: "An open latch lets the ring lift off the hook where the road dips.",
       mend: "Close the latch until its pin goes through. A latch that does not close is replaced, and so is a worn ring.",
       who: "You for the latch and its pin. A worn ring or hook: a licensed shop.",
-      caution: "A ring that comes down can crush a hand.",
+      caution: text("A ring that comes down can crush a hand.", BETWEEN),
       touches,
       origin: makersManual("pintle hooks"),
     }),
@@ -174,7 +182,7 @@ export const coachTail: Entry[] = [
       ask: "Pins, clips and locks: all there",
       how: text(
         "Count them against what belongs to this bar.",
-        facts.armEnds === "quick" ? "A spring clip for each arm." : "A pin and a clip for each arm.",
+        armPieces[facts.armEnds ?? "unsaid"],
         "A pin and a clip for the receiver.",
         facts.drop && "A second pair for the drop receiver.",
         facts.coupling === "ball" && "A pin or lock for the coupler’s latch.",

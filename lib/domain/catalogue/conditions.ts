@@ -32,6 +32,7 @@ const conditions = {
   manualApply: ({ manualApply }) => manualApply,
   breakaway: ({ breakaway }) => breakaway,
   airLine: ({ airLine }) => airLine,
+  cord: ({ cord }) => cord,
   chargeLine: ({ chargeLine }) => chargeLine,
   monitor: ({ monitor }) => monitor,
   lightBar: ({ wiring }) => equals(wiring, "light-bar"),
@@ -61,7 +62,6 @@ export const unless = (condition: ConditionName): When => ({ condition, on: ["no
 export const unsaid = (condition: ConditionName): When => ({ condition, on: ["unknown"] });
 /** Said or not: the check is there, and its reason tells this too. */
 export const told = (condition: ConditionName): When => ({ condition, on: ["yes", "no", "unknown"] });
-export const butNot = (condition: ConditionName): When => ({ condition, on: ["no", "unknown"] });
 /** Gear that is looked for where the sheet does not say whether it is there. */
 export const maybe = (condition: ConditionName): When => ({
   condition,

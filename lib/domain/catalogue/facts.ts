@@ -21,6 +21,7 @@ export interface Facts {
   manualApply: Known;
   breakaway: Known;
   airLine: Known;
+  cord: Known;
   chargeLine: Known;
   /** Whether a monitor stands in the coach that no other check reads. */
   monitor: Known;
@@ -59,6 +60,7 @@ export function factsOf(sheet: Sheet): Facts {
     manualApply: family === "none" || family === "surge" ? false : (gear.brake?.manualApply ?? null),
     breakaway: isThere(gear, "breakaway") ?? (family === "none" ? false : null),
     airLine: family === "air" ? true : isThere(gear, "airLine"),
+    cord: cordOf(sheet),
     chargeLine: isThere(gear, "chargeLine"),
     monitor: monitorOf(family, gear.brake?.monitor ?? null),
     wiring: wiring.style ?? null,
@@ -83,6 +85,13 @@ function is(value: string | null | undefined, wanted: string): Known {
 function monitorOf(family: BrakeFamily | null, monitor: Known): Known {
   if (family === "none" || family === "installed-vacuum" || family === "air") return false;
   return family === "surge" ? monitor === true : monitor;
+}
+
+// Lamps with a battery of their own want no cord, and then what else might want one is the brake.
+function cordOf({ gear, wiring }: Sheet): Known {
+  const ownBattery = wiring?.style === "light-bar" && gear?.lightBar?.power === "own-battery";
+  const writtenDown = Object.values(gear?.cord ?? {}).some((value) => value !== null);
+  return !ownBattery || writtenDown || gear?.brake?.family === "installed-vacuum" || null;
 }
 
 /**

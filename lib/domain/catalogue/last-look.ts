@@ -10,13 +10,10 @@ export const lastLook: Entry[] = [
     station: "last-look",
     effect: "hold",
     when: [only("every")],
-    words: ({ brake }) => ({
+    words: () => ({
       part: "last-look",
       ask: "Hands on every joint, no tire low",
-      how: text(
-        "Walk around once more without talking. Push and pull each arm, each pin and each plug by hand, and look at every tire.",
-        brake !== "none" && "A prop that held a pedal down for the lamps is out.",
-      ),
+      how: "Walk around once more without talking. Push and pull each arm, each pin and each plug by hand, and look at every tire. A prop that held a brake pedal down for the lamps is out.",
       why: "The check that is missed is the one that was interrupted.",
       mend: "Whatever moves that should not: go back to that station and look at it again.",
       origin: couplingRule,

@@ -22,8 +22,8 @@ function towing(before: boolean | null, atReceiver: string[], atNose: string[], 
     ...(before ? [] : ["end-state"]),
     "steering-free",
     "brake-ready",
-    "monitor",
     "chocks-out",
+    "monitor",
     "wheels-roll",
     "arms-locked",
     "light-bar",
@@ -45,6 +45,7 @@ const unhooking = [
   "latches-released",
   "one-side",
   "bar-stowed",
+  "light-bar-off",
   "fuse-back",
   "back-to-driving",
 ];
@@ -59,6 +60,7 @@ export function ordersFor(before: boolean | null): Record<Purpose, string[]> {
     "re-check": [
       ...ruledOut,
       "receiver-pins",
+      "base-plate",
       "arm-left",
       "arm-right",
       "cables",
@@ -68,7 +70,6 @@ export function ordersFor(before: boolean | null): Record<Purpose, string[]> {
       "wheel-heat",
       "light-bar",
       "lamps",
-      "tires",
     ],
     unhook: ["coach-held", ...unhooking],
     delivery: [
@@ -87,8 +88,8 @@ export function ordersFor(before: boolean | null): Record<Purpose, string[]> {
       "driver-shows",
     ],
     "yard-in": [
-      "wheel-heat",
       "coach-held",
+      "wheel-heat",
       ...unhooking,
       "pins-counted",
       "bar-play",

@@ -15,7 +15,8 @@ export const pull: Entry[] = [
     when: [only("every")],
     words: ({ aligning, jacks, airSuspension }) => ({
       part: "wheels",
-      ...(aligning === false && { drawn: "place" as const }),
+      // Its drawing has arms that slide.
+      ...(!aligning && { drawn: "place" as const }),
       ask: "All four car wheels roll",
       how: text(
         "Pull forward a few feet, straight, and stop. Someone beside the rig sees all four car wheels turn and the front ones follow.",
@@ -25,8 +26,8 @@ export const pull: Entry[] = [
       mend: "Stop. Go back to the cabin and compare with the manual’s page again.",
       caution: text(
         CLEAR,
-        jacks && !airSuspension && "The coach’s jacks are up before it moves.",
-        airSuspension && "The coach is at travel height, with nothing down, before it moves.",
+        jacks !== false && "Any jack of the coach is up before it moves.",
+        airSuspension && "Its air suspension is at travel height.",
       ),
       touches: ["end-state", "steering-free", "chocks-out"],
       origin: makersManual("tow bars"),
@@ -56,9 +57,9 @@ export const pull: Entry[] = [
       drawn: "place",
       ask: "Bar without play, both sides tugged",
       how: "After pulling forward: the car stands in line. Push and pull the bar by hand on both sides. Nothing gives at the car or at the coach.",
-      why: "Play grows on the road until a pin works out or the car swings from side to side.",
-      mend: "Look at the pins on both sides again. Worn joints: the bar is not used.",
-      who: "You for pins and clips; a licensed shop for the bar.",
+      why: "Play grows on the road until something works out or the car swings from side to side.",
+      mend: "Look at what holds the bar on both sides again. Worn joints: the bar is not used.",
+      who: "You for what pins and clips hold; a licensed shop for the bar.",
       caution: `Hands off the bar while the coach can move. ${HELD}`,
       touches: ["arm-left", "arm-right"],
       origin: trackingRule,
@@ -103,18 +104,23 @@ export const pull: Entry[] = [
     station: "pull",
     effect: "hold",
     when: [only("every")],
-    words: ({ brake }) => ({
+    words: ({ brake, sheet: { coach } }) => ({
       part: "wheels",
       drawn: "standing",
-      ask: "No wheel hotter than its pair",
-      how: "Hold the back of a hand near each car wheel, without touching. Compare left with right. Straight off a long grade, wait first.",
-      why: "One hot wheel means a brake that drags, or a bearing.",
+      ask: "No hot wheel, no low tire",
+      how: "Hold the back of a hand near each car wheel, without touching. Compare left with right. Straight off a long grade, wait first. No tire is low.",
+      why: text(
+        "One hot wheel means a brake that drags, or a bearing, and a soft tire runs hot until it comes apart.",
+        coach?.engineBrakeLightsStopLamps &&
+          brake !== "none" &&
+          "This coach’s engine brake lights its stop lamps: a car brake that follows them is on all the way down a grade.",
+      ),
       mend: text(
-        "Let it cool. Look whether the parking brake is off",
-        brake === "none" ? "." : "and whether the brake unit holds the pedal down.",
-        "Then roll a few feet and feel again.",
-      ).replace(" .", "."),
-      who: "A licensed shop where it stays hot.",
+        "Let it cool. Look whether the parking brake is off.",
+        brake !== "none" && "Look whether the car’s brake pedal is held down.",
+        "Then roll a few feet and feel again. Fill a low tire once it is cold.",
+      ),
+      who: "You for air; a licensed shop where a wheel stays hot.",
       caution: "A hot wheel or hub can burn a hand.",
       touches: ["brake-ready", "chocks-out"],
       origin: reCheckRule,

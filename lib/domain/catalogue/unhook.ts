@@ -1,4 +1,4 @@
-import { butNot, only, unless, unsaid } from "./conditions";
+import { maybe, only, unless, unsaid } from "./conditions";
 import { text, type Entry, type Words } from "./entry";
 import type { Facts } from "./facts";
 import { makersManual, practice } from "./origins";
@@ -28,8 +28,8 @@ const builtInOff: Partial<
   hydraulic: {
     part: "brake",
     drawn: "installed",
-    ask: "Pedal up and firm, nothing drips",
-    how: "The car’s pedal is up and firm. Nothing drips where the line was coupled.",
+    ask: "Brake line off, capped, pedal firm",
+    how: "The brake line is off and both halves of its coupling are capped. Nothing drips, and the car’s pedal is up and firm.",
   },
   surge: {
     part: "brake",
@@ -47,10 +47,32 @@ const stowShared = {
   origin: makersManual("tow bars"),
 } satisfies Partial<Words>;
 
+const stowAsk = (lead: string, { armEnds }: Facts) =>
+  `${lead}, ${armEnds === "quick" ? "clips back on" : "pins back in holes"}`;
+
+function endsAway({ armEnds }: Facts): string {
+  return armEnds === "quick"
+    ? "Each arm’s spring clip is back on it, so that none is lost."
+    : "The arms’ pins are back in their own holes with their clips.";
+}
+
+const plateArms = ({ removableArms }: Facts) =>
+  removableArms && "The base plate’s own arms are off and put away, or home and locked.";
+
+const hardWired = ({ sheet }: Facts) => sheet.gear?.cord?.carEnd === "hard-wired";
+
 /** What hangs between the vehicles besides the bar, by name. */
-function lines({ breakaway, airLine }: Facts): string {
-  const names = ["cord", "cables", breakaway !== false && "lanyard", airLine && "air line"].filter(Boolean);
-  return `${names.slice(0, -1).join(", ")} and ${names.at(-1)}`;
+function lines(facts: Facts): string {
+  const { breakaway, airLine, sheet } = facts;
+  const charge = sheet.gear?.chargeLine?.there && sheet.gear.chargeLine.plug === "own-plug";
+  const names = [
+    !hardWired(facts) && "cord",
+    "cables",
+    breakaway !== false && "lanyard",
+    airLine && "air line",
+    charge && "charge line",
+  ].filter(Boolean);
+  return names.join(", ").replace(/, (?=[^,]*$)/, " and ");
 }
 
 export const unhook: Entry[] = [
@@ -86,17 +108,20 @@ export const unhook: Entry[] = [
     id: "lines-off",
     key: "lines-off",
     station: "cables-and-cord",
-    effect: "fix",
+    effect: "hold",
     when: [only("every")],
     words: (facts) => ({
       part: "cord",
-      drawn: facts.breakaway === false ? "place" : "off",
+      // Its drawing has sockets on both vehicles, and a lanyard.
+      drawn: facts.breakaway === false || hardWired(facts) ? "place" : "off",
       ask: "Cord, cables, lines off and capped",
       how: text(
-        `Off and put away: ${lines(facts)}. The caps on the sockets are closed.`,
+        `Off and put away: ${lines(facts)}.`,
+        hardWired(facts) && "The cord stays on the car, unplugged and tied up.",
+        "The caps on the sockets are closed.",
         facts.breakaway !== false && "The pin stays in the breakaway switch.",
       ),
-      why: "An open socket fills with water, and a cable that hangs gets caught.",
+      why: "What still hangs between the vehicles is torn off when the first one drives. An open socket fills with water.",
       mend: "Take them off and close the caps.",
       origin: practice,
     }),
@@ -106,12 +131,12 @@ export const unhook: Entry[] = [
     key: "latches-released",
     station: "car-nose",
     effect: "hold",
-    when: [butNot("aligning") && { condition: "aligning", on: ["yes", "unknown"] }],
+    when: [{ condition: "aligning", on: ["yes", "unknown"] }],
     words: () => ({
       part: "arms-locked",
       drawn: "place",
       ask: "Arm latches released, no load on them",
-      how: "The car is held. Each latch is released as the bar’s own manual has it, and each pin is free to lift. Where one is bound, that manual has the way to unload it: no hammer.",
+      how: "The car is held. Each latch is released as the bar’s own manual has it, and each arm’s end is free to come out. Where one is bound, that manual has the way to unload it: no hammer.",
       why: "A latch under load snaps when it is struck, and the arm jumps.",
       mend: "Leave it, keep hands out, and follow the bar’s own manual.",
       caution: "Hands out of where the arms pinch.",
@@ -123,7 +148,7 @@ export const unhook: Entry[] = [
     key: "one-side",
     station: "car-nose",
     effect: "hold",
-    when: [only("every")],
+    when: [{ condition: "stowsOnCoach", on: ["yes", "unknown"] }],
     words: () => ({
       part: "chocks",
       ask: "First arm off: the car stands still",
@@ -136,38 +161,90 @@ export const unhook: Entry[] = [
     }),
   },
   {
+    id: "bar-off-coach",
+    key: "one-side",
+    station: "car-nose",
+    effect: "hold",
+    when: [unless("stowsOnCoach")],
+    words: () => ({
+      part: "chocks",
+      ask: "Bar off at the coach: car stands still",
+      how: "The bar is off at the coach, and the car has not moved. Its parking brake is on and the chocks are tight to the tread.",
+      why: "With the bar off at the coach nothing but its own brake and the chocks hold the car.",
+      mend: "Stand clear. Hold the car before anyone goes near the bar again.",
+      caution: "Never the bar off before the car is held. A bar that comes down can crush a foot.",
+      touches: ["car-held"],
+      origin: practice,
+    }),
+  },
+  {
+    id: "light-bar-off",
+    key: "light-bar-off",
+    station: "car-tail",
+    effect: "fix",
+    when: [maybe("lightBar")],
+    words: ({ sheet: { gear } }) => ({
+      part: "light-bar",
+      drawn: "place",
+      ask: "Light bar off, car’s own lamps in view",
+      how: text(
+        "The light bar is off the car and put away.",
+        gear?.lightBar?.power !== "own-battery" && "Its cord is out of the way of doors and wheels.",
+        "The car’s own lamps and its plate are in view.",
+      ),
+      why: "A light bar that was left on hides the car’s own lamps, or falls off on the road.",
+      mend: "Take it off and put it where it is counted.",
+      origin: practice,
+    }),
+  },
+  {
     ...stow,
     id: "bar-stowed-coach",
     when: [only("stowsOnCoach")],
-    words: () => ({
+    words: (facts) => ({
       ...stowShared,
       part: "bar-stowed",
-      ask: "Bar folded, pins back in holes",
-      how: "The arms are folded and their latch is down for the road. The arms’ pins are back in their own holes with their clips. What holds the bar in the receiver is still pinned and clipped.",
+      // Its drawing has the arms' pins in their holes, and a bar in a receiver.
+      ...((facts.armEnds !== "pin" || facts.coupling !== "direct") && { drawn: "place" as const }),
+      ask: stowAsk("Bar folded", facts),
+      how: text(
+        "The arms are folded and their latch is down for the road.",
+        endsAway(facts),
+        "What holds the bar at the coach is still pinned and clipped.",
+        plateArms(facts),
+      ),
     }),
   },
   {
     ...stow,
     id: "bar-stowed-car",
     when: [unless("stowsOnCoach")],
-    words: () => ({
+    words: (facts) => ({
       ...stowShared,
       part: "bar-stowed",
       drawn: "place",
       ask: "Bar up on the car, pins back in holes",
-      how: "The bar is folded and made fast on the car as its own manual shows, or taken off. Every pin and clip is back in its own hole. Nothing is left at the coach that swings.",
+      how: text(
+        "The bar is folded and made fast on the car as its own manual shows, or taken off.",
+        "Every pin and clip is back in its own hole. Nothing is left at the coach that swings.",
+        plateArms(facts),
+      ),
     }),
   },
   {
     ...stow,
     id: "bar-stowed-unsaid",
     when: [unsaid("stowsOnCoach")],
-    words: () => ({
+    words: (facts) => ({
       ...stowShared,
       part: "bar-stowed",
       drawn: "place",
-      ask: "Bar folded, pins back in holes",
-      how: "The bar is folded and made fast as its own manual shows. Every pin and clip is back in its own hole.",
+      ask: stowAsk("Bar folded", facts),
+      how: text(
+        "The bar is folded and made fast as its own manual shows.",
+        endsAway(facts),
+        plateArms(facts),
+      ),
     }),
   },
 ];

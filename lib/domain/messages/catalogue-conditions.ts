@@ -74,6 +74,11 @@ export const conditionWords: Record<ConditionName, Reasons> = {
   },
   breakaway: gear("a breakaway switch"),
   airLine: gear("an air line"),
+  cord: {
+    yes: "A cord joins coach and car.",
+    no: "No cord joins coach and car.",
+    unknown: "The light bar has a battery of its own, so a cord may not be there: it is looked for.",
+  },
   chargeLine: gear("a charge line"),
   monitor: {
     yes: "The sheet has a brake monitor in the coach.",
