@@ -2,6 +2,7 @@ import type { Sequelize } from "sequelize";
 import { Device } from "./device";
 import { Entry } from "./entry";
 import { Fork } from "./fork";
+import { Invitation } from "./invitation";
 import { Member } from "./member";
 import { Organisation } from "./organisation";
 import { PhotoEntry } from "./photo-entry";
@@ -29,6 +30,7 @@ const tables = {
   Thing,
   ThingState,
   SheetPhoto,
+  Invitation,
 };
 export type Tables = typeof tables;
 

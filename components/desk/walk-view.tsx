@@ -1,7 +1,9 @@
+import Link from "next/link";
 import { clockText, durationText } from "@/lib/client/time-words";
 import { bodyOf } from "@/lib/domain/entry";
 import type { WalkReading } from "@/lib/domain/history";
 import { deskWords, walkWords } from "@/lib/domain/messages/desk";
+import { revisionsWords } from "@/lib/domain/messages/rigs";
 import { photosByCheck } from "@/lib/domain/photo";
 import { clockRemark, readWalk } from "@/lib/domain/walk-reading";
 import { DeskHeading } from "./desk-heading";
@@ -28,6 +30,13 @@ export function WalkView({ reading }: { reading: WalkReading }) {
       <title>{`${title} · ${deskWords.brand}`}</title>
       <DeskHeading over={<ToHistory />} title={title} />
       <TitleBlock reading={reading} />
+      <Link
+        href={`/desk/rig?id=${reading.walk.rig}&revision=${reading.walk.revision}`}
+        prefetch={false}
+        className="inline-flex min-h-11 items-center text-base font-semibold underline decoration-1 underline-offset-4 print:hidden"
+      >
+        {revisionsWords.asItWas}
+      </Link>
       <WalkVerdict
         reading={reading}
         read={read}

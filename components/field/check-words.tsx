@@ -7,6 +7,7 @@ import { walkingWords } from "@/lib/domain/messages/walking";
 import type { Check } from "@/lib/domain/revision";
 import type { Marking } from "./marking";
 import { segmentOf } from "@/lib/domain/walk-reading";
+import { WhyListed } from "./why-listed";
 
 type CheckWordsProps = {
   check: Check;
@@ -28,16 +29,18 @@ export function CheckWords({ check, mark, before, copying = false, marking }: Ch
   }, [check.key, asking]);
   return (
     <div className="flex flex-col">
-      <h2
-        ref={ask}
-        tabIndex={-1}
-        className="px-4 pt-3.5 text-[1.5625rem] leading-[1.18] font-extrabold tracking-[-0.01em] outline-none md:text-[2rem]"
-      >
-        {check.ask}
-      </h2>
-      {!asking && (
-        <p className="px-4 pt-1 text-soft md:text-xl">{copying ? walkingWords.paper.copy : check.how}</p>
-      )}
+      <WhyListed check={check} off={asking}>
+        <h2
+          ref={ask}
+          tabIndex={-1}
+          className="px-4 pt-3.5 text-[1.5625rem] leading-[1.18] font-extrabold tracking-[-0.01em] outline-none md:text-[2rem]"
+        >
+          {check.ask}
+        </h2>
+        {!asking && (
+          <p className="px-4 pt-1 text-soft md:text-xl">{copying ? walkingWords.paper.copy : check.how}</p>
+        )}
+      </WhyListed>
       {!mark && before && !asking && (
         <p className="px-4 pt-2 font-semibold">
           {before.note ? walkingWords.details.before(before.note) : walkingWords.details.beforeBare}
@@ -62,9 +65,6 @@ export function CheckWords({ check, mark, before, copying = false, marking }: Ch
             {fieldWords.walk.keep}
           </Button>
         </div>
-      )}
-      {check.why && !asking && (
-        <p className="mx-4 mt-5 hidden border-t-hair border-rule pt-4 text-soft md:block">{check.why}</p>
       )}
       {check.caution && !asking && !copying && (
         <div className="pt-3">

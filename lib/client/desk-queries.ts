@@ -21,13 +21,20 @@ export function isRefusal(error: unknown, code: ProblemDocument["code"]): boolea
   return error instanceof Refused && error.problem.code === code;
 }
 
-function valueOf<T>(answer: Answer<T>): T {
+/** An answer's value; throws {@link Refused} or {@link Unreached} where there is none. */
+export function valueOf<T>(answer: Answer<T>): T {
   if (answer.kind === "answered") return answer.value;
   throw answer.kind === "refused" ? new Refused(answer.problem) : new Unreached();
 }
 
-async function read<T>(shape: z.ZodMiniType<T>, path: string): Promise<T> {
+/** Reads from one of our own routes; throws `Refused` or `Unreached`. */
+export async function read<T>(shape: z.ZodMiniType<T>, path: string): Promise<T> {
   return valueOf(await call(shape, "GET", path));
+}
+
+/** Sends to one of our own routes; throws `Refused` or `Unreached`. */
+export async function send<T>(shape: z.ZodMiniType<T>, path: string, body: unknown): Promise<T> {
+  return valueOf(await call(shape, "POST", path, body));
 }
 
 export const whoQuery = queryOptions({

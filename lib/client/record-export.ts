@@ -21,6 +21,8 @@ export interface HeldRecord {
 export interface ExportFile {
   name: string;
   text: string;
+  /** Its media type, where it is not a record's. */
+  mime?: string;
 }
 
 /** The record file of a walk that this page holds; the store is not touched. */
@@ -78,8 +80,12 @@ export type HandedOver = "shared" | "downloaded" | "dismissed";
  * Hands a file to the person: by the phone's own share sheet where it takes such a file, as a download elsewhere.
  * Works with no network. Call it soon after a tap; the share sheet opens only then.
  */
-export async function handOver({ name, text }: ExportFile): Promise<HandedOver> {
-  const file = new File([text], name, { type: "application/x-ndjson" });
+export async function handOver({
+  name,
+  text,
+  mime = "application/x-ndjson",
+}: ExportFile): Promise<HandedOver> {
+  const file = new File([text], name, { type: mime });
   if (navigator.canShare?.({ files: [file] })) {
     try {
       await navigator.share({ files: [file], title: name });

@@ -10,7 +10,7 @@ export type AnswerKind = { json: Shape } | { media: string } | { bytes: `${strin
 
 /**
  * A route as declared once: its handler, its checks and its entry in the OpenAPI document all come from this.
- * A path's `{id}` is a UUID and its `{sha256}` a digest; anything else there is 404.
+ * A path's `{id}` is a UUID, its `{sha256}` a digest and its `{token}` an invitation's; anything else there is 404.
  */
 export interface Contract {
   method: "GET" | "POST" | "PUT" | "DELETE";

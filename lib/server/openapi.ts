@@ -1,5 +1,6 @@
 import "server-only";
 import * as z from "zod/mini";
+import { TOKEN } from "@/lib/domain/invitation";
 import { problems, problemShape, type ProblemCode } from "@/lib/domain/problem";
 import { digestShape } from "@/lib/domain/shapes";
 import { problemCodes, type AnswerKind, type Contract } from "./contract";
@@ -58,12 +59,18 @@ function operation(route: Contract): Json {
   };
 }
 
+const placeSchemas = {
+  id: { type: "string", format: "uuid" },
+  sha256: jsonSchema(digestShape, "input"),
+  token: { type: "string", pattern: TOKEN.source },
+};
+
 function pathParameters({ path }: Contract): Json[] {
   return [...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => ({
     name,
     in: "path",
     required: true,
-    schema: name === "id" ? { type: "string", format: "uuid" } : jsonSchema(digestShape, "input"),
+    schema: placeSchemas[name as keyof typeof placeSchemas],
   }));
 }
 

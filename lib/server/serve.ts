@@ -1,5 +1,6 @@
 import "server-only";
 import type * as z from "zod/mini";
+import { TOKEN } from "@/lib/domain/invitation";
 import type { Member } from "@/lib/domain/member";
 import { may } from "@/lib/domain/permissions";
 import { Problem } from "@/lib/domain/problem";
@@ -24,6 +25,8 @@ export interface Call<C extends Contract> {
   id: string;
   /** The path's `{sha256}`, a digest; empty where the path has none. */
   sha256: string;
+  /** The path's `{token}`, as an invitation's link has it; empty where the path has none. */
+  token: string;
   query: Parsed<C["query"]>;
   body: C extends { body: { shape: infer S } } ? Parsed<S> : undefined;
   /** The body as it was received, untouched by any schema: what digests are taken of. */
@@ -31,7 +34,7 @@ export interface Call<C extends Contract> {
 }
 
 /** What may stand in a path's places. */
-const places = { id: UUID, sha256: /^[0-9a-f]{64}$/ };
+const places = { id: UUID, sha256: /^[0-9a-f]{64}$/, token: TOKEN };
 
 interface RouteContext {
   params: Promise<unknown>;
@@ -81,10 +84,12 @@ async function checked(
 }
 
 function placesIn({ path }: Contract, params: unknown): Record<keyof typeof places, string> | Problem {
-  const { id = "", sha256 = "" } = (params ?? {}) as Partial<Record<keyof typeof places, string>>;
-  if (path.includes("{id}") && !places.id.test(id)) return new Problem("not-found");
-  if (path.includes("{sha256}") && !places.sha256.test(sha256)) return new Problem("not-found");
-  return { id, sha256 };
+  const { id = "", sha256 = "", token = "" } = (params ?? {}) as Partial<Record<keyof typeof places, string>>;
+  const found = { id, sha256, token };
+  const wrong = (Object.keys(places) as (keyof typeof places)[]).some(
+    (name) => path.includes(`{${name}}`) && !places[name].test(found[name]),
+  );
+  return wrong ? new Problem("not-found") : found;
 }
 
 function parsedQuery({ query }: Contract, request: Request): unknown {

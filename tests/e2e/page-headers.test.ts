@@ -1,6 +1,6 @@
 import { expect, test } from "../support/product";
 
-const pages = ["/", "/sign-in", "/sign-up", "/field", "/offline"];
+const pages = ["/", "/sign-in", "/sign-up", "/join", "/field", "/offline"];
 
 test.describe("headers", () => {
   for (const page of [...pages, "/no-such-page"]) {

@@ -174,6 +174,8 @@ describe("GET /api/openapi.json", () => {
       "post /api/session",
       "delete /api/session",
       "post /api/sign-up",
+      "get /api/join/{token}",
+      "post /api/join/{token}",
       "get /api/sheet-schema",
       "get /api/keys",
       "get /api/health",
@@ -214,7 +216,7 @@ describe("every route but the public ones", () => {
     const root = path.resolve(import.meta.dirname, "../../app/api");
     const member = await givenMember({ role: "manager" });
     for (const { method, path: route, public: open } of contracts) {
-      const file = path.join(root, route.slice("/api/".length).replace(/\{(\w+)\}/g, "[$1]"), "route.ts");
+      const file = path.join(root, route.slice("/api/".length).replaceAll(/\{(\w+)\}/g, "[$1]"), "route.ts");
       const handlers = (await import(file)) as Record<string, (request: Request) => Promise<Response>>;
       const bare = await handlers[method]!(request(method, route, null, method === "POST" ? "" : undefined));
       expect([route, bare.status === 401]).toEqual([route, !open]);

@@ -40,9 +40,9 @@ function faults(value: unknown, at: Schema, pointer = ""): string[] {
       : each.reduce((a, b) => (a.length <= b.length ? a : b));
   }
   const kind = value === null ? "null" : Array.isArray(value) ? "array" : typeof value;
-  const types = [at.type ?? kind].flat();
+  const types = at.type === undefined ? [kind] : [at.type].flat();
   const fits = types.includes(kind) || (types.includes("integer") && Number.isInteger(value));
-  if (at.type !== undefined && !fits) return [pointer];
+  if (!fits) return [pointer];
   if ("const" in at && at.const !== value) return [pointer];
   if (at.enum && !at.enum.includes(value)) return [pointer];
   if (typeof value === "string") {

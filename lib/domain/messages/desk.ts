@@ -75,6 +75,7 @@ export const deskWords = {
   nav: "Desk",
   skip: "Skip to the content",
   history: "History",
+  people: "People",
   field: "Field wing",
   signOut: "Sign out",
   signingOut: "Signing out",

@@ -3,7 +3,7 @@ import { optionWords } from "../messages/sheet-wiring";
 import type { UnitSystem } from "../units";
 import type { SheetDifference } from "./compare";
 import type { Field, SheetPhoto } from "./field";
-import { at, outline, pointerTo, type ListOutline } from "./outline";
+import { at, outline, pointerTo, type ListOutline, type PartOutline } from "./outline";
 import { quantityKinds, shownIn, siMember, siOf, type QuantityKind, type QuantityOf } from "./quantity";
 import type { Sheet } from "./sheet";
 
@@ -34,24 +34,35 @@ export interface ReadPart {
 
 /** A sheet part by part in reading order: what is written down, what is not known, what nobody has looked for. */
 export function readParts(sheet: Sheet): ReadPart[] {
-  return outline.map(({ path, title, fields, words, lists }) => {
-    const values = at(sheet, path);
-    const lines = Object.entries(fields).map(([key, field]) => ({
-      pointer: pointerTo([...path, key]),
-      label: words[key]!.label,
-      field,
-      value: values?.[key],
-    }));
-    return {
-      key: path.at(-1) ?? "rig",
-      title,
-      there: values?.there !== false,
-      known: lines.filter(({ value }) => value !== undefined && value !== null),
-      unknown: lines.filter(({ value }) => value === null),
-      gaps: lines.filter(({ value }) => value === undefined),
-      lists: lists.map((one) => ({ outline: one, items: (values?.[one.key] as ReadList["items"]) ?? [] })),
-    };
-  });
+  return outline.map((part) => readPart(part, part.path, at(sheet, part.path)));
+}
+
+/** One coach, car or piece of gear by itself, as a sheet said of it; `kind` is `coach`, `car` or a gear's key. */
+export function readThing(kind: string, state: Record<string, unknown>): ReadPart | null {
+  const part = outline.find(({ thing, path }) => thing && path.at(-1) === kind);
+  return part ? readPart(part, [], state) : null;
+}
+
+function readPart(
+  { path, title, fields, words, lists }: PartOutline,
+  within: readonly string[],
+  values: Record<string, unknown> | undefined,
+): ReadPart {
+  const lines = Object.entries(fields).map(([key, field]) => ({
+    pointer: pointerTo([...within, key]),
+    label: words[key]!.label,
+    field,
+    value: values?.[key],
+  }));
+  return {
+    key: path.at(-1) ?? "rig",
+    title,
+    there: values?.there !== false,
+    known: lines.filter(({ value }) => value !== undefined && value !== null),
+    unknown: lines.filter(({ value }) => value === null),
+    gaps: lines.filter(({ value }) => value === undefined),
+    lists: lists.map((one) => ({ outline: one, items: (values?.[one.key] as ReadList["items"]) ?? [] })),
+  };
 }
 
 /** A value in words: quantities in the units of the reader, and as they were entered where that is another one. */

@@ -1,6 +1,7 @@
 import type { Contract } from "../contract";
 import { registerDevice } from "./devices";
 import { readBundle, sendEntries } from "./field";
+import { invite, join, listInvitations, listPeople, readInvitation, withdrawInvitation } from "./people";
 import { askForPhoto, readPhoto, sendPhoto } from "./photos";
 import {
   listRigs,
@@ -23,6 +24,12 @@ export const contracts: readonly Contract[] = [
   whoAmI,
   signOut,
   signUp,
+  listPeople,
+  listInvitations,
+  invite,
+  withdrawInvitation,
+  readInvitation,
+  join,
   registerDevice,
   readBundle,
   sendEntries,

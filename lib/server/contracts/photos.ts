@@ -5,8 +5,8 @@ export const askForPhoto = contract({
   method: "POST",
   path: "/api/photos/{sha256}",
   summary:
-    "Ask where a photograph's bytes go. An entry of a walk of the member's organization has to name it, or a sheet; ask once " +
-    "more after sending, and `have` says that it is there.",
+    "Ask where a photograph's bytes go. An entry of a walk or a sheet of the member's organization has to name " +
+    "it; ask once more after sending, and `have` says that it is there.",
   action: "walks.record",
   answers: { 200: { json: photoAnswerShape } },
   problems: ["too-large", "wrong-media"],
@@ -27,7 +27,7 @@ export const readPhoto = contract({
   method: "GET",
   path: "/api/photos/{sha256}",
   summary:
-    "The bytes of a photograph as recorded, for whoever may read a walk or a rig whose sheet names it.",
+    "The bytes of a photograph as recorded, for whoever may read a walk or a rig's sheet that names it.",
   action: "walks.read-own",
   answers: { 200: { bytes: "image/*" } },
 });

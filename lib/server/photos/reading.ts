@@ -4,37 +4,41 @@ import { may } from "@/lib/domain/permissions";
 import type { PhotoMime, WalkPhoto } from "@/lib/domain/photo";
 import { Problem } from "@/lib/domain/problem";
 import { database } from "../database";
-import { seenOnSheet } from "./in-sheets";
 import { photoStore } from "./store";
 
 type Found = { organisation: string; bytes: number; mime: PhotoMime };
 
 /**
- * A photograph's bytes for a member who may see a walk that names it (as `maySeeWalk` says), or a rig whose sheet does.
- * One that has not come, is named by neither, or is not there at all is the same `not-found`.
+ * A photograph's bytes for a member who may see a walk (as `maySeeWalk` says) or a rig's sheet that names it. One that has
+ * not come, is named by none of them, or is not there at all is the same `not-found`. The bytes are always those that the
+ * organisation of that walk or sheet has sent.
  */
 export async function photoBytes(
-  member: Member,
+  { id, role, organisation }: Member,
   sha256: string,
 ): Promise<{ mime: PhotoMime; bytes: Uint8Array<ArrayBuffer> } | Problem> {
-  const { id, role, organisation } = member;
   const seen = may(role, "walks.read-all")
     ? "(w.member_id = :id OR w.organisation_id = :organisation OR r.keeper_id = :organisation)"
     : "w.member_id = :id";
-  const [inWalk] = await database().query<Found>(
+  const [found] = await database().query<Found>(
     `SELECT o.organisation_id AS organisation, o.bytes, o.mime
       FROM photo_entries p
       JOIN walks w ON w.id = p.walk_id
       JOIN rigs r ON r.id = w.rig_id
       JOIN photo_objects o ON o.sha256 = p.sha256 AND o.organisation_id = w.organisation_id
       WHERE p.sha256 = :sha256 AND ${seen}
+      UNION ALL
+      SELECT o.organisation_id AS organisation, o.bytes, o.mime
+      FROM sheet_photos p
+      JOIN rigs r ON r.id = p.rig_id AND :organisation IN (r.keeper_id, r.builder_id)
+      JOIN photo_objects o ON o.sha256 = p.sha256 AND o.organisation_id = p.organisation_id
+      WHERE p.sha256 = :sha256
       LIMIT 1`,
     {
       type: QueryTypes.SELECT,
       replacements: { sha256: Buffer.from(sha256, "hex"), organisation: organisation.id, id },
     },
   );
-  const found = inWalk ?? (await seenOnSheet(member, sha256));
   const bytes = found && (await photoStore().read({ ...found, sha256 }));
   return bytes ? { mime: found.mime, bytes } : new Problem("not-found");
 }

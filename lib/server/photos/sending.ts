@@ -4,7 +4,6 @@ import type { Member } from "@/lib/domain/member";
 import { isPhotoMime, PHOTO, type PhotoAnswer, type PhotoLink } from "@/lib/domain/photo";
 import { Problem } from "@/lib/domain/problem";
 import { database, tables } from "../database";
-import { namedBySheet } from "./in-sheets";
 import { linkHolds } from "./link";
 import { photoStore, type StoredPhoto } from "./store";
 
@@ -23,9 +22,27 @@ export function recordedQuery({ id, organisation }: Pick<Member, "id" | "organis
   };
 }
 
+/** The statement for what a sheet that the organisation saved says beside a digest, the newest first. */
+export function onSheetQuery({ organisation }: Pick<Member, "organisation">, sha256: string) {
+  return {
+    sql: `SELECT p.bytes, p.mime FROM sheet_photos p JOIN revisions v ON v.rig_id = p.rig_id AND v.number = p.number
+      WHERE p.sha256 = :sha256 AND p.organisation_id = :organisation
+      ORDER BY v.created_at DESC, p.number DESC LIMIT 1`,
+    replacements: { sha256: Buffer.from(sha256, "hex"), organisation: organisation.id },
+  };
+}
+
+async function recordedAs(member: Member, sha256: string): Promise<Recorded | undefined> {
+  for (const { sql, replacements } of [recordedQuery(member, sha256), onSheetQuery(member, sha256)]) {
+    const [recorded] = await database().query<Recorded>(sql, { type: QueryTypes.SELECT, replacements });
+    if (recorded) return recorded;
+  }
+  return undefined;
+}
+
 /**
- * Where the bytes of a photograph go that an entry of a walk of the member's organisation names, or one of its sheets,
- * or that they are there. Asking is also how their arrival is noted: a store that is not ours does not tell.
+ * Where the bytes of a photograph go that an entry of a walk or a sheet of the member's organisation names, or that they
+ * are there. Asking is also how their arrival is noted: a store that is not ours does not tell.
  */
 export async function placeFor(
   member: Member,
@@ -33,9 +50,7 @@ export async function placeFor(
   now: Date = new Date(),
 ): Promise<PhotoAnswer | Problem> {
   const { organisation } = member;
-  const { sql, replacements } = recordedQuery(member, sha256);
-  const [inWalk] = await database().query<Recorded>(sql, { type: QueryTypes.SELECT, replacements });
-  const recorded = inWalk ?? (await namedBySheet(member, sha256));
+  const recorded = await recordedAs(member, sha256);
   if (!recorded) return new Problem("not-found");
   const { bytes, mime } = recorded;
   if (bytes > PHOTO.bytes) return new Problem("too-large", { detail: `The most is ${PHOTO.bytes} bytes.` });

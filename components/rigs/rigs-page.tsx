@@ -1,0 +1,54 @@
+"use client";
+
+import { useQuery } from "@tanstack/react-query";
+import { useState } from "react";
+import Link from "next/link";
+import { whoQuery } from "@/lib/client/desk-queries";
+import { rigsQuery, thingsQuery } from "@/lib/client/rig-queries";
+import { rigsWords as words } from "@/lib/domain/messages/rigs";
+import { may } from "@/lib/domain/permissions";
+import { DeskHeading } from "../desk/desk-heading";
+import { buttonClass } from "../ui/button";
+import { EmptyState } from "../ui/empty-state";
+import { Fetched } from "./fetched";
+import { RigTable } from "./rig-table";
+
+/** The rigs that this member's organization keeps or built. */
+export function RigsPage() {
+  const { data: member } = useQuery(whoQuery);
+  const writes = member ? may(member.role, "rigs.write") : false;
+  const rigs = useQuery(rigsQuery);
+  // What is on a rig is in the book of things; without it the rows say less, and nothing is missing.
+  const { data: book } = useQuery(thingsQuery);
+  return (
+    <>
+      <DeskHeading title={words.title} sub={words.sub} />
+      {writes && rigs.data && rigs.data.rigs.length > 0 && <NewRig />}
+      <Fetched query={rigs} label={words.fetching} rows={4}>
+        {({ rigs: rows }) =>
+          rows.length > 0 ? (
+            <RigTable rows={rows} things={book?.things ?? []} />
+          ) : (
+            <EmptyState title={words.emptyTitle} action={writes && <NewRig />}>
+              <p>{writes ? words.emptyWriter : words.emptyReader}</p>
+            </EmptyState>
+          )
+        }
+      </Fetched>
+    </>
+  );
+}
+
+/** The way to an empty sheet, under an id that is made here so that saving it twice makes one rig. */
+function NewRig() {
+  const [id] = useState(() => crypto.randomUUID());
+  return (
+    <Link
+      href={`/desk/sheet?new=${id}`}
+      prefetch={false}
+      className={`${buttonClass("good", "desk")} mb-4 max-w-full px-6`}
+    >
+      {words.newRig}
+    </Link>
+  );
+}
