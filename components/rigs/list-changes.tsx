@@ -71,5 +71,6 @@ function Walks({ walks }: { walks: ListDifference["walks"] }) {
 function sayOf(check: Check, member: string): string | null {
   const value = check[member];
   if (member === "effect") return effectWords[check.effect];
+  if (member === "origin") return check.origin?.says ?? null;
   return typeof value === "string" ? value : null;
 }

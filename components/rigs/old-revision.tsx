@@ -40,7 +40,7 @@ export function OldRevision({ rig, revision }: OldRevisionProps) {
           {words.toLatest}
         </Link>
       </Notice>
-      <div className="mt-6 grid grid-cols-1 gap-x-10 gap-y-8 @5xl:grid-cols-[minmax(0,1fr)_21rem] print:block">
+      <div className="mt-6 grid grid-cols-1 gap-x-10 gap-y-8 @4xl:grid-cols-[minmax(0,1fr)_19rem] print:block">
         <div className="@container min-w-0">
           <SheetView sheet={sheet} />
         </div>

@@ -9,7 +9,7 @@ export function PartLines({ part: { known, unknown, gaps, lists } }: { part: Rea
   return (
     <div className="text-base">
       {shown.length > 0 && (
-        <dl className="grid grid-cols-1 gap-x-8 @2xl:grid-cols-2 print:grid-cols-2">
+        <dl className="grid grid-cols-1 gap-x-8 @xl:grid-cols-2 print:grid-cols-2">
           {shown.map((line) => (
             <Row key={line.pointer} line={line} />
           ))}
@@ -37,7 +37,7 @@ function Row({ line: { label, field, value } }: { line: Line }) {
   const long = field.kind === "text" && field.lines;
   return (
     <div
-      className={`grid grid-cols-1 items-baseline gap-x-3 border-b border-rule py-1.5 @2xs:grid-cols-[minmax(0,1fr)_minmax(0,1fr)] ${long ? "@2xl:col-span-2 print:col-span-2" : ""}`}
+      className={`grid grid-cols-1 items-baseline gap-x-3 border-b border-rule py-1.5 @2xs:grid-cols-[minmax(0,1fr)_minmax(0,1fr)] ${long ? "@xl:col-span-2 print:col-span-2" : ""}`}
     >
       <dt className="text-soft">{label}</dt>
       <dd className="font-semibold">

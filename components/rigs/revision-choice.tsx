@@ -29,7 +29,7 @@ export function RevisionChoice({ label, rows, value, onChoose }: RevisionChoiceP
         className="min-h-12 w-full min-w-0 rounded-[3px] border-2 border-edge bg-paper px-3 py-2 text-lg text-ink"
       >
         {rows.map((row) => (
-          <option key={row.digest} value={row.digest}>
+          <option key={row.number} value={row.digest}>
             {`${words.row(row.number)}, ${momentText(row.createdAt, now)}`}
           </option>
         ))}

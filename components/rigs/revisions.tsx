@@ -12,11 +12,11 @@ export function Revisions({ reading: { id, revision, revisions } }: { reading: R
       <ol className="mt-3 border-t border-rule text-base">
         {revisions.map((row, at) => (
           <Row
-            key={row.digest}
+            key={row.number}
             rig={id}
             row={row}
             before={revisions[at + 1]}
-            latest={row.digest === revision.digest}
+            latest={row.number === revision.number}
           />
         ))}
       </ol>

@@ -36,7 +36,7 @@ export function RigView({ reading }: { reading: RigReading }) {
       {sheet && reading.newerList && (
         <NewerList key={revision.digest} reading={reading} sheet={sheet} onOutcome={setOutcome} />
       )}
-      <div className="mt-6 grid grid-cols-1 gap-x-10 gap-y-8 @5xl:grid-cols-[minmax(0,1fr)_21rem] print:block">
+      <div className="mt-6 grid grid-cols-1 gap-x-10 gap-y-8 @4xl:grid-cols-[minmax(0,1fr)_19rem] print:block">
         <div className="@container min-w-0">
           <SheetView sheet={sheet} />
         </div>
