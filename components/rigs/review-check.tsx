@@ -39,7 +39,7 @@ export function ReviewCheck({ reviewed: { id, check, listed, reason, walks }, wa
           <p className="tabular text-[0.875rem] text-soft">{id}</p>
         </div>
       </div>
-      <dl className="grid grid-cols-1 content-start gap-x-4 gap-y-1.5 @2xs:grid-cols-[7.5rem_minmax(0,1fr)] @max-3xl:pl-8">
+      <dl className="grid grid-cols-1 content-start gap-x-4 gap-y-1.5 @2xs:grid-cols-[7.5rem_minmax(0,1fr)] @max-3xl:pl-8 print:pl-0">
         <Row label={words.labels.how}>{check.how}</Row>
         <Row label={words.labels.why}>{check.why}</Row>
         <Row label={words.labels.mend}>{check.mend}</Row>

@@ -28,7 +28,10 @@ export function ReviewDiffers({ difference: { key, ask, members = [], walks }, s
       {rows.length > 0 && (
         <table role="table" className="mt-1 block">
           <caption className="sr-only">{words.what}</caption>
-          <thead role="rowgroup" className="sr-only @3xl:not-sr-only @3xl:block">
+          <thead
+            role="rowgroup"
+            className="sr-only @3xl:not-sr-only @3xl:block print:not-sr-only print:block"
+          >
             <tr role="row" className={grid}>
               {[words.what, ...sides.map(({ name }) => name)].map((head, at) => (
                 <th

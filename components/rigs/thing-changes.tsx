@@ -14,7 +14,7 @@ export function ThingChanges({ changes }: { changes: readonly SheetDifference[] 
   return (
     <table role="table" className="mt-1 block">
       <caption className="sr-only">{words.history}</caption>
-      <thead role="rowgroup" className="sr-only @md:not-sr-only @md:block">
+      <thead role="rowgroup" className="sr-only @md:not-sr-only @md:block print:not-sr-only print:block">
         <tr role="row" className={grid}>
           {[words.field, words.before, words.after].map((head) => (
             <th
