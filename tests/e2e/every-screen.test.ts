@@ -29,7 +29,7 @@ async function everyState(page: Page, visit: Visit): Promise<void> {
   await tap(page, /^Show the stations/);
   await visit("the stations");
   await tap(page, /^Car cabin/);
-  await expect(ask(page)).toHaveText("Cabin just as page 214 shows");
+  await expect(ask(page)).toHaveText("Cabin as on page 214");
   await tap(page, /^Good/);
   await tap(page, /^Good/);
   await visit("do the stop lamps light");

@@ -96,7 +96,7 @@ test("a reload waits at the same check, and the last two are asked again", async
   }
   const waiting = await ask(page).innerText();
   await page.reload();
-  await expect(page.getByText(`It waits at 4 of 18: ${waiting}`)).toBeVisible();
+  await expect(page.getByText(`It waits at 4 of 21: ${waiting}`)).toBeVisible();
   await expect(page.getByText(asked[0]!)).toHaveCount(0);
   await expect(page.getByText(asked[1]!)).toBeVisible();
   await tap(page, /^Go on$/);
@@ -118,17 +118,17 @@ test("paused, taken up, someone was in the car: the cabin is asked again, and on
   test.setTimeout(240_000);
   await readySlowPhone(page, product);
   await startHookUp(page);
-  while ((await place(page))[0]! < 10) {
+  while ((await place(page))[0]! < 12) {
     const asked = await ask(page).innerText();
     await tap(page, good);
     await expect(ask(page)).not.toHaveText(asked);
   }
   await tap(page, /^Stop…/);
   await tap(page, /^Pause/);
-  await tap(page, /^Go on: hook-up, 10 of 18/);
+  await tap(page, /^Go on: hook-up, 12 of 21/);
   await expect(page.getByText("Has anyone been in the car since the cabin was marked?")).toBeVisible();
   await tap(page, /^Someone, or not sure/);
-  await expect(ask(page)).toHaveText("Cabin just as page 214 shows");
+  await expect(ask(page)).toHaveText("Cabin as on page 214");
   await walkOn(page);
   const entries = await storedEntries(page);
   const asked = entries.filter(({ type }) => type === "resume").map(({ body }) => body);
@@ -145,7 +145,7 @@ test("at the last look: someone was in the car, so the cabin comes first", async
   await startHookUp(page);
   await walkOn(page, () => good, nobody);
   await tap(page, /^Someone, or not sure/);
-  await expect(ask(page)).toHaveText("Cabin just as page 214 shows");
+  await expect(ask(page)).toHaveText("Cabin as on page 214");
   await walkOn(page);
   await tap(page, closeAndSign);
   await expect(page.getByRole("heading", { name: "No hold marked" })).toBeVisible();
@@ -179,7 +179,7 @@ test("fixed and gone on: only what the mending can have changed is asked again",
   expect(again).toEqual(
     expect.arrayContaining(["Parking brake off, chocks out", "All four car wheels roll"]),
   );
-  expect(again).toContain("Hands on every joint: none loose");
+  expect(again).toContain("Hands on every joint, no tire low");
   await tap(page, closeAndSign);
   await expect(page.getByRole("heading", { name: "No hold marked" })).toBeVisible();
 });
@@ -192,7 +192,7 @@ test("couldn't see leaves the walk unfinished, and says what", async ({ page, pr
   await walkOn(page, (asked) => (asked === unseen ? /^Couldn’t see/ : good));
   await tap(page, closeAndSign);
   await expect(page.getByRole("heading", { name: "Unfinished" })).toBeVisible();
-  await expect(page.getByText("17 of 18 looked at.", { exact: true })).toBeVisible();
+  await expect(page.getByText("20 of 21 looked at.", { exact: true })).toBeVisible();
   await expect(page.getByRole("list").filter({ hasText: unseen })).toBeVisible();
 });
 
@@ -256,7 +256,7 @@ test("a card is printed, and entered later as a walk from paper, untimed", async
   await expect(page.getByText("from paper", { exact: true })).toBeVisible();
   await walkOn(page);
   await tap(page, closeAndSign);
-  await expect(page.getByText(/18 of 18 looked at, from paper, untimed\./)).toBeVisible();
+  await expect(page.getByText(/21 of 21 looked at, from paper, untimed\./)).toBeVisible();
   const entries = await storedEntries(page);
   expect(entries[0]!.body).toMatchObject({ source: "paper" });
   expect(entries[1]!.body).toEqual({ text: "Walked on paper, 2026-11-30 08:10." });
