@@ -251,6 +251,8 @@ test("text at twice its size fits at 360 px", async ({ page, product }) => {
 for (const width of [390, 1280]) {
   for (const colorScheme of ["light", "dark"] as const) {
     test(`axe finds nothing at ${width} px, ${colorScheme}`, async ({ page, product }) => {
+      // Three pages, one of them a whole sheet: axe takes its time over it on a slow machine.
+      test.setTimeout(180_000);
       await page.setViewportSize({ width, height: 800 });
       await page.emulateMedia({ colorScheme });
       const rig = await firstRig(page, product, "driver@demo.example");
