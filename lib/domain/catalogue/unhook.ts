@@ -91,7 +91,11 @@ export const unhook: Entry[] = [
     ...off,
     id: "brake-built-in-off",
     when: [only("brake"), unless("brakeBox")],
-    words: ({ brake }) => ({ ...offShared, ...builtInOff[brake ?? "installed-vacuum"]! }),
+    // A brake of another kind keeps this off the list, where a reviewer still reads it.
+    words: ({ brake }) => ({
+      ...offShared,
+      ...(builtInOff[brake ?? "installed-vacuum"] ?? builtInOff["installed-vacuum"]!),
+    }),
   },
   {
     ...off,
