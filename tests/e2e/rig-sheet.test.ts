@@ -51,7 +51,7 @@ test("a rig is entered through the form alone, with a stop, a reload and a spell
   context,
   product,
 }) => {
-  test.setTimeout(180_000);
+  test.setTimeout(300_000);
   const rig = await newSheet(page, product);
   await page.evaluate(async () => {
     await navigator.serviceWorker.ready;
