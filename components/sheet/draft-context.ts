@@ -9,6 +9,8 @@ export interface DraftDesk {
   isNew: boolean;
   /** The draft as a sheet, as it is now. */
   sheet: Sheet;
+  /** Counts the drafts that took another's place: none of their inputs may keep what it showed. */
+  generation: number;
   /** Puts another draft in the place of this one, on the screen too. */
   replace: (draft: Draft) => void;
 }

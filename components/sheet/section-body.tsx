@@ -1,3 +1,4 @@
+import { Fragment } from "react";
 import type { DraftKeeper } from "@/lib/client/sheet-draft";
 import type { FieldError } from "@/lib/domain/problem";
 import { partShows, sectionParts, type SectionKey } from "@/lib/domain/sheet/draft-sections";
@@ -29,17 +30,17 @@ export type SectionBodyProps = {
 
 /** What stands in a section. */
 export function SectionBody({ section, ...rest }: SectionBodyProps) {
-  const { sheet } = useDraftDesk();
+  const { sheet, generation } = useDraftDesk();
   if (section === "rig") return <RigSection />;
-  if (section === "manual") return <ManualSection />;
+  if (section === "manual") return <ManualSection key={generation} />;
   if (section === "look") return <LookOver {...rest} />;
   const shown = sectionParts[section].filter((key) => partShows(sheet, key));
   return (
-    <>
+    <Fragment key={generation}>
       {shown.map((key) => (
         <PartFields key={key} part={key} alone={shown.length === 1} />
       ))}
       {section === "wiring" && <WiringEditor />}
-    </>
+    </Fragment>
   );
 }

@@ -17,6 +17,8 @@ import { useKeeper } from "./use-keeping";
 import { useSection } from "./use-section";
 import { Warnings } from "./warnings";
 
+const AFTER_TAP_MS = 250;
+
 type SheetFormProps = {
   start: KeptDraft;
   isNew: boolean;
@@ -33,7 +35,6 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
   const { section, go, heading } = useSection();
   const [faults, setFaults] = useState(() => draftErrors(start.draft));
   const [warnings, setWarnings] = useState(() => draftWarnings(start.draft));
-  // Another draft in its place is another page of inputs: none may keep what it showed.
   const [generation, setGeneration] = useState(0);
 
   const check = () => {
@@ -41,6 +42,13 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
     setWarnings(draftWarnings(form.getValues()));
     return form.trigger();
   };
+  // Not while the tap that took the focus away is still on the glass: what is said of a field moves those below it.
+  const soon = useRef<ReturnType<typeof setTimeout>>(undefined);
+  const checkSoon = () => {
+    clearTimeout(soon.current);
+    soon.current = setTimeout(() => void check(), AFTER_TAP_MS);
+  };
+  useEffect(() => () => clearTimeout(soon.current), []);
   const read = (): KeptDraft => ({
     rig: start.rig,
     ...base,
@@ -72,7 +80,7 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
   const { filled, of } = progressOf(sheet, section);
   return (
     <FormProvider {...form}>
-      <DraftDeskContext value={{ rig: start.rig, isNew, sheet, replace }}>
+      <DraftDeskContext value={{ rig: start.rig, isNew, sheet, generation, replace }}>
         <Warnings value={warnings}>
           <DeskHeading
             title={sheet.name ? words.editing(sheet.name) : isNew ? words.newTitle : words.title}
@@ -87,7 +95,7 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
               noValidate
               onSubmit={(event) => event.preventDefault()}
               onBlur={() => {
-                void check();
+                checkSoon();
                 void keeper.flush();
               }}
             >
@@ -111,7 +119,7 @@ export function SheetForm({ start, isNew, member }: SheetFormProps) {
                 {of > 0 && <p className="tabular text-soft">{words.progress(filled, of)}</p>}
               </div>
               <SectionBody
-                key={`${section} ${generation}`}
+                key={section}
                 section={section}
                 base={base}
                 faults={faults}
