@@ -65,16 +65,18 @@ export function FaultDetails({ recorder, check, callouts, marking, onMended }: F
         />
       </div>
       <CheckPhotos recorder={recorder} check={check.key} />
-      <div className="acts-two">
-        <Button variant="quiet" onClick={() => marking.mark("good", { because: "mis-tap" })}>
-          {words.misTap}
-        </Button>
-        {check.effect === "hold" && (
-          <Button variant="quiet" onClick={onMended ?? (() => marking.ask("what"))}>
-            {words.mended}
+      {!check.ruled && (
+        <div className="acts-two">
+          <Button variant="quiet" onClick={() => marking.mark("good", { because: "mis-tap" })}>
+            {words.misTap}
           </Button>
-        )}
-      </div>
+          {check.effect === "hold" && (
+            <Button variant="quiet" onClick={onMended ?? (() => marking.ask("what"))}>
+              {words.mended}
+            </Button>
+          )}
+        </div>
+      )}
     </Question>
   );
 }

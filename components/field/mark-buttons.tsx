@@ -20,14 +20,17 @@ export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
     <div className="flex flex-col gap-2.5">
       {/* Good takes two columns of the row below and the gap between them; with large text each takes a row. */}
       <div className="by-hand flex flex-wrap gap-2.5">
-        <Button
-          variant="good"
-          hint={asDrawn ? words.asDrawn : undefined}
-          className="min-w-[min(100%,10.5rem)] flex-[2_1_0.625rem] text-[1.875rem]"
-          onClick={() => marking.mark("good")}
-        >
-          {words.good}
-        </Button>
+        {/* What the sheet rules out, nobody can see good at the rig. */}
+        {!check.ruled && (
+          <Button
+            variant="good"
+            hint={asDrawn ? words.asDrawn : undefined}
+            className="min-w-[min(100%,10.5rem)] flex-[2_1_0.625rem] text-[1.875rem]"
+            onClick={() => marking.mark("good")}
+          >
+            {words.good}
+          </Button>
+        )}
         <Button
           variant={holds ? "fault-hold" : "fault-fix"}
           className="min-w-25 flex-1"
@@ -43,9 +46,11 @@ export function MarkButtons({ check, first, marking }: MarkButtonsProps) {
         <Button variant="quiet" className={third} onClick={() => marking.mark("unseen")}>
           {fieldWords.outcome.unseen}
         </Button>
-        <Button variant="quiet" className={third} onClick={() => marking.mark("absent")}>
-          {fieldWords.outcome.absent}
-        </Button>
+        {!check.ruled && (
+          <Button variant="quiet" className={third} onClick={() => marking.mark("absent")}>
+            {fieldWords.outcome.absent}
+          </Button>
+        )}
       </div>
     </div>
   );

@@ -15,6 +15,7 @@ import { useNowMs } from "./now";
 import { OpenFindings } from "./open-findings";
 import { RigPicture } from "./rig-picture";
 import { RigStarts } from "./rig-starts";
+import { RuledNotice } from "./ruled-notice";
 import { lastWalkOf, openWalksOf, purposesFor, usualDepth } from "./rig-state";
 import { Stale } from "./stale";
 import { SaveTrouble } from "./save-trouble";
@@ -61,6 +62,7 @@ export function RigCard({ rig, member, walks, alone }: RigCardProps) {
           <h2 id={title} className="text-[1.75rem] leading-[1.1] font-extrabold tracking-[-0.01em]">
             {rig.name}
           </h2>
+          <RuledNotice document={rig.revision.document} />
           {/* While a walk is open, what an earlier one came to would speak against it. */}
           {open.length === 0 && (
             <>

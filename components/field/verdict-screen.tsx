@@ -15,6 +15,7 @@ import { Mended } from "./mended";
 import { OpenFindings } from "./open-findings";
 import { lastOfWalk } from "./rig-state";
 import { useArrival, useScreenTitle } from "./screen-title";
+import { RuledNotice } from "./ruled-notice";
 import { Stale } from "./stale";
 import { StepList } from "./step-list";
 import { useTaking } from "./taking";
@@ -73,6 +74,9 @@ export function VerdictScreen({ view, walk, sync }: VerdictScreenProps) {
           )}
         </div>
         <div>
+          <div className="px-4 pt-3 empty:hidden">
+            <RuledNotice document={rig?.revision.document ?? view.document} />
+          </div>
           {rig && rig.openFindings.length > 0 && (
             <div className="px-4 py-3">
               <OpenFindings rig={rig} />

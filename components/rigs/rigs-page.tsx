@@ -23,7 +23,18 @@ export function RigsPage() {
   return (
     <>
       <DeskHeading title={words.title} sub={words.sub} />
-      {writes && rigs.data && rigs.data.rigs.length > 0 && <NewRig />}
+      {writes && (
+        <div className="mb-4 flex flex-wrap items-center gap-x-6 gap-y-2">
+          {rigs.data && rigs.data.rigs.length > 0 && <NewRig />}
+          <Link
+            href="/desk/sheet"
+            prefetch={false}
+            className="inline-flex min-h-11 items-center font-semibold underline decoration-2 underline-offset-4"
+          >
+            {words.drafts}
+          </Link>
+        </div>
+      )}
       <Fetched query={rigs} label={words.fetching} rows={4}>
         {({ rigs: rows }) =>
           rows.length > 0 ? (
@@ -46,7 +57,7 @@ function NewRig() {
     <Link
       href={`/desk/sheet?new=${id}`}
       prefetch={false}
-      className={`${buttonClass("good", "desk")} mb-4 max-w-full px-6`}
+      className={`${buttonClass("good", "desk")} max-w-full px-6`}
     >
       {words.newRig}
     </Link>

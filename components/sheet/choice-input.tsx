@@ -54,6 +54,15 @@ function List({ id, value, onChange, describedBy, invalid, answers }: AnswersPro
   );
 }
 
+/** As many answers beside each other as leave their words whole. */
+function columnsFor(answers: AnswersProps["answers"]): string {
+  if (answers.length > 3) return "grid-cols-[repeat(auto-fill,minmax(min(100%,10rem),1fr))]";
+  const short = answers.every(({ key, label }) => key === NOT_KNOWN || label.length <= 5);
+  return short
+    ? "grid-cols-[repeat(auto-fit,minmax(min(100%,6.5rem),1fr))]"
+    : "grid-cols-[repeat(auto-fit,minmax(min(100%,9rem),1fr))]";
+}
+
 function Buttons({ id, value, onChange, describedBy, invalid, answers }: AnswersProps) {
   return (
     <div
@@ -62,7 +71,7 @@ function Buttons({ id, value, onChange, describedBy, invalid, answers }: Answers
       role="radiogroup"
       aria-labelledby={`${id}-label`}
       aria-describedby={describedBy}
-      className={`grid gap-2 outline-none ${answers.length > 3 ? "grid-cols-[repeat(auto-fill,minmax(min(100%,10rem),1fr))]" : "grid-cols-[repeat(auto-fit,minmax(min(100%,6.5rem),1fr))]"} ${invalid ? "border-l-8 border-ink pl-2" : ""}`}
+      className={`grid gap-2 outline-none ${columnsFor(answers)} ${invalid ? "border-l-8 border-ink pl-2" : ""}`}
     >
       {answers.map(({ key, label: answer, value: means }) => (
         <label

@@ -25,6 +25,11 @@ export function SavePanel(props: Omit<SectionBodyProps, "section">) {
         {busy ? words.saving : words.save}
       </Button>
       <div role="status">
+        {saving.is === "faulty" && props.faults.length > 0 && (
+          <Notice tone="plain" title={words.errorsTitle}>
+            <PlaceLinks errors={props.faults} onGo={props.onGo} />
+          </Notice>
+        )}
         {saving.is === "unreached" && <p className="font-semibold">{words.unreached}</p>}
         {saving.is === "signed-out" && (
           <>

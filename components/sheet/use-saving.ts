@@ -25,7 +25,7 @@ export interface Stale {
 }
 
 export type Saving =
-  | { is: "idle" | "saving" | "unreached" | "signed-out" }
+  | { is: "idle" | "saving" | "faulty" | "unreached" | "signed-out" }
   | { is: "refused"; problem: ProblemDocument; errors: FieldError[] }
   | { is: "stale"; stale: Stale };
 
@@ -40,7 +40,8 @@ export function useSaving({ base, keeper, onCheck, onBase }: Ground) {
   const [saving, setSaving] = useState<Saving>({ is: "idle" });
 
   const save = async () => {
-    if (saving.is === "saving" || !(await onCheck())) return;
+    if (saving.is === "saving") return;
+    if (!(await onCheck())) return setSaving({ is: "faulty" });
     const sheet = finished(form.getValues(), () => crypto.randomUUID());
     // Kept, so that a second try after a lost answer names the same things.
     for (const part of Object.values(parts)) {

@@ -92,7 +92,8 @@ export type Origin = z.infer<typeof originShape>;
 /**
  * One thing to look at: what is asked, how to look, why it matters and what a fault does. `who` says who may mend it,
  * `touches` names the checks that mending it can change, `figures` are the rig's own numbers by callout, `listed` says
- * what on the sheet puts it on this list, and `origin` where it comes from.
+ * what on the sheet puts it on this list, and `origin` where it comes from. `ruled` is a check that the sheet itself
+ * answers with a fault: nothing that is seen at the rig makes it good.
  */
 export const checkShape = z.looseObject({
   key: z.string().check(z.minLength(1)),
@@ -113,6 +114,7 @@ export const checkShape = z.looseObject({
   lamps: z.optional(lampsShape),
   figures: z.optional(z.partialRecord(z.enum(["A", "B", "C", "D"]), z.string())),
   listed: z.optional(z.string()),
+  ruled: z.optional(z.literal(true)),
   origin: z.optional(originShape),
 });
 export type Check = z.infer<typeof checkShape>;
@@ -174,4 +176,9 @@ export function walkChecks(
     ),
   );
   return document.walks[purpose][depth].flatMap((key) => placed.get(key) ?? []);
+}
+
+/** The checks of a list by which its sheet rules the rig out; none where it does not. */
+export function ruledBy(document: RevisionDocument): Check[] {
+  return document.list.stations.flatMap(({ checks }) => checks.filter(({ ruled }) => ruled));
 }

@@ -68,7 +68,12 @@ describe("sections", () => {
     ]);
     expect(shown({ ...whole, gear: { airLine: { there: true } } }, "airLine")).toContain("serial");
     expect(shown({ ...whole, gear: { airLine: { serial: "A" } } }, "airLine")).toContain("lot");
-    expect(shown({ ...whole, procedure: { says: "forbidden" } }, "procedure")).toEqual(["says"]);
+    const forbids = (more: object) =>
+      shown({ ...whole, procedure: { says: "forbidden", ...more } }, "procedure").sort();
+    expect(forbids({})).toEqual(["manual", "page", "photo", "says"]);
+    // What someone wrote down before is not lost by it.
+    expect(forbids({ endState: "Key off" })).toContain("endState");
+    expect(shown({ ...whole, procedure: { says: "not-recorded" } }, "procedure")).toEqual(["says"]);
     expect(shown({ ...whole, procedure: { says: "how" } }, "procedure")).toContain("endState");
     expect(shown({ ...whole, gear: { towBar: { coupling: "pintle" } } }, "coupler")).not.toContain(
       "ballSize",
@@ -127,7 +132,7 @@ describe("a draft", () => {
       name: "Bay 3",
       coach: { id: "new 1", jacks: true },
       gear: { airLine: { there: false }, towBar: { id: "kept", rating: null } },
-      procedure: { says: "forbidden" },
+      procedure: { says: "forbidden", page: "12" },
     });
   });
 
@@ -217,7 +222,8 @@ describe("two people's sheets", () => {
   });
 
   it("agree where both made the same change, and what one emptied stays empty", () => {
-    const { jacks: _, ...coach } = base.coach!;
+    const coach = { ...base.coach! };
+    delete coach.jacks;
     const mine = { ...base, name: "Lot 9", coach };
     const merged = mergeSheets(base, mine, { ...base, name: "Lot 9" });
     expect(merged.sheet).toEqual(mine);

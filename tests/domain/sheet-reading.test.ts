@@ -15,6 +15,7 @@ describe("valueWords", () => {
     [mass, undefined, "us", "Nobody has looked yet"],
     [mass, null, "us", "Not known"],
     [mass, quantityOf("mass", 26000, "lb"), "us", "26,000\u00a0lb"],
+    [mass, "26,", "us", "26,"],
     // NIST SP 811: 1 lb = 0.453 592 37 kg (exact), so 26,000 lb = 11,793.401 62 kg; four digits are shown.
     [mass, quantityOf("mass", 26000, "lb"), "si", "11,790\u00a0kg, entered as 26,000\u00a0lb"],
     // 1 in = 0.0254 m (exact), so 55.9 cm = 22.007 874… in.

@@ -98,6 +98,9 @@ test("the impossible is refused with the field named, the unusual is taken with 
   const form = page.locator("form");
   await fillField(form, words.name.label, { kind: "text", most: 60 }, "Bay 9");
   await goToSection(page, "coach");
+  await page.getByLabel("GVWR", { exact: true }).fill("22,");
+  await page.reload();
+  await expect(page.getByLabel("GVWR", { exact: true })).toHaveValue("22,");
   await fillField(form, "GVWR", coach, pounds(22000));
   await fillField(form, "GCWR", coach, pounds(20000));
   await page.getByLabel("GCWR", { exact: true }).blur();

@@ -5,7 +5,10 @@ import type { Facts } from "./facts";
 /** A check's own words and drawing on one rig. */
 export type Words = Pick<Check, "part" | "ask" | "how" | "why" | "mend"> &
   Partial<
-    Pick<Check, "kind" | "side" | "drawn" | "caution" | "who" | "touches" | "measure" | "lamps" | "figures">
+    Pick<
+      Check,
+      "kind" | "side" | "drawn" | "caution" | "who" | "touches" | "measure" | "lamps" | "figures" | "ruled"
+    >
   > & { origin: Origin };
 
 /**

@@ -16,8 +16,9 @@ export const ruledOutEntries: Entry[] = [
     words: (facts) => ({
       part: "cabin",
       drawn: "place",
+      ruled: true,
       ask: "The car’s own towing page is recorded",
-      how: "It is not: the sheet has no page and end state from this car’s own manual. Mark Fault.",
+      how: "It is not: the sheet has no page and end state from this car’s own manual.",
       why: manualWhy,
       mend: "Find the page for towing on four wheels in this car’s owner’s manual: its year, trim, engine and gearbox. Write its number and the end state on the sheet.",
       origin: carsManual(facts),
@@ -32,8 +33,9 @@ export const ruledOutEntries: Entry[] = [
     words: (facts) => ({
       part: "cabin",
       drawn: "place",
+      ruled: true,
       ask: "The manual allows all four wheels down",
-      how: "It does not: by the sheet, this car’s own manual forbids towing it on its four wheels. Mark Fault.",
+      how: "It does not: by the sheet, this car’s own manual forbids towing it on its four wheels.",
       why: manualWhy,
       mend: "This car does not roll behind a coach on its own wheels. Ask a licensed shop about another way to take it along.",
       who: "A licensed shop.",
@@ -49,11 +51,11 @@ export const ruledOutEntries: Entry[] = [
     words: ({ ruleOuts }) => ({
       part: "receiver",
       drawn: "place",
+      ruled: true,
       ask: "Nothing on the sheet rules it out",
       how: text(
         "Something does.",
         ...ruleOuts.filter(({ code }) => !code.startsWith("manual-")).map(({ says }) => says),
-        "If that is still so, mark Fault.",
       ),
       why: "The weakest link decides. A part loaded beyond its maker’s figure can give way without a sign.",
       mend: "Have the part or the weight changed, then the sheet: a new list is made from it. A figure that was misread is put right on the sheet.",

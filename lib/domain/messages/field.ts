@@ -55,6 +55,7 @@ export const fieldWords = {
     prompter: "Lamp prompter for the driver’s phone",
     signIn: "Sign in",
     never: "No walk yet",
+    ruled: "Do not tow",
     last: (kind: Purpose, when: string) => `${lower(purpose[kind])}, ${when}`,
     start: (kind: Purpose) => purpose[kind],
     checks: (count: number) => (count === 1 ? "1 check" : `${count} checks`),

@@ -28,6 +28,7 @@ export const rigsWords = {
   sub: "What your organization keeps, or has built for someone.",
   caption: "Rigs",
   fetching: "Fetching the rigs",
+  drafts: "Drafts on this phone",
   newRig: "New rig",
   emptyTitle: "No rigs yet",
   emptyWriter:

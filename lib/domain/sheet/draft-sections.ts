@@ -129,9 +129,15 @@ export function fieldsShown(sheet: Sheet, part: Part): { first: string[]; more: 
   return { first: part.first.filter(shows), more: rest.filter(shows) };
 }
 
+/** A manual that forbids it has its title and page too; what was written down before stays to be seen, and kept. */
+function shownOfManual(says: unknown, key: string, value: unknown): boolean {
+  if (key === "says" || says === "how") return true;
+  return isFilled(value) || (says === "forbidden" && ["manual", "page", "photo"].includes(key));
+}
+
 function fieldShows(sheet: Sheet, part: Part, key: string): boolean {
   const values = partIn(sheet, part) ?? {};
-  if (part.key === "procedure") return key === "says" || values.says === "how";
+  if (part.key === "procedure") return shownOfManual(values.says, key, values[key]);
   if (key === "converterAt") return values.converter !== "none" && isFilled(values.converter);
   if (key === "ballSize") return sheet.gear?.towBar?.coupling === "ball";
   if (!("there" in part.fields) || key === "there" || values.there === true) return true;

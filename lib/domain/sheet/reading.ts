@@ -97,7 +97,7 @@ export function sideWords(
 
 /** The SI value of a quantity in words, for whoever asks; null for anything else. */
 export function siWords(field: Field, value: unknown): string | null {
-  if (!isQuantity(field) || value === null || value === undefined) return null;
+  if (!isQuantity(field) || value === null || typeof value !== "object") return null;
   const unit = { massKg: "kg", lengthM: "m", speedMps: "m/s", distanceM: "m", pressurePa: "Pa" };
   const si = siOf(field.kind, value as QuantityOf<QuantityKind>);
   return figureWords(si, unit[siMember[field.kind]]);
@@ -121,6 +121,8 @@ function isQuantity(field: Field): field is { kind: QuantityKind } {
 }
 
 function quantityWords(kind: QuantityKind, quantity: QuantityOf<QuantityKind>, units: UnitSystem): string {
+  // A draft holds what was typed until it reads as a figure.
+  if (typeof quantity !== "object") return String(quantity);
   const shown = shownIn(kind, quantity as never, units);
   const { entered } = quantity;
   const words = figureWords(shown.value, shown.unit);
