@@ -99,6 +99,7 @@ test("the impossible is refused with the field named, the unusual is taken with 
   await fillField(form, words.name.label, { kind: "text", most: 60 }, "Bay 9");
   await goToSection(page, "coach");
   await page.getByLabel("GVWR", { exact: true }).fill("22,");
+  await keptOnPhone(page);
   await page.reload();
   await expect(page.getByLabel("GVWR", { exact: true })).toHaveValue("22,");
   await fillField(form, "GVWR", coach, pounds(22000));
