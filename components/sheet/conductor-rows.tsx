@@ -4,14 +4,20 @@ import { sheetFormWords as words } from "@/lib/domain/messages/sheet-form";
 import { conductorWords, optionWords } from "@/lib/domain/messages/sheet-wiring";
 import { blankRow } from "@/lib/domain/sheet/draft";
 import type { ListOutline } from "@/lib/domain/sheet/outline";
-import { changing, conductorFields, type Conductor } from "@/lib/domain/sheet/wiring";
+import { changing, conductorFields, wiresAt, type Conductor } from "@/lib/domain/sheet/wiring";
+import { useDraftDesk } from "./draft-context";
 import { FieldLine } from "./field-line";
 import { RowHead, Where } from "./row-list";
 
+/** As many wires as a sheet takes in one segment. */
+const MOST = 16;
+
 /** The wires of a segment: color, what each does at the near and at the far end, and a word where the two differ. */
-export function ConductorRows({ list, name }: { list: ListOutline; name: string }) {
+export function ConductorRows({ list, name, at }: { list: ListOutline; name: string; at: number }) {
   const { fields: rows, append, remove } = useFieldArray({ name });
   const { getValues, setValue } = useFormContext();
+  const { sheet } = useDraftDesk();
+  const known = rows.length === 0 ? wiresAt(sheet.wiring ?? {}, at).slice(0, MOST) : [];
   const copy = () =>
     rows.forEach((_, at) => {
       const { near, far } = getValues(`${name}.${at}`) as Conductor;
@@ -32,7 +38,16 @@ export function ConductorRows({ list, name }: { list: ListOutline; name: string 
         ))}
       </ol>
       <div className="flex flex-wrap gap-2.5 pt-3">
-        {rows.length < 16 && (
+        {known.length > 0 && (
+          <Button
+            size="desk"
+            className="min-h-13"
+            onClick={() => append(known.map((wire) => ({ ...blankRow(conductorFields), ...wire })))}
+          >
+            {at === 0 ? words.wiresOfSocket(known.length) : words.wiresOfSegment(known.length, at)}
+          </Button>
+        )}
+        {rows.length < MOST && (
           <Button size="desk" className="min-h-13" onClick={() => append(blankRow(conductorFields))}>
             {words.conductorAdd}
           </Button>

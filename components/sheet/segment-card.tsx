@@ -34,7 +34,7 @@ export function SegmentCard({ list, at, of, onMove, onRemove }: SegmentCardProps
           <FieldLine key={key} name={`${name}.${key}`} field={field} words={labels[key]!} compact />
         ))}
       </div>
-      <ConductorRows list={conductors} name={`${name}.conductors`} />
+      <ConductorRows list={conductors} name={`${name}.conductors`} at={at} />
       <div role="group" aria-label={`${title}, ${splices.title}`} className="mt-4">
         <h4 className="font-extrabold">{splices.title}</h4>
         <p className="text-base text-soft">{words.splicesLead}</p>

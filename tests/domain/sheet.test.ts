@@ -12,7 +12,7 @@ import {
   unitsFor,
 } from "@/lib/domain/sheet/quantity";
 import { isThere, readSheet, type Sheet } from "@/lib/domain/sheet/sheet";
-import { changing } from "@/lib/domain/sheet/wiring";
+import { changing, wiresAt } from "@/lib/domain/sheet/wiring";
 import { feet, inches, pounds } from "@/seeders/demo/quantities";
 import { householdSheet } from "@/seeders/demo/sheets/household";
 import { longCoachSheet } from "@/seeders/demo/sheets/long-coach";
@@ -204,4 +204,22 @@ test("a conductor that does one thing at one end and another at the other is fou
       ],
     }),
   ).toEqual([]);
+});
+
+test("a segment's wires begin as the socket was measured, or as the segment before it ends", () => {
+  const wiring = longCoachSheet.wiring!;
+  expect(wiresAt(wiring, 0).map(({ near }) => near)).toEqual([
+    "ground",
+    "stop",
+    "tail",
+    "charge",
+    "left",
+    "right",
+  ]);
+  const changed = {
+    segments: [{ conductors: [{ color: "red", near: "stop", far: "left" }, { near: "tail" }] }],
+  };
+  expect(wiresAt(changed as typeof wiring, 1)).toEqual([{ color: "red", near: "left" }]);
+  expect(wiresAt({}, 0)).toEqual([]);
+  expect(wiresAt({}, 3)).toEqual([]);
 });

@@ -149,6 +149,8 @@ export const sheetFormWords = {
   moveAloud: (how: string, what: string) => `${how}: ${what}`,
   conductorsNone: "No wires yet.",
   conductorAdd: "Add a wire",
+  wiresOfSocket: (count: number) => `The socket’s ${count}, as measured there`,
+  wiresOfSegment: (count: number, segment: number) => `The ${count} of segment ${segment}, as they end there`,
   copyFar: "Measured the same at the far end: copy where it is empty",
   splicesLead: "Where wires are joined within this segment, and how.",
   spliceAdd: "Add a splice",

@@ -101,3 +101,15 @@ export type Wiring = ValuesOf<typeof wiringFields> & {
 export function changing(segment: Segment): Conductor[] {
   return (segment.conductors ?? []).filter(({ near, far }) => near && far && near !== far);
 }
+
+/**
+ * What is known already of a segment's wires at their near ends: the first begins at the socket, where each contact was
+ * measured, every other where the one before it ends. Their far ends are still to be measured.
+ */
+export function wiresAt({ socket = [], segments = [] }: Wiring, at: number): Conductor[] {
+  if (at === 0) return socket.flatMap(({ does }) => (does && does !== "unused" ? [{ near: does }] : []));
+  return (segments[at - 1]?.conductors ?? []).flatMap(({ color, far }) => {
+    const wire = { ...(color && { color }), ...(far && { near: far }) };
+    return Object.keys(wire).length > 0 ? [wire] : [];
+  });
+}
