@@ -28,7 +28,7 @@ async function openWalk(page: Page, product: Product, photosOf: (reading: WalkRe
 
 const firstCheck = ({ document }: WalkReading) =>
   document.list.stations.flatMap(({ checks }) => checks).find(({ key }) => key === keyOf(document))!;
-const keyOf = (document: WalkReading["document"]) => document.walks["hook-up"].full[0]!;
+const keyOf = (document: WalkReading["document"]) => document.walks["re-check"].full[0]!;
 
 test("a check's photographs stand with it, those of no check stand apart, each in the state it is in", async ({
   page,

@@ -22,10 +22,15 @@ export async function goToSection(page: Page, section: SectionKey): Promise<void
   await page.getByRole("heading", { level: 2 }).first().waitFor();
   if (await heading.isVisible()) return;
   const fold = page.locator("form > details").first();
-  if (await fold.isVisible()) await fold.locator("summary").click();
   const contents = page.getByRole("navigation", { name: words.contents }).filter({ visible: true });
-  await contents.getByRole("button", { name: new RegExp(`^${escaped(title)}`) }).click();
-  await expect(heading).toBeVisible();
+  // The contents fold up by themselves as a section opens, which may be just now.
+  await expect(async () => {
+    if ((await fold.isVisible()) && !(await fold.evaluate((each) => (each as HTMLDetailsElement).open)))
+      await fold.locator("summary").click({ timeout: 1_000 });
+    const button = contents.getByRole("button", { name: new RegExp(`^${escaped(title)}`) });
+    await button.click({ timeout: 1_000 });
+    await expect(heading).toBeVisible({ timeout: 2_000 });
+  }).toPass();
 }
 
 /**
