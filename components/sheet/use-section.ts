@@ -13,21 +13,23 @@ export function useSection(): {
   const section = sectionKeys.find((key) => key === wanted) ?? "rig";
   const heading = useRef<HTMLHeadingElement>(null);
   const arrived = useRef<SectionKey | null>(null);
-  const focus = useRef<string | null>(null);
+  // Where to go within a section, kept until that section is the one that shows.
+  const wish = useRef<{ section: SectionKey; field: string } | null>(null);
   useEffect(() => {
     // The first section of a page load leaves the focus where the browser put it.
     const moved = arrived.current !== null && arrived.current !== section;
     arrived.current = section;
-    if (!moved && focus.current === null) return;
-    const target = focus.current ? document.getElementById(focus.current) : null;
-    focus.current = null;
+    const due = wish.current?.section === section ? wish.current : null;
+    if (!moved && !due) return;
+    wish.current = null;
+    const target = due && document.getElementById(due.field);
     openFolds(target);
     if (target) target.scrollIntoView({ block: "center" });
     else heading.current?.closest("form")?.scrollIntoView();
     (target ?? heading.current)?.focus({ preventScroll: true });
   });
   const go = (next: SectionKey, field?: string) => {
-    focus.current = field ?? null;
+    wish.current = field === undefined ? null : { section: next, field };
     const query = new URLSearchParams(params);
     query.set("section", next);
     // The router follows the address without asking the server for anything.

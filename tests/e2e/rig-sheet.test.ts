@@ -265,7 +265,7 @@ for (const colorScheme of ["light", "dark"] as const) {
     [1280, 800],
   ] as const) {
     test(`axe finds nothing in any section, ${colorScheme}, ${width} px`, async ({ page, product }) => {
-      test.setTimeout(120_000);
+      test.setTimeout(300_000);
       await page.emulateMedia({ colorScheme });
       await page.setViewportSize({ width, height });
       await newSheet(page, product);
@@ -289,13 +289,13 @@ async function targetsAreLarge(page: Page, section: SectionKey): Promise<void> {
   const targets = page
     .locator("form")
     .locator("button, a, summary, select, textarea, input[type=text], input[type=date], label:has(input)");
-  for (const target of await targets.filter({ visible: true }).all()) {
-    const box = (await target.boundingBox())!;
-    expect(
-      box.height,
-      `${section}: ${await target.evaluate((node) => node.outerHTML.slice(0, 120))}`,
-    ).toBeGreaterThanOrEqual(44);
-  }
+  const small = await targets.filter({ visible: true }).evaluateAll((nodes) =>
+    nodes
+      // A sum of fractions may end a hair below.
+      .filter((node) => node.getBoundingClientRect().height < 43.99)
+      .map((node) => node.outerHTML.slice(0, 120)),
+  );
+  expect(small, section).toEqual([]);
 }
 
 test("with the largest text nothing needs sideways scrolling", async ({ page, product }) => {
