@@ -27,7 +27,7 @@ export function ConductorRows({ list, name, at }: { list: ListOutline; name: str
     <div role="group" aria-label={list.title} className="mt-4">
       <h4 className="font-extrabold">{list.title}</h4>
       <Where words={conductorWords} />
-      <ol>
+      <div>
         {rows.map((row, at) => (
           <ConductorRow
             key={`${row.id} ${at}`}
@@ -36,7 +36,7 @@ export function ConductorRows({ list, name, at }: { list: ListOutline; name: str
             onRemove={() => remove(at)}
           />
         ))}
-      </ol>
+      </div>
       <div className="flex flex-wrap gap-2.5 pt-3">
         {known.length > 0 && (
           <Button
@@ -69,7 +69,7 @@ function ConductorRow({ title, name, onRemove }: ConductorRowProps) {
   const differs = changing({ conductors: [wire] }).length > 0;
   const { color, near, far, tagged } = wire;
   return (
-    <li role="group" aria-label={title} className="border-b border-rule py-3">
+    <div role="group" aria-label={title} className="border-b border-rule py-3">
       <RowHead title={title} onRemove={onRemove} />
       <div className="grid grid-cols-2 gap-x-3 gap-y-2">
         <div className="col-span-2">
@@ -98,6 +98,6 @@ function ConductorRow({ title, name, onRemove }: ConductorRowProps) {
           />
         </div>
       )}
-    </li>
+    </div>
   );
 }

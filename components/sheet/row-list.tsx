@@ -22,9 +22,9 @@ export function RowList({ name, list, most, add, fill }: RowListProps) {
   return (
     <>
       <Where words={of} />
-      <ol>
+      <div>
         {rows.map((row, at) => (
-          <li key={row.id} role="group" aria-label={called(at + 1)} className="border-b border-rule py-3">
+          <div key={row.id} role="group" aria-label={called(at + 1)} className="border-b border-rule py-3">
             <RowHead title={called(at + 1)} onRemove={() => remove(at)} />
             <div className="grid grid-cols-[repeat(auto-fit,minmax(min(100%,15rem),1fr))] gap-x-4 gap-y-2">
               {Object.entries(fields).map(([key, field]) => (
@@ -37,9 +37,9 @@ export function RowList({ name, list, most, add, fill }: RowListProps) {
                 />
               ))}
             </div>
-          </li>
+          </div>
         ))}
-      </ol>
+      </div>
       <div className="flex flex-wrap gap-2.5 pt-3">
         {fill && rows.length === 0 && (
           <Button

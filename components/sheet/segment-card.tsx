@@ -22,7 +22,7 @@ export function SegmentCard({ list, at, of, onMove, onRemove }: SegmentCardProps
   const { fields, words: labels } = list;
   const [conductors, splices] = list.lists as [ListOutline, ListOutline];
   return (
-    <li role="group" aria-label={title} className="border-2 border-ink p-3">
+    <div role="group" aria-label={title} className="border-2 border-ink p-3">
       <RowHead title={title} onRemove={onRemove} />
       {from && to ? (
         <p className="text-lg leading-tight font-extrabold">
@@ -46,7 +46,7 @@ export function SegmentCard({ list, at, of, onMove, onRemove }: SegmentCardProps
           <Move label={words.down} title={title} disabled={at === of - 1} onMove={() => onMove(1)} />
         </div>
       )}
-    </li>
+    </div>
   );
 }
 

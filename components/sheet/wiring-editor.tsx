@@ -34,7 +34,7 @@ export function WiringEditor() {
       </Group>
       <Group title={segmentList.title} lead={words.segmentsLead}>
         <Where words={segmentList.words} />
-        <ol className="mt-3 flex flex-col gap-4">
+        <div className="mt-3 flex flex-col gap-4">
           {segments.map((segment, at) => (
             <SegmentCard
               list={segmentList}
@@ -45,7 +45,7 @@ export function WiringEditor() {
               onRemove={() => remove(at)}
             />
           ))}
-        </ol>
+        </div>
         {segments.length < 24 && (
           <Button
             size="desk"
