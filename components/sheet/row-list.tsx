@@ -79,7 +79,7 @@ type RowHeadProps = { title: string; onRemove: () => void };
 /** The head of a row: which one it is, and the way to be rid of it. */
 export function RowHead({ title, onRemove }: RowHeadProps) {
   return (
-    <div className="flex items-center justify-between gap-3">
+    <div className="flex flex-wrap items-center justify-between gap-x-3">
       <p className="tabular text-base text-soft">{title}</p>
       <button
         type="button"
